@@ -1,0 +1,51 @@
+import type { Config } from "tailwindcss";
+
+/**
+ * The tokens of the look, once. A token named here as `var(--…)` changes with the theme;
+ * both values stand in `themes`, which src/ui/theme.css is tested against.
+ */
+export const themes = {
+  light: {
+    paper: "#F7F4EC",
+    ink: "#1B1E20",
+    rule: "#D8D1C0",
+    oil: "#8A5A00",
+    holding: "#0E5F55",
+    dropping: "#8A4B00",
+    low: "#9B1C1C",
+  },
+  dark: {
+    paper: "#15181A",
+    ink: "#ECE7DA",
+    rule: "#34393C",
+    oil: "#E0A63A",
+    holding: "#5CC3B2",
+    dropping: "#F0A95A",
+    low: "#FF8A80",
+  },
+} as const;
+
+const themed = (name: keyof typeof themes.light) => `var(--${name})`;
+
+export default {
+  content: ["./index.html", "./src/**/*.{ts,tsx}"],
+  theme: {
+    extend: {
+      colors: {
+        paper: themed("paper"),
+        ink: themed("ink"),
+        rule: themed("rule"),
+        oil: themed("oil"),
+        holding: themed("holding"),
+        dropping: themed("dropping"),
+        low: themed("low"),
+        settling: "color-mix(in srgb, var(--ink) 70%, var(--paper))",
+      },
+      fontFamily: { sans: ["Atkinson Hyperlegible", "system-ui", "sans-serif"] },
+      fontSize: { figure: ["4rem", "1"], "figure-xl": ["5rem", "1"] },
+      borderRadius: { card: "12px" },
+      minHeight: { target: "48px", "check-target": "56px" },
+      minWidth: { target: "48px", "check-target": "56px" },
+    },
+  },
+} satisfies Config;
