@@ -7,6 +7,7 @@ import type { Config } from "tailwindcss";
 export const themes = {
   light: {
     paper: "#F7F4EC",
+    card: "#FDFBF6",
     ink: "#1B1E20",
     rule: "#D8D1C0",
     oil: "#8A5A00",
@@ -16,6 +17,7 @@ export const themes = {
   },
   dark: {
     paper: "#15181A",
+    card: "#1B1F22",
     ink: "#ECE7DA",
     rule: "#34393C",
     oil: "#E0A63A",
@@ -25,6 +27,8 @@ export const themes = {
   },
 } as const;
 
+/** Ink thinned with paper: 70 % for second-rank words and *settling*, 55 % for edges of controls. */
+const thinned = (percent: number) => `color-mix(in srgb, var(--ink) ${percent}%, var(--paper))`;
 const themed = (name: keyof typeof themes.light) => `var(--${name})`;
 
 export default {
@@ -33,19 +37,22 @@ export default {
     extend: {
       colors: {
         paper: themed("paper"),
+        card: themed("card"),
         ink: themed("ink"),
+        soft: thinned(70),
+        edge: thinned(55),
         rule: themed("rule"),
         oil: themed("oil"),
         holding: themed("holding"),
         dropping: themed("dropping"),
         low: themed("low"),
-        settling: "color-mix(in srgb, var(--ink) 70%, var(--paper))",
+        settling: thinned(70),
       },
       fontFamily: { sans: ["Atkinson Hyperlegible", "system-ui", "sans-serif"] },
       fontSize: { figure: ["4rem", "1"], "figure-xl": ["5rem", "1"] },
       borderRadius: { card: "12px" },
-      minHeight: { target: "48px", "check-target": "56px" },
-      minWidth: { target: "48px", "check-target": "56px" },
+      minHeight: { target: "var(--target)" },
+      minWidth: { target: "var(--target)" },
     },
   },
 } satisfies Config;

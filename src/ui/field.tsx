@@ -1,0 +1,58 @@
+import { useId, type ReactNode } from "react";
+
+export interface FieldWords {
+  label: string;
+  /** What to type, where the label does not say it. */
+  hint?: ReactNode;
+  /** What is wrong with what was typed. */
+  error?: string;
+}
+
+/** What the control inside a field must carry to be tied to its label, hint and error. */
+export interface FieldWiring {
+  id: string;
+  "aria-describedby": string | undefined;
+  "aria-invalid": true | undefined;
+}
+
+type Props = FieldWords & { children: (wiring: FieldWiring) => ReactNode };
+
+export function Field({ label, hint, error, children }: Props) {
+  const id = useId();
+  const described = [hint && `${id}-hint`, error && `${id}-error`].filter(Boolean).join(" ");
+  return (
+    <div className="flex flex-col gap-1">
+      <label htmlFor={id} className="font-bold">
+        {label}
+      </label>
+      {children({
+        id,
+        "aria-describedby": described || undefined,
+        "aria-invalid": error ? true : undefined,
+      })}
+      <FieldNotes id={id} hint={hint} error={error} />
+    </div>
+  );
+}
+
+/** The lines under a field: its hint, and its error in word, mark and colour. */
+export function FieldNotes({ id, hint, error }: { id: string } & Omit<FieldWords, "label">) {
+  return (
+    <>
+      {hint && (
+        <p id={`${id}-hint`} className="text-soft">
+          {hint}
+        </p>
+      )}
+      {error && (
+        <p id={`${id}-error`} className="border-l-4 border-low pl-2 font-bold text-low">
+          {error}
+        </p>
+      )}
+    </>
+  );
+}
+
+/** The look that every typed-in control shares. */
+export const controlClass =
+  "min-h-target w-full min-w-0 rounded-card border border-edge bg-card px-3 text-xl text-ink aria-invalid:border-2 aria-invalid:border-low";
