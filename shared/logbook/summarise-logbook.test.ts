@@ -1,0 +1,56 @@
+import { describe, expect, it } from "vitest";
+import type { LogEntry } from "../schemas/entry.ts";
+import { logbook } from "./logbook-in-words.test-support.ts";
+import { summariseLogbook } from "./summarise-logbook.ts";
+
+const OWNER = "owner";
+const summarise = (entries: LogEntry[]) => summariseLogbook({ ownerId: OWNER, entries });
+
+describe("a check against its baseline (one run each, 5 mL barrel with 0.2 mL marks)", () => {
+  const after = (secondMl: number, patch = {}) =>
+    summarise(
+      logbook()
+        .bike({ name: "Moss", ...patch })
+        .check(12, [3.0])
+        .check(32, [secondMl]).entries,
+    );
+
+  it("settles on the first", () => {
+    const summary = summarise(logbook().bike({ name: "Moss" }).check(12, [3.0]).entries);
+    expect(summary).toMatchObject({ verdict: "settling", action: "ride", pLow: null });
+    expect(summary.due).toMatchObject({ atHours: 32, inHours: 20, overdue: false });
+    expect(summary.checks[0]).toMatchObject({ ratio: null, uRatio: null, runsToSettle: null });
+  });
+
+  // The three worked cases of docs/measurement.md, worked by hand from its formulas.
+  it("calls 2.5 mL after 3.0 low, stop, due now", () => {
+    const summary = after(2.5);
+    expect(summary).toMatchObject({ verdict: "low", action: "stop" });
+    expect(summary.pLow).toBeCloseTo(0.65, 2);
+    expect(summary.due).toMatchObject({ atHours: 32, inHours: 0, overdue: false });
+  });
+
+  it("calls 2.7 mL dropping, repeat, due now", () => {
+    const summary = after(2.7);
+    expect(summary).toMatchObject({ verdict: "dropping", action: "repeat" });
+    expect(summary.pLow).toBeCloseTo(0.13, 2);
+    expect(summary.due).toMatchObject({ atHours: 32, inHours: 0 });
+  });
+
+  it("calls 2.95 mL holding, ride, due after the bike's interval", () => {
+    const summary = after(2.95);
+    expect(summary).toMatchObject({ verdict: "holding", action: "ride" });
+    expect(summary.pLow).toBeCloseTo(0.0025, 4);
+    expect(summary.due).toMatchObject({ atHours: 52, inHours: 20 });
+    expect(after(2.95, { intervalHours: 40 }).due.atHours).toBe(72);
+    expect(after(2.95, { hasScreen: true }).due.atHours).toBe(72);
+  });
+
+  it("settles 2.7 mL with three runs each, a fill a run: dropping, ride, half the interval", () => {
+    const summary = summarise(
+      logbook().bike({ name: "Moss" }).check(12, [3, 3, 3]).check(32, [2.7, 2.7, 2.7]).entries,
+    );
+    expect(summary).toMatchObject({ verdict: "dropping", action: "ride" });
+    expect(summary.due).toMatchObject({ atHours: 42, inHours: 10 });
+  });
+});
