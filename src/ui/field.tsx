@@ -53,6 +53,10 @@ export function FieldNotes({ id, hint, error }: { id: string } & Omit<FieldWords
   );
 }
 
-/** The look that every typed-in control shares. */
-export const controlClass =
-  "min-h-target w-full min-w-0 rounded-card border border-edge bg-card px-3 text-xl text-ink aria-invalid:border-2 aria-invalid:border-low";
+/** The look that every typed-in control shares, but for the size of its letters. */
+export const boxClass =
+  "min-h-target w-full min-w-0 rounded-card border border-edge bg-card text-ink aria-invalid:border-2 aria-invalid:border-low";
+export const controlClass = `${boxClass} px-3 text-xl`;
+/** A box for a number; `large` where it is the one figure of a screen. */
+export const numberClass = (large = false) =>
+  `${boxClass} px-1 text-center font-bold tabular-nums ${large ? "py-2 text-figure" : "text-2xl"}`;

@@ -1,6 +1,6 @@
 import { useId } from "react";
 import type { MeterFormat } from "../../shared/schemas/entry.ts";
-import { controlClass, FieldNotes, type FieldWords } from "./field.tsx";
+import { numberClass, FieldNotes, type FieldWords } from "./field.tsx";
 import { NumberField } from "./number-field.tsx";
 
 interface Props extends FieldWords {
@@ -64,7 +64,7 @@ function Part({ name, value, set, error, large }: PartProps) {
         value={value}
         onChange={(event) => set(event.target.value)}
         onFocus={(event) => event.target.select()}
-        className={`${controlClass} text-center font-bold tabular-nums ${large ? "py-2 text-figure" : ""}`}
+        className={numberClass(large)}
       />
       <span className="text-center text-soft">{name}</span>
     </label>

@@ -1,6 +1,6 @@
 import { Minus, Plus } from "lucide-react";
 import type { ReactNode } from "react";
-import { controlClass, Field, type FieldWiring, type FieldWords } from "./field.tsx";
+import { numberClass, Field, type FieldWiring, type FieldWords } from "./field.tsx";
 import { stepDecimal, type StepLimits } from "./step-decimal.ts";
 
 export interface NumberInput extends StepLimits {
@@ -43,7 +43,7 @@ function StepperInput(props: NumberInput & { label: string; wiring: FieldWiring 
           value={value}
           onChange={(event) => onChange(event.target.value)}
           onFocus={(event) => event.target.select()}
-          className={`${controlClass} h-full text-center font-bold tabular-nums ${unit ? "px-10" : ""} ${large ? "py-2 text-figure" : ""}`}
+          className={`${numberClass(large)} h-full`}
         />
         {unit && (
           <span className="pointer-events-none absolute inset-y-0 right-3 flex items-center text-soft">

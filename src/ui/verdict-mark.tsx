@@ -1,13 +1,13 @@
 import type { Verdict } from "../../shared/schemas/entry.ts";
 import { verdictWords } from "./words.ts";
 
-/** Each verdict as a level in a vessel: level, stepping down, at the bottom and crossed, dashed. */
-const shapes: Record<Verdict, string> = {
-  none: "M7 12h10",
-  settling: "M4 12h4m2 0h4m2 0h4",
-  holding: "M4 12h16",
-  dropping: "M4 8h7v8h9",
-  low: "M4 20h16M8 6l8 8m0-8l-8 8",
+/** Each verdict as a level in a vessel: level, stepping down, at the bottom with a cross, dashed. */
+const levels: Record<Verdict, string> = {
+  none: "",
+  settling: "M6 12h3m2 0h4m2 0h3",
+  holding: "M6 12h14",
+  dropping: "M6 9h7v7h7",
+  low: "M6 20h14",
 };
 
 const inks: Record<Verdict, string> = {
@@ -18,22 +18,20 @@ const inks: Record<Verdict, string> = {
   low: "text-low",
 };
 
-export function VerdictShape({ verdict, size = 24 }: { verdict: Verdict; size?: number }) {
+export function VerdictShape({ verdict, size = 28 }: { verdict: Verdict; size?: number }) {
   return (
     <svg
-      viewBox="0 0 24 24"
+      viewBox="0 0 26 26"
       width={size}
       height={size}
+      fill="none"
+      stroke="currentColor"
       aria-hidden
       className={`shrink-0 ${inks[verdict]}`}
     >
-      <path
-        d={shapes[verdict]}
-        fill="none"
-        stroke="currentColor"
-        strokeWidth={verdict === "none" ? 1.5 : 4}
-        strokeLinejoin="miter"
-      />
+      <path d="M3 3v20h20V3" strokeWidth="1.5" strokeLinecap="round" strokeLinejoin="round" />
+      <path d={levels[verdict]} strokeWidth="4" />
+      {verdict === "low" && <path d="m8.5 5 9 9m0-9-9 9" strokeWidth="2.5" strokeLinecap="round" />}
     </svg>
   );
 }
