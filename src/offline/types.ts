@@ -1,5 +1,11 @@
 import type { BikeDetails } from "../../shared/logbook/bike-details.ts";
-import type { Entry, EntryEnvelope, LogEntry, Receipt } from "../../shared/schemas/entry.ts";
+import type {
+  Entry,
+  EntryEnvelope,
+  LogEntry,
+  Receipt,
+  Syringe,
+} from "../../shared/schemas/entry.ts";
 import type { Summary } from "../../shared/schemas/summary.ts";
 import type { BikeAccess, RefusalReason } from "../../shared/schemas/sync.ts";
 
@@ -20,13 +26,17 @@ export type EntryState =
 export type ForeignEntry = EntryEnvelope & Partial<Receipt>;
 
 /** One line of a bike's log on this phone. */
-export type KeptEntry = EntryState & {
-  entry: LogEntry | ForeignEntry;
-  /** False where this app is too old to read it. */
-  understood: boolean;
-  /** True where this account wrote it. */
-  mine: boolean;
-};
+export type KeptEntry = EntryState &
+  (
+    | { understood: true; entry: LogEntry }
+    /** This app is too old to read it. */
+    | { understood: false; entry: ForeignEntry }
+  ) & {
+    /** True where this account wrote it. */
+    mine: boolean;
+    /** ISO instant at which this phone stored it. */
+    savedAt: string;
+  };
 
 /** What the phone stored with a bike's log, so that the Shed judges nothing on its way up. */
 export interface BikeRecord {
@@ -38,14 +48,38 @@ export interface BikeRecord {
   unsent: number;
 }
 
+/** A bike with its whole log, the newest line first. */
+export interface BikeWithLog {
+  record: BikeRecord;
+  log: KeptEntry[];
+}
+
 export interface SyncStatus {
   phase: "idle" | "sending" | "offline" | "signed-out";
+  /** Entries not yet sent, refused ones included. */
   unsent: number;
   refused: number;
   /** ISO instant the oldest unsent entry was saved at. */
   oldestUnsentAt: string | null;
   lastSyncAt: string | null;
 }
+
+/**
+ * Whether the browser promised to keep what this phone holds. *refused*: it may throw unsent
+ * entries away when it runs short of room; *unavailable*: it keeps nothing (a private window).
+ */
+export type StorageHealth = "unasked" | "persisted" | "refused" | "unavailable";
+
+/** A form half filled in. `content` is whatever the form wrote: parse it before use. */
+export interface Draft {
+  bikeId: string;
+  /** Which form: "check", "note" … */
+  form: string;
+  content: unknown;
+  savedAt: string;
+}
+
+export type { Syringe };
 
 /** Entries as the forms hand them over: the id is made here, `at` by the form. */
 export type NewEntry = Entry extends infer E

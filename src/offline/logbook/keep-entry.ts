@@ -1,0 +1,108 @@
+/** Saves an entry on this phone: the promise behind *Saved on this phone*. */
+import { hashKey } from "@tanstack/react-query";
+import { v7 as makeId } from "uuid";
+import type { Entry } from "../../../shared/schemas/entry.ts";
+import { InvalidEntryError, NotSavedError, StoreUnavailableError } from "../errors.ts";
+import type { KeptEntry, NewEntry } from "../types.ts";
+import type { EntryRow, LogbookChange } from "./database.ts";
+import { asKeptEntry } from "./kept-entry.ts";
+import { checkRegistered, parseNewEntry } from "./parse-new-entry.ts";
+import type { Phone } from "./phone.ts";
+import { refreshBike } from "./refresh-bike.ts";
+import { rememberSyringe } from "./remember-syringe.ts";
+
+export interface KeepOptions {
+  /** Gives up when aborted. */
+  signal: AbortSignal;
+  draft?: { bikeId: string; form: string };
+}
+
+/**
+ * Ids of entries whose saving was given up. The write may have completed all the same, unseen, so
+ * saving the same again goes under the same id and cannot make two of it.
+ */
+const givenUp = new Map<string, string>();
+
+function contentKey(phone: Phone, entry: NewEntry): string {
+  return hashKey([phone.databaseName, { ...entry, at: undefined }]);
+}
+
+async function writeAll(
+  change: LogbookChange,
+  row: EntryRow,
+  phone: Phone,
+  draft: KeepOptions["draft"],
+): Promise<void> {
+  const entry = row.entry as Entry;
+  const bike = await change.objectStore("bikes").get(entry.bikeId);
+  checkRegistered(entry, bike);
+  const entries = change.objectStore("entries");
+  if (!(await entries.get(entry.id))) await entries.add(row);
+  await refreshBike(
+    change,
+    bike ?? { bikeId: entry.bikeId, access: "owner", rev: 0 },
+    phone.account,
+  );
+  await rememberSyringe(change, row, phone.account);
+  if (draft) await change.objectStore("drafts").delete([draft.bikeId, draft.form]);
+}
+
+/** Undoes what can still be undone; a transaction that has finished cannot be. */
+function abort(change: LogbookChange): void {
+  try {
+    change.abort();
+  } catch {
+    // Finished or aborted already.
+  }
+}
+
+async function write(row: EntryRow, phone: Phone, options: KeepOptions): Promise<EntryRow> {
+  const database = await phone.open();
+  options.signal.throwIfAborted();
+  const change = database.transaction(["entries", "bikes", "syringes", "drafts"], "readwrite", {
+    durability: "strict",
+  });
+  const giveUp = () => abort(change);
+  options.signal.addEventListener("abort", giveUp);
+  try {
+    await Promise.all([writeAll(change, row, phone, options.draft), change.done]);
+  } catch (error) {
+    giveUp();
+    throw error;
+  } finally {
+    options.signal.removeEventListener("abort", giveUp);
+  }
+  const written = await database.get("entries", row.entry.id);
+  if (!written) throw new Error("The entry was not there when read back.");
+  return written;
+}
+
+/** A hanging database neither answers nor fails. */
+const orAborted = <T>(work: Promise<T>, signal: AbortSignal): Promise<T> =>
+  new Promise((resolve, reject) => {
+    signal.addEventListener("abort", () => reject(signal.reason as Error), { once: true });
+    work.then(resolve, reject);
+  });
+
+const isTyped = (error: unknown) =>
+  error instanceof InvalidEntryError || error instanceof StoreUnavailableError;
+
+export async function keepEntry(
+  phone: Phone,
+  newEntry: NewEntry,
+  options: KeepOptions,
+): Promise<KeptEntry> {
+  const key = contentKey(phone, newEntry);
+  const entry = parseNewEntry(newEntry, givenUp.get(key) ?? makeId());
+  const savedAt = phone.now().toISOString();
+  try {
+    const work = write({ entry, savedAt, unsentSince: savedAt }, phone, options);
+    const row = await orAborted(work, options.signal);
+    givenUp.delete(key);
+    return asKeptEntry(row, phone.account);
+  } catch (error) {
+    if (isTyped(error)) throw error;
+    givenUp.set(key, entry.id);
+    throw new NotSavedError({ cause: error });
+  }
+}

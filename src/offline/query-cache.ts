@@ -1,0 +1,55 @@
+/**
+ * The persisted read cache: what the server last said of clubs, the Line-up and the like. It may
+ * vanish at any moment with no loss; no entry ever depends on it.
+ */
+import { createSyncStoragePersister } from "@tanstack/query-sync-storage-persister";
+import { QueryClient } from "@tanstack/react-query";
+import type { PersistQueryClientOptions } from "@tanstack/react-query-persist-client";
+
+const DAY_MS = 24 * 60 * 60 * 1000;
+/** Raise it when a cached answer's shape changes. */
+const CACHE_VERSION = "1";
+
+declare module "@tanstack/react-query" {
+  interface Register {
+    /** `persist: true` keeps the query's data for the next start. */
+    queryMeta: { persist?: boolean };
+  }
+}
+
+export interface ReadCache {
+  client: QueryClient;
+  persistOptions: Omit<PersistQueryClientOptions, "queryClient">;
+}
+
+/** localStorage throws on touch where the browser forbids it. */
+function storage(): Storage | null {
+  try {
+    return window.localStorage;
+  } catch {
+    return null;
+  }
+}
+
+/**
+ * A cache of its own for each account, in memory too, so that the next person on this phone sees
+ * nothing of the last one's.
+ */
+export function createReadCache(accountId: string | null): ReadCache {
+  return {
+    client: new QueryClient({ defaultOptions: { queries: { gcTime: DAY_MS, retry: 1 } } }),
+    persistOptions: {
+      persister: createSyncStoragePersister({
+        storage: storage(),
+        key: `sumpless-read-${accountId ?? "nobody"}`,
+      }),
+      maxAge: DAY_MS,
+      buster: CACHE_VERSION,
+      dehydrateOptions: {
+        shouldDehydrateMutation: () => false,
+        shouldDehydrateQuery: (query) =>
+          query.meta?.persist === true && query.state.status === "success",
+      },
+    },
+  };
+}

@@ -1,0 +1,5 @@
+export function startSyncing(): () => void {
+  return () => undefined;
+}
+export async function syncNow(): Promise<void> {}
+export function requestSync(): void {}
