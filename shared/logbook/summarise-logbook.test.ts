@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import type { LogEntry } from "../schemas/entry.ts";
-import { logbook } from "./logbook-in-words.test-support.ts";
+import { logbook } from "../../tests/helpers/logbook-in-words.ts";
 import { summariseLogbook } from "./summarise-logbook.ts";
 
 const OWNER = "owner";

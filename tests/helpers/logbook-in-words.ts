@@ -1,4 +1,10 @@
-import type { BikePatch, CheckBody, EntryBody, LogEntry, WorkItem } from "../schemas/entry.ts";
+import type {
+  BikePatch,
+  CheckBody,
+  EntryBody,
+  LogEntry,
+  WorkItem,
+} from "../../shared/schemas/entry.ts";
 
 const BIKE = "0190a000-0000-7000-8000-000000000001";
 const DAY_MS = 86_400_000;

@@ -1,0 +1,213 @@
+import type { LogEntry } from "../../shared/schemas/entry.ts";
+import { logbook } from "./logbook-in-words.ts";
+
+/**
+ * Logbooks whose summaries were worked by hand from docs/measurement.md, so that a fault which phone
+ * and server share cannot hide. One run each in a 5 mL barrel with 0.2 mL marks unless said
+ * otherwise; such a check of V mL has
+ *   u² = 0.2²/6 (marks) + (0.02·V)² (repeatability) + (0.0041663·V)² (oil taken as 20 °C ± 10),
+ * which is 0.010423 for 3.0 mL, 0.009275 for 2.5 mL and 0.010177 for 2.9 mL, before everything is
+ * brought to 15 °C by the factor 0.99639.
+ */
+export interface GoldenLogbook {
+  title: string;
+  entries: LogEntry[];
+  expected: object;
+  pLow?: number;
+}
+
+const TO_15C = 0.99639;
+const thirtySteady = { seconds: 30, rhythm: "steady", nominalMl: null } as const;
+const syringe10 = { id: "ten", label: "10 mL", capacityMl: 10, graduationMl: 0.5 };
+
+const moss = () => logbook().bike({ name: "Moss" });
+
+function struckCheck() {
+  const book = moss().check(12, [3]).check(32, [1.2]);
+  return book.strike(book.lastId, "Read from the wrong end").entries;
+}
+
+export const goldenLogbooks: GoldenLogbook[] = [
+  {
+    title: "counts what is left of the interval over a meter change",
+    // Check at 100.0, old meter ends at 110.5, new one starts at 0.0 and shows 9.5: lifetime 120.
+    entries: moss().check(100, [3]).meter(110.5, 0).hours(9.5).entries,
+    expected: {
+      hours: { now: 120, displayOffset: 110.5 },
+      due: { atHours: 120, inHours: 0, overdue: false },
+    },
+  },
+  {
+    title: "is overdue an hour later",
+    entries: moss().check(100, [3]).meter(110.5, 0).hours(10.5).entries,
+    expected: { due: { atHours: 120, inHours: -1, overdue: true } },
+  },
+  {
+    title: "has no verdict between the renewed pump and its first check",
+    entries: moss().check(10, [3]).check(30, [2.5]).work(30, ["pump-renewed"], true).entries,
+    expected: {
+      verdict: "none",
+      action: null,
+      pLow: null,
+      due: { atHours: 30, inHours: 0 },
+      series: [{ startedBy: "first-check" }, { startedBy: "work", baseline: null }],
+    },
+  },
+  {
+    title: "holds a renewed pump to its own baseline",
+    // 3.0/3.1 = 0.9677; u = 0.9677·√(0.0340² + 0.0333²) = 0.0461; Φ(−2.55) = 0.005.
+    entries: moss()
+      .check(10, [3])
+      .check(30, [2.5])
+      .work(30, ["pump-renewed"], true)
+      .check(31, [3.1])
+      .check(51, [3]).entries,
+    expected: { verdict: "holding", action: "ride", due: { atHours: 71 } },
+    pLow: 0.005,
+  },
+  {
+    title: "finds a fault that a new series would hide",
+    entries: moss().check(10, [3]).work(30, ["screen-cleaned"], true).check(30, [2.5]).entries,
+    expected: {
+      verdict: "low",
+      action: "stop",
+      due: { atHours: 30, inHours: 0 },
+      checks: [{ verdict: "settling" }, { verdict: "low", series: 1 }],
+    },
+    pLow: 0.651,
+  },
+  {
+    title: "goes on finding it at later checks, and after yet another new series",
+    entries: moss()
+      .check(10, [3])
+      .work(30, ["screen-cleaned"], true)
+      .check(30, [2.5])
+      .check(50, [2.5])
+      .work(51, ["other"], true)
+      .check(51, [2.5]).entries,
+    expected: { verdict: "low", action: "stop" },
+    pLow: 0.651,
+  },
+  {
+    title: "lets a new series begin after work where the delivery held",
+    entries: moss().check(10, [3]).work(30, ["screen-cleaned"], true).check(30, [2.95]).entries,
+    expected: { verdict: "settling", action: "ride", due: { atHours: 50 } },
+  },
+  {
+    title: "pools the checks of one session",
+    // Weights 1/0.009275 and 1/0.010177: mean 2.6907, ratio 0.8969, u 0.0383, Φ(−1.223) = 0.111.
+    entries: moss().check(10, [3]).check(30, [2.5]).check(30.5, [2.9]).entries,
+    expected: {
+      verdict: "dropping",
+      action: "repeat",
+      checks: [{}, { verdict: "dropping" }, { verdict: "dropping" }],
+      due: { atHours: 30.5 },
+    },
+    pLow: 0.111,
+  },
+  {
+    title: "does not count a run of another sequence",
+    entries: logbook()
+      .bike({ name: "Moss", sequence: thirtySteady })
+      .check(10, [], {
+        runs: [
+          { startMl: 0, endMl: 3, seconds: 30 },
+          { startMl: 0, endMl: 4.9, seconds: 60 },
+        ],
+      }).entries,
+    expected: { checks: [{ runsCounted: 1, flags: ["other-sequence"] }] },
+  },
+  {
+    title: "starts a series when the sequence changes from one known to another",
+    entries: logbook()
+      .bike({ name: "Moss", sequence: thirtySteady })
+      .check(10, [3])
+      .bike({ sequence: { seconds: 30, rhythm: "alternating", nominalMl: null } })
+      .check(30, [1]).entries,
+    expected: {
+      verdict: "settling",
+      action: "ride",
+      series: [{ startedBy: "first-check" }, { startedBy: "sequence" }],
+    },
+  },
+  {
+    title: "keeps the series when a sequence becomes known or only its usual delivery changes",
+    entries: moss()
+      .check(10, [3])
+      .bike({ sequence: thirtySteady })
+      .bike({ sequence: { ...thirtySteady, nominalMl: 3.1 } })
+      .check(30, [2.95]).entries,
+    expected: { verdict: "holding", series: [{}] },
+  },
+  {
+    title: "asks for a repeat where the first check is far under the sequence's usual delivery",
+    // A 60 s steady sequence usually delivers 5.5 mL; 4.0 is 27 % under.
+    entries: logbook()
+      .bike({ name: "Moss", sequence: { seconds: 60, rhythm: "steady", nominalMl: null } })
+      .check(10, [4], { syringe: syringe10 }).entries,
+    expected: {
+      verdict: "settling",
+      action: "repeat",
+      flags: ["below-usual"],
+      due: { atHours: 10 },
+    },
+  },
+  {
+    title: "lets later patches win field by field, whatever order they arrive in",
+    entries: logbook()
+      .bike({ name: "Moss", intervalHours: 40, hasScreen: true })
+      .bike({ intervalHours: 25 })
+      .bike({ name: "Fern", intervalHours: null })
+      .check(12, [3])
+      .entries.toReversed(),
+    expected: { name: "Fern", due: { atHours: 52 } },
+  },
+  {
+    title: "leaves the due hours alone for 320 typed for 32.0",
+    entries: moss().check(12, [3]).hours(320).entries,
+    expected: {
+      hours: { now: 12, doubtful: [{ atHours: 320, why: "faster-than-clock" }] },
+      due: { atHours: 32, inHours: 20 },
+      flags: ["hours-doubtful"],
+    },
+  },
+  {
+    title: "leaves them alone for a check at 320 too, which is judged all the same",
+    entries: moss().check(12, [3]).check(320, [2.95]).entries,
+    expected: { verdict: "holding", due: { atHours: 32, inHours: 20 } },
+  },
+  {
+    title: "forgets a struck check",
+    entries: struckCheck(),
+    expected: { verdict: "settling", action: "ride", checks: [{}], due: { atHours: 32 } },
+  },
+  {
+    title: "brings warm oil to 15 °C and points the difference out",
+    // 0.98187/0.99639 = 0.9854 (API MPMS 11.1 factors at 40 and 20 °C).
+    entries: moss().check(10, [3], { oilTempC: 20 }).check(30, [3], { oilTempC: 40 }).entries,
+    expected: { verdict: "holding", flags: ["temperature-differs"] },
+  },
+  {
+    title: "takes a paper note's volume and estimated hours",
+    entries: moss().check(8, [], {
+      syringe: null,
+      runs: [{ deliveredMl: 3 }],
+      estimatedHours: true,
+    }).entries,
+    expected: { checks: [{ flags: ["syringe-unknown", "estimated-hours"] }] },
+  },
+  {
+    title: "repeats before riding where the runs read far too high",
+    // 5.0/3.0 = 1.667: a doubled run.
+    entries: moss().check(10, [3]).check(30, [5]).entries,
+    expected: { verdict: "holding", action: "repeat", flags: ["reads-high"], due: { atHours: 30 } },
+  },
+  {
+    title: "says stop where nothing is delivered, also at the very first check",
+    entries: moss().check(10, [0]).entries,
+    expected: { verdict: "low", action: "stop", pLow: 1, flags: ["no-delivery"] },
+  },
+];
+
+/** The first check of the first golden logbook, mL a run at 15 °C. */
+export const goldenPerRunMl = 3 * TO_15C;
