@@ -112,9 +112,8 @@ function flagsOf(check: Measured, sequence: Rhythm | null): FlagCode[] {
  * counted; a run given as a volume alone is a fill of its own; nothing to count → `delivery` null
  * and the flag *nothing-to-count*.
  *
- * @example
- * measureDelivery({ syringe: { …capacityMl: 2.5, graduationMl: 0.1 }, runs: [{ startMl: 0, endMl: 1 }] }, null)
- * // delivery: { perRunMl: 0.996, uMl: 0.0457, … }
+ * @example measureDelivery({ syringe: { …capacityMl: 2.5, graduationMl: 0.1 },
+ *   runs: [{ startMl: 0, endMl: 1 }] }, null) // delivery: { perRunMl: 0.996, uMl: 0.0455, … }
  */
 export function measureDelivery(
   check: Measured,
