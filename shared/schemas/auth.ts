@@ -24,10 +24,13 @@ export const signUpSchema = z.strictObject({
     .regex(/\S/, "Say what others should call you."),
 });
 
-export const signInSchema = z.strictObject({
-  email: emailSchema,
-  password: z.string("Type your password.").min(1, "Type your password.").max(1_000),
-});
+const knownPasswordSchema = z
+  .string("Type your password.")
+  .min(1, "Type your password.")
+  .max(1_000, "This is not a password of ours.");
+
+export const signInSchema = z.strictObject({ email: emailSchema, password: knownPasswordSchema });
+export const deleteAccountSchema = z.strictObject({ password: knownPasswordSchema });
 
 export const requestPasswordResetSchema = z.strictObject({ email: emailSchema });
 export const tokenSchema = z.strictObject({ token: z.string().min(1).max(200) });

@@ -1,0 +1,78 @@
+import { and, asc, count, eq, gt, sql } from "drizzle-orm";
+import type { StoredEntry } from "../../shared/schemas/entry.ts";
+import type { Database } from "./open-database.ts";
+import { entries, users } from "./schema.ts";
+
+export type EntryRow = typeof entries.$inferSelect;
+
+/** The author of an entry whose account is no more. */
+const FORMER_MEMBER = "Former member";
+
+const sentColumns = {
+  rev: entries.rev,
+  id: entries.id,
+  bikeId: entries.bikeId,
+  kind: entries.kind,
+  v: entries.v,
+  at: entries.at,
+  hours: entries.hours,
+  body: entries.body,
+  authorId: entries.authorId,
+  authorName: users.name,
+  receivedAt: entries.receivedAt,
+};
+type SentRow = Omit<EntryRow, "rev"> & { rev: number; authorName: string | null };
+
+/** An entry to the letter as its phone made it, with what the server adds. */
+const sent = ({ authorId, authorName, receivedAt, rev, ...entry }: SentRow): StoredEntry => ({
+  ...entry,
+  author: { id: authorId, name: authorName ?? FORMER_MEMBER },
+  receivedAt,
+  rev,
+});
+
+export function createEntries(db: Database) {
+  const { placeholder } = sql;
+  const byId = db
+    .select()
+    .from(entries)
+    .where(eq(entries.id, placeholder("id")))
+    .prepare();
+  const insert = db
+    .insert(entries)
+    .values({
+      id: placeholder("id"),
+      bikeId: placeholder("bikeId"),
+      kind: placeholder("kind"),
+      v: placeholder("v"),
+      at: placeholder("at"),
+      hours: placeholder("hours"),
+      body: placeholder("body"),
+      authorId: placeholder("authorId"),
+      receivedAt: placeholder("receivedAt"),
+    })
+    .prepare();
+  const ofBikeAfter = db
+    .select(sentColumns)
+    .from(entries)
+    .leftJoin(users, eq(users.id, entries.authorId))
+    .where(and(eq(entries.bikeId, placeholder("bikeId")), gt(entries.rev, placeholder("afterRev"))))
+    .orderBy(asc(entries.rev))
+    .limit(placeholder("limit"))
+    .prepare();
+  const countOfBike = db
+    .select({ rows: count() })
+    .from(entries)
+    .where(eq(entries.bikeId, placeholder("bikeId")))
+    .prepare();
+
+  return {
+    find: (id: string): EntryRow | undefined => byId.get({ id }),
+    add: (entry: Omit<EntryRow, "rev">) => insert.run(entry),
+    countOf: (bikeId: string): number => countOfBike.get({ bikeId })?.rows ?? 0,
+    /** Ascending by `rev`. */
+    ofBike: (bikeId: string, afterRev = 0, limit = -1): StoredEntry[] =>
+      ofBikeAfter.all({ bikeId, afterRev, limit }).map(sent),
+    removeOf: (bikeId: string) => db.delete(entries).where(eq(entries.bikeId, bikeId)).run(),
+  };
+}

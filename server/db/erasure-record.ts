@@ -1,0 +1,38 @@
+import { appendFileSync, existsSync, readFileSync } from "node:fs";
+import path from "node:path";
+import { z } from "zod";
+
+const erasureSchema = z.strictObject({
+  erasedAt: z.string(),
+  accountId: z.string().optional(),
+  bikeIds: z.array(z.string()),
+  entryIds: z.array(z.string()),
+});
+export type Erasure = z.infer<typeof erasureSchema>;
+
+/** Null for a line cut short by a full disk: its erasure was never confirmed to anyone. */
+function parseLine(line: string): Erasure | null {
+  try {
+    return erasureSchema.parse(JSON.parse(line));
+  } catch {
+    return null;
+  }
+}
+
+/**
+ * What was erased, one line each, in a file that backups do not hold and a restore does not touch:
+ * a backup older than an erasure must not bring back what someone asked to have erased.
+ */
+export function createErasureRecord(dataDir: string) {
+  const file = path.join(dataDir, "erased.jsonl");
+  return {
+    /** Returns once the line is on the disk; begins a line of its own, whatever was cut short before. */
+    append: (erasure: Erasure) =>
+      appendFileSync(file, `\n${JSON.stringify(erasure)}\n`, { mode: 0o600, flush: true }),
+    readAll(): Erasure[] {
+      if (!existsSync(file)) return [];
+      const lines = readFileSync(file, "utf8").split("\n").filter(Boolean);
+      return lines.map(parseLine).filter((erasure) => erasure !== null);
+    },
+  };
+}

@@ -1,0 +1,61 @@
+export interface Message {
+  subject: string;
+  text: string;
+  html: string;
+}
+
+interface Letter {
+  subject: string;
+  opening: string;
+  link: string;
+  linkText: string;
+  closing: string;
+}
+
+// Letters hold nothing that a stranger could have typed into the sign-up form, and only ASCII.
+const page = ({ subject, opening, link, linkText, closing }: Letter) => `<!doctype html>
+<html lang="en">
+<head><meta charset="utf-8"><title>${subject}</title></head>
+<body style="margin:0;padding:24px;background:#f7f4ec;color:#1c1a17;font:18px/1.5 sans-serif">
+<div style="max-width:32em;margin:0 auto">
+<p>${opening}</p>
+<p><a href="${link}"
+style="display:inline-block;padding:14px 22px;background:#1c1a17;color:#f7f4ec">${linkText}</a></p>
+<p>${closing}</p>
+<p>Sumpless</p>
+</div>
+</body>
+</html>
+`;
+
+const message = (letter: Letter): Message => ({
+  subject: letter.subject,
+  text: `${letter.opening}\n\n${letter.link}\n\n${letter.closing}\n\nSumpless\n`,
+  html: page(letter),
+});
+
+/** A page of the client that takes the token from its address. */
+const linkTo = (publicOrigin: string, page: string, token: string) =>
+  `${publicOrigin}/${page}?token=${token}`;
+
+export const verificationMessage = (publicOrigin: string, token: string): Message =>
+  message({
+    subject: "Confirm your e-mail address for Sumpless",
+    opening: "Please confirm that this address is yours, so that reminders may be sent here.",
+    link: linkTo(publicOrigin, "verify-email", token),
+    linkText: "Confirm this address",
+    closing:
+      "The link works once, for seven days.\n" +
+      "If you have no account with Sumpless, you need do nothing.",
+  });
+
+export const passwordResetMessage = (publicOrigin: string, token: string): Message =>
+  message({
+    subject: "Choose a new password for Sumpless",
+    opening: "Someone, we hope you, asked for a new password for your Sumpless account.",
+    link: linkTo(publicOrigin, "reset-password", token),
+    linkText: "Choose a new password",
+    closing:
+      "The link works once, for 30 minutes. Every phone is then asked to sign in again.\n" +
+      "If it was not you, your password stays as it is and you need do nothing.",
+  });

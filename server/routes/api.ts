@@ -1,0 +1,32 @@
+import { Router } from "express";
+import type { Sessions } from "../auth/session.ts";
+import { notFound } from "../problems.ts";
+import type { Services } from "../services/services.ts";
+import { createAuthRoutes } from "./auth-routes.ts";
+import { keepOutOfCaches, requireJson, requireOwnOrigin } from "./guard-requests.ts";
+import { createLogbookRoutes } from "./logbook-routes.ts";
+import { createOwnDataRoutes } from "./own-data-routes.ts";
+import type { RateLimits } from "./rate-limits.ts";
+
+export interface ApiParts {
+  services: Services;
+  sessions: Sessions;
+  limits: RateLimits;
+  publicOrigin: string;
+}
+
+export function createApi(parts: ApiParts): Router {
+  const router = Router();
+  router.use(keepOutOfCaches, requireOwnOrigin(parts.publicOrigin), requireJson);
+  router.get("/health", (_request, response) => {
+    parts.services.assertHealthy();
+    response.json({ status: "ok" });
+  });
+  router.use("/auth", createAuthRoutes(parts));
+  router.use(createLogbookRoutes(parts));
+  router.use(createOwnDataRoutes(parts));
+  router.use(() => {
+    throw notFound();
+  });
+  return router;
+}

@@ -1,0 +1,48 @@
+import type { Erasure } from "../db/erasure-record.ts";
+import type { Store } from "../db/store.ts";
+import { notFound } from "../problems.ts";
+import { accessTo } from "./permissions.ts";
+
+/** Takes out the rows; keeps the ids, so that no phone brings them back. */
+function eraseRows(store: Store, { bikeIds, entryIds, accountId }: Erasure): void {
+  for (const bikeId of bikeIds) {
+    store.bikeSummaries.remove(bikeId);
+    store.entries.removeOf(bikeId);
+    store.bikes.remove(bikeId);
+  }
+  if (accountId !== undefined) store.users.remove(accountId);
+  store.erasedIds.add([...bikeIds, ...entryIds]);
+}
+
+const erasureOf = (store: Store, bikeIds: string[], accountId?: string): Erasure => ({
+  erasedAt: new Date().toISOString(),
+  ...(accountId !== undefined && { accountId }),
+  bikeIds,
+  entryIds: bikeIds.flatMap((bikeId) => store.entries.ofBike(bikeId).map((entry) => entry.id)),
+});
+
+/** The record is written last before the commit: where it cannot be, nothing is erased. */
+function erase(store: Store, bikeIds: string[], accountId?: string): void {
+  const erasure = erasureOf(store, bikeIds, accountId);
+  eraseRows(store, erasure);
+  store.erasureRecord.append(erasure);
+}
+
+export function eraseBike(store: Store, accountId: string, bikeId: string): void {
+  store.write(() => {
+    if (accessTo(store, accountId, bikeId) !== "owner") throw notFound();
+    erase(store, [bikeId]);
+  });
+}
+
+/** The account with its bikes and their logs. */
+export function eraseAccount(store: Store, accountId: string): void {
+  store.write(() => erase(store, store.bikes.idsOf(accountId), accountId));
+}
+
+/** After a restore: what was erased since the backup was made is erased again. */
+export function replayErasures(store: Store): number {
+  const erasures = store.erasureRecord.readAll();
+  store.write(() => erasures.forEach((erasure) => eraseRows(store, erasure)));
+  return erasures.length;
+}

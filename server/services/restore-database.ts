@@ -1,0 +1,55 @@
+import { copyFileSync, existsSync, mkdirSync, renameSync } from "node:fs";
+import path from "node:path";
+import { assertIntegrity, backupName, backupsDir } from "../db/back-up-database.ts";
+import { migrateDatabase } from "../db/migrate-database.ts";
+import { databaseFile, openDatabase } from "../db/open-database.ts";
+import { createStore } from "../db/store.ts";
+import { replayErasures } from "./erase.ts";
+import { rebuildSummaries } from "./summarise-bike.ts";
+
+/** Gathers a database into its one file; fails while a server uses it. A damaged one stays as it is. */
+function gather(file: string): void {
+  try {
+    const { $client } = openDatabase(file);
+    // Leaving WAL needs the database to itself.
+    $client.pragma("journal_mode=DELETE");
+    $client.close();
+  } catch (error) {
+    if (String((error as { code?: unknown }).code).startsWith("SQLITE_BUSY"))
+      throw new Error("The database is in use: stop the server first.", { cause: error });
+  }
+}
+
+/** Moves the present database out of the way; null where there is none. */
+function setAsideDatabase(dataDir: string): string | null {
+  const file = databaseFile(dataDir);
+  if (!existsSync(file)) return null;
+  gather(file);
+  const aside = path.join(backupsDir(dataDir), backupName("before-restore"));
+  mkdirSync(path.dirname(aside), { recursive: true });
+  for (const part of ["", "-wal", "-shm"])
+    if (existsSync(file + part)) renameSync(file + part, aside + part);
+  return aside;
+}
+
+/**
+ * Puts a backup in the database's place and readies it to be healed by the phones: a new epoch, so
+ * that they send their entries again; and what was erased since the backup, erased again.
+ */
+export async function restoreDatabase(dataDir: string, backup: string) {
+  assertIntegrity(backup);
+  const setAside = setAsideDatabase(dataDir);
+  const file = databaseFile(dataDir);
+  mkdirSync(dataDir, { recursive: true });
+  copyFileSync(backup, `${file}.restoring`);
+  renameSync(`${file}.restoring`, file);
+
+  const database = openDatabase(file);
+  await migrateDatabase(database, backupsDir(dataDir));
+  const store = createStore(database, dataDir);
+  store.epoch.renew();
+  const erasures = replayErasures(store);
+  rebuildSummaries(store);
+  database.$client.close();
+  return { setAside, erasures };
+}
