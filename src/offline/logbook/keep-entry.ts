@@ -4,6 +4,7 @@ import { v7 as makeId } from "uuid";
 import type { Entry } from "../../../shared/schemas/entry.ts";
 import { InvalidEntryError, NotSavedError, StoreUnavailableError } from "../errors.ts";
 import type { KeptEntry, NewEntry } from "../types.ts";
+import { changeLogbook } from "./change-logbook.ts";
 import type { EntryRow, LogbookChange } from "./database.ts";
 import { asKeptEntry } from "./kept-entry.ts";
 import { checkRegistered, parseNewEntry } from "./parse-new-entry.ts";
@@ -47,32 +48,10 @@ async function writeAll(
   if (draft) await change.objectStore("drafts").delete([draft.bikeId, draft.form]);
 }
 
-/** Undoes what can still be undone; a transaction that has finished cannot be. */
-function abort(change: LogbookChange): void {
-  try {
-    change.abort();
-  } catch {
-    // Finished or aborted already.
-  }
-}
-
 async function write(row: EntryRow, phone: Phone, options: KeepOptions): Promise<EntryRow> {
-  const database = await phone.open();
-  options.signal.throwIfAborted();
-  const change = database.transaction(["entries", "bikes", "syringes", "drafts"], "readwrite", {
-    durability: "strict",
-  });
-  const giveUp = () => abort(change);
-  options.signal.addEventListener("abort", giveUp);
-  try {
-    await Promise.all([writeAll(change, row, phone, options.draft), change.done]);
-  } catch (error) {
-    giveUp();
-    throw error;
-  } finally {
-    options.signal.removeEventListener("abort", giveUp);
-  }
-  const written = await database.get("entries", row.entry.id);
+  const { draft, signal } = options;
+  await changeLogbook(phone, (change) => writeAll(change, row, phone, draft), signal);
+  const written = await (await phone.open()).get("entries", row.entry.id);
   if (!written) throw new Error("The entry was not there when read back.");
   return written;
 }

@@ -6,7 +6,7 @@ import type { EntryRow } from "./database.ts";
 /** The entry as its author's phone made it, without what the server added. */
 export function withoutReceipt(entry: EntryRow["entry"]): EntryRow["entry"] {
   const { author: _author, receivedAt: _receivedAt, rev: _rev, ...content } = entry;
-  return content as EntryRow["entry"];
+  return content;
 }
 
 /** An entry with no author yet was written on this phone. */
@@ -32,9 +32,7 @@ function stateOf(row: EntryRow): EntryState {
 export function asKeptEntry(row: EntryRow, account: Account): KeptEntry {
   const entry = readEntry(row, account);
   return {
-    ...(entry
-      ? { understood: true, entry }
-      : { understood: false, entry: row.entry as ForeignEntry }),
+    ...(entry ? { understood: true, entry } : { understood: false, entry: row.entry }),
     ...stateOf(row),
     mine: isMine(row, account),
     savedAt: row.savedAt,
