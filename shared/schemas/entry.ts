@@ -242,31 +242,60 @@ const envelope = {
 };
 const optionalHours = hoursSchema.nullable();
 
-export const entrySchema = z.discriminatedUnion("kind", [
-  z.strictObject({ ...envelope, kind: z.literal("bike"), hours: optionalHours, body: bodies.bike }),
-  z.strictObject({ ...envelope, kind: z.literal("hours"), hours: hoursSchema, body: bodies.hours }),
-  z.strictObject({ ...envelope, kind: z.literal("check"), hours: hoursSchema, body: bodies.check }),
-  z.strictObject({ ...envelope, kind: z.literal("work"), hours: hoursSchema, body: bodies.work }),
-  z.strictObject({
-    ...envelope,
-    kind: z.literal("meter"),
-    hours: optionalHours,
-    body: bodies.meter,
-  }),
-  z.strictObject({
-    ...envelope,
-    kind: z.literal("topup"),
-    hours: optionalHours,
-    body: bodies.topup,
-  }),
-  z.strictObject({ ...envelope, kind: z.literal("note"), hours: optionalHours, body: bodies.note }),
-  z.strictObject({
-    ...envelope,
-    kind: z.literal("strike"),
-    hours: z.null("A strike carries no hours."),
-    body: bodies.strike,
-  }),
-]);
+export const entrySchema = z.discriminatedUnion(
+  "kind",
+  [
+    z.strictObject({
+      ...envelope,
+      kind: z.literal("bike"),
+      hours: optionalHours,
+      body: bodies.bike,
+    }),
+    z.strictObject({
+      ...envelope,
+      kind: z.literal("hours"),
+      hours: hoursSchema,
+      body: bodies.hours,
+    }),
+    z.strictObject({
+      ...envelope,
+      kind: z.literal("check"),
+      hours: hoursSchema,
+      body: bodies.check,
+    }),
+    z.strictObject({ ...envelope, kind: z.literal("work"), hours: hoursSchema, body: bodies.work }),
+    z.strictObject({
+      ...envelope,
+      kind: z.literal("meter"),
+      hours: optionalHours,
+      body: bodies.meter,
+    }),
+    z.strictObject({
+      ...envelope,
+      kind: z.literal("topup"),
+      hours: optionalHours,
+      body: bodies.topup,
+    }),
+    z.strictObject({
+      ...envelope,
+      kind: z.literal("note"),
+      hours: optionalHours,
+      body: bodies.note,
+    }),
+    z.strictObject({
+      ...envelope,
+      kind: z.literal("strike"),
+      hours: z.null("A strike carries no hours."),
+      body: bodies.strike,
+    }),
+  ],
+  {
+    error: (issue) =>
+      issue.code === "invalid_union"
+        ? "An entry must be of a known kind."
+        : "An entry must be an object with its fields.",
+  },
+);
 
 export const entryKinds = Object.keys(bodies) as EntryKind[];
 
