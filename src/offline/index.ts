@@ -10,6 +10,7 @@ export { dropDraft, keepDraft, useDraft, useDrafts } from "./drafts.ts";
 export { exportUnsent } from "./export-unsent.ts";
 export { holdUpdates, onUpdatesReleased, updatesHeld, useHoldUpdates } from "./hold-updates.ts";
 export { useBike, useBikes, useUnsent } from "./logbook-queries.ts";
+export { CHECK_FORM, useOpenChecks, type OpenCheck } from "./open-checks.ts";
 export { createReadCache, type ReadCache } from "./query-cache.ts";
 export { previewSummary, saveEntry, type SaveOptions } from "./save-entry.ts";
 export { storageHealth, useStorageHealth } from "./storage-health.ts";

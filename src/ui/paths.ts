@@ -5,7 +5,7 @@ export const patterns = {
   shed: "/",
   newBike: "/bikes/new",
   bike: "/bikes/:bikeId/*",
-  check: "/bikes/:bikeId/check",
+  check: "/bikes/:bikeId/check/*",
   account: "/account",
   syringes: "/syringes",
   signIn: "/sign-in",
@@ -17,4 +17,8 @@ export const patterns = {
 
 export const bikePath = (bikeId: string) => `/bikes/${bikeId}`;
 export const checkPath = (bikeId: string) => `${bikePath(bikeId)}/check`;
+/** Ticks off what was left open after a check, whether that check was saved or abandoned. */
+export const closeOutPath = (bikeId: string) => `${checkPath(bikeId)}/close-out`;
+export const checkResultPath = (bikeId: string, entryId: string) =>
+  `${checkPath(bikeId)}/result/${entryId}`;
 export const logEntryPath = (bikeId: string, kind: EntryKind) => `${bikePath(bikeId)}/log/${kind}`;
