@@ -6,7 +6,7 @@ export interface Scale {
 }
 
 /** Barrels as they are commonly sold. */
-const usualScales: readonly Scale[] = [
+export const usualScales: readonly Scale[] = [
   { maxMl: 1, graduationMl: 0.05 },
   { maxMl: 2.5, graduationMl: 0.1 },
   { maxMl: 5, graduationMl: 0.2 },
