@@ -8,7 +8,13 @@ export { forgetAccount, rememberAccount, rememberedAccount, useAccount } from ".
 export { apiRequest } from "./api-client.ts";
 export { dropDraft, keepDraft, useDraft, useDrafts } from "./drafts.ts";
 export { exportUnsent } from "./export-unsent.ts";
-export { holdUpdates, onUpdatesReleased, updatesHeld, useHoldUpdates } from "./hold-updates.ts";
+export {
+  holdUpdates,
+  onUpdatesHeldChange,
+  updatesHeld,
+  useHoldUpdates,
+  whenUpdatesFree,
+} from "./hold-updates.ts";
 export { useBike, useBikes, useUnsent } from "./logbook-queries.ts";
 export { CHECK_FORM, useOpenChecks, type OpenCheck } from "./open-checks.ts";
 export { createReadCache, type ReadCache } from "./query-cache.ts";

@@ -42,6 +42,8 @@ export type KeptEntry = EntryState &
 export interface BikeRecord {
   bikeId: string;
   access: BikeAccess;
+  /** Whose strikes always count. */
+  ownerId: string;
   details: BikeDetails;
   summary: Summary;
   /** Entries of this bike not yet sent, refused ones included. */

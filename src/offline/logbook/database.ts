@@ -21,7 +21,6 @@ export interface EntryRow {
 }
 
 export interface BikeRow extends BikeRecord {
-  ownerId: string;
   /** The highest `rev` this phone was sent; 0 where the server has sent none. */
   rev: number;
   format: number;

@@ -1,6 +1,6 @@
 /** From the stored row of an entry to a line of the log, and to what the logbook's functions read. */
 import { entrySchema, type LogEntry, type Receipt } from "../../../shared/schemas/entry.ts";
-import type { Account, EntryState, ForeignEntry, KeptEntry } from "../types.ts";
+import type { Account, EntryState, KeptEntry } from "../types.ts";
 import type { EntryRow } from "./database.ts";
 
 /** The entry as its author's phone made it, without what the server added. */
