@@ -1,0 +1,74 @@
+/**
+ * `npm test`: types, lint, format, unit, reference and API tests, the build, and browser tests
+ * against what was built. All of it runs, whatever fails; the last line counts.
+ */
+import { spawnSync } from "node:child_process";
+import { mkdtempSync, readFileSync } from "node:fs";
+import { tmpdir } from "node:os";
+import path from "node:path";
+import { z } from "zod";
+import { findChromium } from "./find-chromium.ts";
+
+interface Count {
+  passed: number;
+  failed: number;
+}
+
+const reports = mkdtempSync(path.join(tmpdir(), "sumpless-test-"));
+
+/** Runs a package's own program with this Node: no npx, which leaves its child alive when killed. */
+function run(file: string, args: string[], env: NodeJS.ProcessEnv = {}): boolean {
+  console.log(`\n▸ ${path.basename(path.dirname(file))} ${args.join(" ")}`);
+  const { status } = spawnSync(process.execPath, [path.join("node_modules", file), ...args], {
+    stdio: "inherit",
+    env: { ...process.env, ...env },
+  });
+  return status === 0;
+}
+
+const check = (passed: boolean): Count => ({ passed: Number(passed), failed: Number(!passed) });
+
+/** What a runner's report counts; a run that failed without a failed test counts as one. */
+function counted(passedAll: boolean, report: string, schema: z.ZodType<Count>): Count {
+  try {
+    const count = schema.parse(JSON.parse(readFileSync(report, "utf8")));
+    return { ...count, failed: Math.max(count.failed, passedAll ? 0 : 1) };
+  } catch {
+    return { passed: 0, failed: 1 };
+  }
+}
+
+const vitestReport = z
+  .object({ numPassedTests: z.number(), numFailedTests: z.number() })
+  .transform((report) => ({ passed: report.numPassedTests, failed: report.numFailedTests }));
+
+/** Playwright counts a test that passed on a second try as flaky: here that is a failure. */
+const playwrightReport = z
+  .object({
+    stats: z.object({ expected: z.number(), unexpected: z.number(), flaky: z.number() }),
+  })
+  .transform(({ stats }) => ({ passed: stats.expected, failed: stats.unexpected + stats.flaky }));
+
+function unitTests(): Count {
+  const report = path.join(reports, "vitest.json");
+  const reporters = ["--reporter=dot", "--reporter=json", `--outputFile.json=${report}`];
+  return counted(run("vitest/vitest.mjs", ["run", ...reporters]), report, vitestReport);
+}
+
+function browserTests(): Count {
+  const report = path.join(reports, "playwright.json");
+  const env = { CHROMIUM_PATH: findChromium(), PLAYWRIGHT_JSON_OUTPUT_FILE: report };
+  return counted(run("@playwright/test/cli.js", ["test"], env), report, playwrightReport);
+}
+
+const built = () => run("tsx/dist/cli.mjs", ["scripts/build.ts"]);
+const counts = [
+  check(run("typescript/bin/tsc", ["-b"])),
+  check(run("eslint/bin/eslint.js", ["."])),
+  check(run("prettier/bin/prettier.cjs", ["--check", "--log-level", "warn", "."])),
+  unitTests(),
+  ...(built() ? [check(true), browserTests()] : [check(false)]),
+];
+const sum = (of: keyof Count) => counts.reduce((total, count) => total + count[of], 0);
+process.exitCode = sum("failed") === 0 ? 0 : 1;
+console.log(`\n${sum("passed")} passed, ${sum("failed")} failed`);
