@@ -59,6 +59,7 @@ export function summariseLogbook(logbook: {
     }),
     flags: [
       ...new Set([
+        ...(last?.checks.flatMap((check) => check.flags) ?? []),
         ...(last?.judged.flags ?? []),
         ...bikeFlags(standing, hours, series),
         ...(trend?.scatters ? ["trend-scatter"] : []),

@@ -6,7 +6,6 @@ import {
   meterKinds,
   rhythms,
   workItems,
-  type Entry,
   type LogEntry,
 } from "../../shared/schemas/entry.ts";
 
@@ -123,12 +122,12 @@ const entryOf = (kind: keyof typeof bodies) =>
       return (check.runs ?? []).every((one) => !("endMl" in one) || Number(one.endMl) <= highest);
     })
     .map(({ receivedAt, author: by, ...rest }): LogEntry => {
-      const entry = entrySchema.parse({ ...rest, kind, bikeId: BIKE, v: 1 }) as Entry;
+      const entry = entrySchema.parse({ ...rest, kind, bikeId: BIKE, v: 1 });
       return {
         ...entry,
         ...(receivedAt ? { receivedAt } : {}),
         ...(by ? { author: by } : {}),
-      } as LogEntry;
+      };
     });
 
 const kinds = Object.keys(bodies) as (keyof typeof bodies)[];
