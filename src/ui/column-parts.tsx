@@ -28,8 +28,8 @@ export function Oil({ id, frame, yOf, ml, uMl, fills }: OilProps) {
         <clipPath id={`${id}-barrel`}>
           <path d={barrelPath(frame)} />
         </clipPath>
-        <Fade id={`${id}-glass`} along="x" stops={[0.7, 0.4, 0.65]} />
-        <Fade id={`${id}-band`} along="y" stops={[0, 0.8, 0]} />
+        <Fade id={`${id}-glass`} along="x" ink="var(--honey)" stops={[1, 0.72, 0.95]} />
+        <Fade id={`${id}-band`} along="y" ink="var(--oil)" stops={[0, 0.8, 0]} />
       </defs>
       <g clipPath={`url(#${id}-barrel)`}>
         <rect
@@ -53,14 +53,22 @@ export function Oil({ id, frame, yOf, ml, uMl, fills }: OilProps) {
   );
 }
 
-function Fade({ id, along, stops }: { id: string; along: "x" | "y"; stops: number[] }) {
+interface FadeProps {
+  id: string;
+  along: "x" | "y";
+  ink: string;
+  /** Opacities, evenly spaced. */
+  stops: number[];
+}
+
+function Fade({ id, along, ink, stops }: FadeProps) {
   return (
     <linearGradient id={id} x1="0" y1="0" x2={along === "x" ? 1 : 0} y2={along === "y" ? 1 : 0}>
       {stops.map((opacity, index) => (
         <stop
           key={index}
           offset={index / (stops.length - 1)}
-          stopColor="var(--oil)"
+          stopColor={ink}
           stopOpacity={opacity}
         />
       ))}

@@ -30,7 +30,7 @@ export function Column({ scale, size, fills = false, ...reading }: Props) {
       role="img"
       aria-label={columnSentence(reading)}
       viewBox={`0 0 ${frame.width} ${frame.height}`}
-      className={size === "small" ? "h-[9.5rem] w-18 shrink-0" : "h-auto w-full max-w-[16rem]"}
+      className={size === "small" ? "h-[152px] w-[72px] shrink-0" : "h-auto w-full max-w-[16rem]"}
     >
       {readingMl !== null && (
         <Oil id={id} frame={frame} yOf={yOf} ml={readingMl} uMl={uMl ?? 0} fills={fills} />

@@ -19,12 +19,11 @@ export function Page({ title, back, action, wide = false, children }: Props) {
     window.scrollTo(0, 0);
     heading.current?.focus({ preventScroll: true });
   }, []);
+  const column = `mx-auto flex w-full flex-col px-4 ${wide ? "max-w-6xl" : "max-w-xl"}`;
   return (
-    <>
+    <main className="flex flex-1 flex-col">
       <title>{`${title} · Sumpless`}</title>
-      <main
-        className={`mx-auto flex w-full flex-1 flex-col gap-4 px-4 pt-2 pb-6 ${wide ? "max-w-6xl" : "max-w-xl"}`}
-      >
+      <div className={`${column} flex-1 gap-4 pt-2 pb-8`}>
         <div>
           {back && (
             <Link
@@ -35,21 +34,17 @@ export function Page({ title, back, action, wide = false, children }: Props) {
               {back.label}
             </Link>
           )}
-          <h1 ref={heading} tabIndex={-1} className="text-3xl">
+          <h1 ref={heading} tabIndex={-1} className="text-3xl wrap-anywhere">
             {title}
           </h1>
         </div>
         {children}
-      </main>
+      </div>
       {action && (
         <div className="sticky bottom-0 border-t border-rule bg-paper pb-[env(safe-area-inset-bottom)]">
-          <div
-            className={`mx-auto flex w-full flex-col gap-2 px-4 py-3 ${wide ? "max-w-6xl" : "max-w-xl"}`}
-          >
-            {action}
-          </div>
+          <div className={`${column} gap-2 py-3`}>{action}</div>
         </div>
       )}
-    </>
+    </main>
   );
 }

@@ -11,8 +11,8 @@ export const patterns = {
   signIn: "/sign-in",
   signUp: "/sign-up",
   forgot: "/forgot",
-  reset: "/reset",
-  verify: "/verify",
+  reset: "/reset-password",
+  verify: "/verify-email",
 } as const;
 
 export const bikePath = (bikeId: string) => `/bikes/${bikeId}`;
@@ -22,3 +22,7 @@ export const closeOutPath = (bikeId: string) => `${checkPath(bikeId)}/close-out`
 export const checkResultPath = (bikeId: string, entryId: string) =>
   `${checkPath(bikeId)}/result/${entryId}`;
 export const logEntryPath = (bikeId: string, kind: EntryKind) => `${bikePath(bikeId)}/log/${kind}`;
+/** The form of a kind, filled in from an entry that the server did not accept. */
+export const mendEntryPath = (bikeId: string, kind: EntryKind, entryId: string) =>
+  `${logEntryPath(bikeId, kind)}?mends=${entryId}`;
+export const bikeDetailsPath = (bikeId: string) => `${bikePath(bikeId)}/details`;

@@ -9,7 +9,7 @@ interface Props {
 
 /**
  * Something short that covers the screen until it is done: at the bottom of a phone, in the middle
- * of a wide screen. The browser's own dialog keeps the focus inside. Mount it to open it.
+ * of a wide screen. The browser's own dialog keeps the focus inside; it starts at the first field. Mount it to open it.
  */
 export function Sheet({ title, onClose, children }: Props) {
   const dialog = useRef<HTMLDialogElement>(null);
@@ -17,6 +17,7 @@ export function Sheet({ title, onClose, children }: Props) {
   useEffect(() => {
     const element = dialog.current;
     element?.showModal();
+    element?.querySelector<HTMLElement>("input, textarea, select")?.focus();
     return () => element?.close();
   }, []);
   return (

@@ -57,6 +57,13 @@ describe("theme", () => {
         expect(contrast(theme.paper, ground)).toBeGreaterThanOrEqual(4.5);
     });
 
+    it("keeps the marks of the Column visible on its oil and its glass", () => {
+      for (const ground of [theme.honey, theme.paper])
+        expect(contrast(theme.ink, ground)).toBeGreaterThanOrEqual(3);
+      expect(contrast(theme.oil, theme.paper)).toBeGreaterThanOrEqual(3);
+      expect(contrast(theme.low, theme.paper)).toBeGreaterThanOrEqual(3);
+    });
+
     it("tells the edges of fields and quiet buttons from what lies behind them", () => {
       const edge = mix(theme.ink, theme.paper, 0.55);
       for (const ground of [theme.paper, theme.card])

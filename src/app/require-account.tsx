@@ -1,0 +1,11 @@
+import { Navigate, Outlet, useLocation } from "react-router-dom";
+import { useAccount } from "../offline/index.ts";
+import { patterns } from "../ui/paths.ts";
+
+/** A phone that knows its account opens offline and with an expired session; one without signs in. */
+export function RequireAccount() {
+  const account = useAccount();
+  const { pathname } = useLocation();
+  if (!account) return <Navigate to={patterns.signIn} replace state={{ from: pathname }} />;
+  return <Outlet />;
+}

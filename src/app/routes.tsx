@@ -1,0 +1,41 @@
+import { lazy } from "react";
+import { Route, Routes } from "react-router-dom";
+import { ShedPage } from "../features/shed/shed-page.tsx";
+import { patterns } from "../ui/paths.ts";
+import { Layout } from "./layout.tsx";
+import { NotFoundPage } from "./not-found-page.tsx";
+import { RequireAccount } from "./require-account.tsx";
+
+// The Shed is the first paint; every other screen loads when it is first opened, or before, by
+// the service worker.
+const NewBikePage = lazy(() => import("../features/shed/new-bike-page.tsx"));
+const BikeRoutes = lazy(() => import("../features/bike/index.tsx"));
+const CheckPage = lazy(() => import("../features/check/index.tsx"));
+const AccountPage = lazy(() => import("../features/account/account-page.tsx"));
+const SignInPage = lazy(() => import("../features/account/sign-in-page.tsx"));
+const SignUpPage = lazy(() => import("../features/account/sign-up-page.tsx"));
+const ForgotPage = lazy(() => import("../features/account/forgot-page.tsx"));
+const ResetPage = lazy(() => import("../features/account/reset-page.tsx"));
+const VerifyPage = lazy(() => import("../features/account/verify-page.tsx"));
+
+export function AppRoutes() {
+  return (
+    <Routes>
+      <Route element={<Layout />}>
+        <Route element={<RequireAccount />}>
+          <Route path={patterns.shed} element={<ShedPage />} />
+          <Route path={patterns.newBike} element={<NewBikePage />} />
+          <Route path={patterns.check} element={<CheckPage />} />
+          <Route path={patterns.bike} element={<BikeRoutes />} />
+          <Route path={patterns.account} element={<AccountPage />} />
+        </Route>
+        <Route path={patterns.signIn} element={<SignInPage />} />
+        <Route path={patterns.signUp} element={<SignUpPage />} />
+        <Route path={patterns.forgot} element={<ForgotPage />} />
+        <Route path={patterns.reset} element={<ResetPage />} />
+        <Route path={patterns.verify} element={<VerifyPage />} />
+        <Route path="*" element={<NotFoundPage />} />
+      </Route>
+    </Routes>
+  );
+}

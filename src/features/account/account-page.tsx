@@ -1,0 +1,46 @@
+import { useState } from "react";
+import { useAccount } from "../../offline/index.ts";
+import { ButtonLink } from "../../ui/button-link.tsx";
+import { Choice } from "../../ui/choice.tsx";
+import { Page } from "../../ui/page.tsx";
+import { patterns } from "../../ui/paths.ts";
+import { chooseTheme, chosenTheme } from "../../ui/theme-choice.ts";
+import { OnThisPhone } from "./on-this-phone.tsx";
+import { SignOut } from "./sign-out.tsx";
+
+export default function AccountPage() {
+  const account = useAccount();
+  if (!account) return null;
+  return (
+    <Page title={account.name} back={{ to: patterns.shed, label: "Shed" }}>
+      <p className="-mt-3 text-soft">{account.email}</p>
+      <ThemeChoice />
+      <section className="flex flex-col gap-2">
+        <h2 className="text-xl">Syringes</h2>
+        <p>What you measure with; a check names one, so that its marks are known.</p>
+        <ButtonLink to={patterns.syringes}>My syringes</ButtonLink>
+      </section>
+      <OnThisPhone />
+      <SignOut />
+    </Page>
+  );
+}
+
+function ThemeChoice() {
+  const [theme, setTheme] = useState(chosenTheme);
+  return (
+    <Choice
+      label="Light or dark"
+      options={[
+        { value: "system", label: "As the phone" },
+        { value: "light", label: "Light" },
+        { value: "dark", label: "Dark" },
+      ]}
+      value={theme}
+      onChange={(choice) => {
+        chooseTheme(choice);
+        setTheme(choice);
+      }}
+    />
+  );
+}

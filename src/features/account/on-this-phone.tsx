@@ -1,0 +1,70 @@
+import {
+  exportUnsent,
+  useBikes,
+  useStorageHealth,
+  useUnsent,
+  type KeptEntry,
+  type StorageHealth,
+} from "../../offline/index.ts";
+import { Button } from "../../ui/button.tsx";
+import { EntryStateMark } from "../../ui/entry-state-mark.tsx";
+import { formatWhen } from "../../ui/format-when.ts";
+import { kindWords, refusalWords } from "../../ui/words.ts";
+import { saveFile } from "./save-file.ts";
+
+const healthWords: Record<StorageHealth, string> = {
+  unasked:
+    "The browser has not been asked yet to keep what is stored here; the app asks when you first save.",
+  persisted: "The browser has promised to keep what is stored here.",
+  refused:
+    "The browser may clear what is stored here when it runs short of room, or after some days without a visit. Put the app on the home screen, and send when you have a network.",
+  unavailable: "This browser keeps nothing once the window is closed. A private window may be why.",
+};
+
+/** What is on this phone and nowhere else, and how safe it is here. */
+export function OnThisPhone() {
+  const unsent = useUnsent().data ?? [];
+  const health = useStorageHealth();
+  const save = async () => {
+    const day = new Date().toISOString().slice(0, 10);
+    saveFile(await exportUnsent(), `sumpless-not-sent-${day}.json`);
+  };
+  return (
+    <section className="flex flex-col gap-2">
+      <h2 className="text-xl">On this phone</h2>
+      <p>{healthWords[health]}</p>
+      {unsent.length === 0 ? (
+        <p>Every entry has been sent.</p>
+      ) : (
+        <>
+          <ul className="divide-y divide-rule border-y border-rule">
+            {unsent.map((kept) => (
+              <UnsentLine key={kept.entry.id} kept={kept} />
+            ))}
+          </ul>
+          <Button onClick={() => void save()}>Save these as a file</Button>
+        </>
+      )}
+    </section>
+  );
+}
+
+function UnsentLine({ kept }: { kept: KeptEntry }) {
+  const bike = useBikes().data?.find(({ bikeId }) => bikeId === kept.entry.bikeId);
+  const kind = kept.understood ? kindWords[kept.entry.kind] : "From a newer version of the app";
+  return (
+    <li className="py-2">
+      <p className="font-bold">
+        {bike ? `${bike.details.name}: ` : ""}
+        {kind}
+      </p>
+      <p className="flex flex-wrap gap-x-3 text-soft">
+        {formatWhen(kept.entry.at)}
+        <EntryStateMark state={kept.state} />
+      </p>
+      {kept.state === "refused" && (
+        <p>{Object.values(kept.errors ?? {})[0] ?? refusalWords[kept.reason]}</p>
+      )}
+    </li>
+  );
+}
