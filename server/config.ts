@@ -5,10 +5,7 @@ import { projectRoot } from "./project-root.ts";
 
 const originSchema = z
   .url({ protocol: /^https?$/, error: "must be a web address such as https://logbook.example" })
-  .refine((text) => ["", "/"].includes(text.slice(new URL(text).origin.length)), {
-    error: "must be an origin alone: no path, no query",
-    abort: true,
-  })
+  .regex(/^[^/]+\/\/[^/?#]+\/?$/, "must be an origin alone: no path, no query")
   .transform((text) => new URL(text).origin);
 
 /** An empty variable counts as one that is not set. */

@@ -1,6 +1,7 @@
-import { pino, type Logger } from "pino";
+import { pino, type DestinationStream, type Logger } from "pino";
 
 export type { Logger };
 
-/** Lines of JSON to stdout. Nothing logs a header, a body, a query or an address of a person. */
-export const createLog = (level: string): Logger => pino({ level, base: null });
+/** Lines of JSON. Nothing logs a header, a body, a query or an address of a person. */
+export const createLog = (level: string, to?: DestinationStream): Logger =>
+  pino({ level, base: null }, to ?? pino.destination(1));

@@ -15,11 +15,19 @@ export function assertIntegrity(file: string): void {
   }
 }
 
+/** Out of WAL mode a database is one file, and stays one however it is looked at. */
+function intoOneFile(file: string): void {
+  const copy = new SQLite(file, { fileMustExist: true });
+  copy.pragma("journal_mode=DELETE");
+  copy.close();
+}
+
 /** Copies a database that may be in use. The copy bears its name only once it is found sound. */
 export async function backUpDatabase(client: SQLite.Database, file: string): Promise<void> {
   mkdirSync(path.dirname(file), { recursive: true });
   const unchecked = `${file}.unchecked`;
   await client.backup(unchecked);
+  intoOneFile(unchecked);
   assertIntegrity(unchecked);
   renameSync(unchecked, file);
 }

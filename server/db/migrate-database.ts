@@ -1,37 +1,37 @@
 import type SQLite from "better-sqlite3";
-import { migrate } from "drizzle-orm/better-sqlite3/migrator";
-import { readMigrationFiles } from "drizzle-orm/migrator";
+import { sql } from "drizzle-orm";
+import { readMigrationFiles, type MigrationMeta } from "drizzle-orm/migrator";
 import path from "node:path";
 import { projectRoot } from "../project-root.ts";
 import { backUpDatabase, backupName } from "./back-up-database.ts";
 import type { Database } from "./open-database.ts";
 
-const MIGRATIONS_TABLE = "__drizzle_migrations";
 export const migrationsFolder = path.join(projectRoot, "drizzle");
 
-const quoted = (table: string) => `"${table.replaceAll('"', '""')}"`;
+/** Where Drizzle keeps what was applied, in its own shape, so that its tools agree with us. */
+const applied = sql.identifier("__drizzle_migrations");
+const createApplied = sql`CREATE TABLE IF NOT EXISTS ${applied} (
+  id SERIAL PRIMARY KEY, hash text NOT NULL, created_at numeric)`;
+
+function pendingMigrations(database: Database, migrationsFolder: string): MigrationMeta[] {
+  database.run(createApplied);
+  const query = sql`SELECT coalesce(max(created_at), 0) AS until FROM ${applied}`;
+  const { until } = database.get<{ until: number }>(query);
+  return readMigrationFiles({ migrationsFolder }).filter(
+    ({ folderMillis }) => folderMillis > until,
+  );
+}
 
 function countRows(client: SQLite.Database): Map<string, number> {
   const tables = client
     .prepare<[], string>(
-      "SELECT name FROM sqlite_schema WHERE type='table' AND name NOT LIKE 'sqlite_%'",
+      "SELECT name FROM sqlite_schema WHERE type='table' AND name NOT GLOB 'sqlite_*' AND name NOT GLOB '__*'",
     )
     .pluck()
-    .all()
-    .filter((table) => table !== MIGRATIONS_TABLE);
+    .all();
   const count = (table: string) =>
-    client
-      .prepare<[], number>(`SELECT count(*) FROM ${quoted(table)}`)
-      .pluck()
-      .get() ?? 0;
+    client.prepare<[], number>(`SELECT count(*) FROM "${table}"`).pluck().get() ?? 0;
   return new Map(tables.map((table) => [table, count(table)]));
-}
-
-function appliedUntil(client: SQLite.Database): number {
-  const known = client.prepare("SELECT 1 FROM sqlite_schema WHERE name=?").get(MIGRATIONS_TABLE);
-  if (!known) return 0;
-  const last = client.prepare(`SELECT max(created_at) FROM ${MIGRATIONS_TABLE}`).pluck().get();
-  return Number(last ?? 0);
 }
 
 /** Tables may come and go in a migration; one that stays never holds fewer rows afterwards. */
@@ -45,6 +45,20 @@ function assertNothingLost(before: Map<string, number>, client: SQLite.Database)
   if (orphans.length > 0) throw new Error(`A migration left ${orphans.length} rows of no parent.`);
 }
 
+/** All of the migrations, nothing lost by them, or none of them: Drizzle's own `migrate` commits unseen. */
+function apply(database: Database, migrations: MigrationMeta[], before: Map<string, number>): void {
+  const work = () => {
+    for (const { sql: statements, hash, folderMillis } of migrations) {
+      for (const statement of statements) database.run(sql.raw(statement));
+      database.run(
+        sql`INSERT INTO ${applied} (hash, created_at) VALUES (${hash}, ${folderMillis})`,
+      );
+    }
+    assertNothingLost(before, database.$client);
+  };
+  database.transaction(work, { behavior: "immediate" });
+}
+
 /**
  * Brings the database up to date. Foreign keys are off meanwhile: with them on, the rebuild of a
  * table cascades to its child rows, and the switch inside the generated SQL does nothing in its
@@ -56,17 +70,15 @@ export async function migrateDatabase(
   folder = migrationsFolder,
 ): Promise<void> {
   const client = database.$client;
-  const applied = appliedUntil(client);
-  if (readMigrationFiles({ migrationsFolder: folder }).every((m) => m.folderMillis <= applied))
-    return;
+  const pending = pendingMigrations(database, folder);
+  if (pending.length === 0) return;
 
   const before = countRows(client);
   if ([...before.values()].some((rows) => rows > 0))
     await backUpDatabase(client, path.join(backupsDir, backupName("before-migration")));
   client.pragma("foreign_keys=OFF");
   try {
-    migrate(database, { migrationsFolder: folder });
-    assertNothingLost(before, client);
+    apply(database, pending, before);
   } finally {
     client.pragma("foreign_keys=ON");
   }

@@ -13,26 +13,25 @@ const asksForPage = (request: Request) =>
  * everything else is asked about anew, so that a new version is found. Every page is `index.html`.
  */
 export function serveClient(clientDir: string): Router {
+  const assets = express.static(path.join(clientDir, "assets"), {
+    index: false,
+    immutable: true,
+    maxAge: "1y",
+  });
+  const files = express.static(clientDir, {
+    index: false,
+    redirect: false,
+    cacheControl: false,
+    setHeaders: (response) => response.set("Cache-Control", "no-cache"),
+  });
+
   const router = Router();
-  router.use(
-    "/assets",
-    express.static(path.join(clientDir, "assets"), { index: false, immutable: true, maxAge: "1y" }),
-  );
-  const revalidated = { cacheControl: false, headers: { "Cache-Control": "no-cache" } };
-  router.use(
-    express.static(clientDir, {
-      index: false,
-      redirect: false,
-      cacheControl: false,
-      setHeaders: (response) => response.set(revalidated.headers),
-    }),
-  );
+  router.use("/assets", assets);
+  router.use(files);
   router.use((request, response, next) => {
     if (!asksForPage(request)) return next();
-    // Without a built client there are no pages: the same 404 as for anything else.
-    response.sendFile("index.html", { root: clientDir, ...revalidated }, (error) => {
-      if (error) next();
-    });
+    request.url = "/index.html";
+    files(request, response, next);
   });
   return router;
 }

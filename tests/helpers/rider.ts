@@ -1,16 +1,20 @@
 import { randomUUID } from "node:crypto";
-import supertest from "supertest";
+import supertest, { type Response } from "supertest";
 import { expect } from "vitest";
 import { userResponseSchema } from "../../shared/schemas/auth.ts";
 import { summarySchema } from "../../shared/schemas/summary.ts";
 import { syncResponseSchema, type SyncRequest } from "../../shared/schemas/sync.ts";
-import type { TestServer } from "./start-test-server.ts";
 
 export const PASSWORD = "two strokes and a pump";
 
+/** Where a server listens, and the origin it takes for its own. */
+export interface Served {
+  url: string;
+  origin: string;
+}
+
 /** A phone's browser: it keeps cookies, and says which page it calls from. */
-export const createPhone = ({ url, origin }: Pick<TestServer, "url" | "origin">) =>
-  supertest.agent(url).set("Origin", origin);
+export const createPhone = ({ url, origin }: Served) => supertest.agent(url).set("Origin", origin);
 
 export type Phone = ReturnType<typeof createPhone>;
 
@@ -27,28 +31,33 @@ async function readSummary(phone: Phone, bikeId: string) {
   return summarySchema.parse(response.body);
 }
 
-const asRider = (phone: Phone, body: unknown) => ({
+/** The first cookie that an answer sets, as it is sent back. */
+export const cookieOf = (response: Response) =>
+  response.get("Set-Cookie")?.[0]?.split(";")[0] ?? "";
+
+const asRider = (phone: Phone, signedIn: Response) => ({
   phone,
-  user: userResponseSchema.parse(body).user,
+  user: userResponseSchema.parse(signedIn.body).user,
+  cookie: cookieOf(signedIn),
   sync: (entries: unknown[], rest?: Partial<SyncRequest>) => sync(phone, entries, rest),
   summary: (bikeId: string) => readSummary(phone, bikeId),
 });
 
 /** A new account, signed in on a phone of its own. */
-export async function signUpRider(server: TestServer, name = "Ann") {
+export async function signUpRider(server: Served, name = "Ann") {
   const phone = createPhone(server);
-  const email = `${name.toLowerCase()}-${randomUUID()}@club.example`;
+  const email = `rider-${randomUUID()}@club.example`;
   const response = await phone.post("/api/auth/sign-up").send({ email, password: PASSWORD, name });
   expect(response.status).toBe(201);
-  return asRider(phone, response.body);
+  return asRider(phone, response);
 }
 
 /** Another phone of the same rider. */
-export async function signInRider(server: TestServer, email: string, password = PASSWORD) {
+export async function signInRider(server: Served, email: string, password = PASSWORD) {
   const phone = createPhone(server);
   const response = await phone.post("/api/auth/sign-in").send({ email, password });
   expect(response.status).toBe(200);
-  return asRider(phone, response.body);
+  return asRider(phone, response);
 }
 
 export type Rider = Awaited<ReturnType<typeof signUpRider>>;

@@ -18,9 +18,9 @@ export function temporaryDir(): string {
   return dir;
 }
 
-/** Cheap passwords, no log lines; otherwise the config of an empty environment. */
+/** Cheap passwords; otherwise the config of an empty environment. */
 const testConfig = (overrides: Partial<Config>): Config => ({
-  ...readConfig({ DATA_DIR: overrides.dataDir ?? temporaryDir(), LOG_LEVEL: "silent" }),
+  ...readConfig({ DATA_DIR: overrides.dataDir ?? temporaryDir() }),
   hashCost: { memoryCost: 64, timeCost: 1, parallelism: 1 },
   ...overrides,
 });
@@ -33,12 +33,12 @@ const readMails = (dataDir: string) => {
 };
 
 /** The real server over a real database, on a port of its own, until the test is finished. */
-export async function startTestServer(overrides: Partial<Config> = {}) {
+export async function startTestServer(overrides: Partial<Config> = {}, log = createLog("silent")) {
   const config = testConfig(overrides);
   const { dataDir, publicOrigin: origin } = config;
   const database = openDatabase(databaseFile(dataDir));
   await migrateDatabase(database, backupsDir(dataDir));
-  const { app, store, mailer } = createApp(config, database, createLog(config.logLevel));
+  const { app, store, mailer } = createApp(config, database, log);
   const server = app.listen(0, "127.0.0.1");
   await once(server, "listening");
   const url = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;

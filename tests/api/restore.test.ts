@@ -1,0 +1,144 @@
+import { existsSync, writeFileSync } from "node:fs";
+import path from "node:path";
+import { describe, expect, it } from "vitest";
+import { assertIntegrity, backUpDatabase, backupsDir } from "../../server/db/back-up-database.ts";
+import { databaseFile } from "../../server/db/open-database.ts";
+import { restoreDatabase } from "../../server/services/restore-database.ts";
+import { rebuildSummaries } from "../../server/services/summarise-bike.ts";
+import { bikeEntry, hoursEntry, newId, noteEntry, smallLog } from "../helpers/make-entry.ts";
+import { PASSWORD, signInRider, signUpRider } from "../helpers/rider.ts";
+import { startTestServer, temporaryDir, type TestServer } from "../helpers/start-test-server.ts";
+
+async function backUp({ database, dataDir }: TestServer): Promise<string> {
+  const file = path.join(backupsDir(dataDir), "kept.sqlite");
+  await backUpDatabase(database.$client, file);
+  return file;
+}
+
+/** Stops the server, restores the backup, and starts another over the same folder. */
+async function restoreAndStart(server: TestServer, backup: string): Promise<TestServer> {
+  await server.stop();
+  await restoreDatabase(server.dataDir, backup);
+  return startTestServer({ dataDir: server.dataDir });
+}
+
+describe("a restored server", () => {
+  it("is healed by the phones: another epoch, and everything sent again is taken", async () => {
+    const server = await startTestServer();
+    const rider = await signUpRider(server);
+    const bikeId = newId();
+    const log = smallLog(bikeId);
+    await rider.sync(log.slice(0, 3));
+    const backup = await backUp(server);
+    const { epoch, bikes } = await rider.sync(log.slice(3));
+    const known = { [bikeId]: bikes[0]!.rev };
+    const summary = await rider.summary(bikeId);
+
+    const restored = await signInRider(await restoreAndStart(server, backup), rider.user.email);
+    const first = await restored.sync([], { known, epoch });
+    expect(first.epoch).not.toBe(epoch);
+    expect(first.bikes[0]!.entries.map(({ id }) => id)).toEqual(
+      log.slice(0, 3).map(({ id }) => id),
+    );
+    const { results } = await restored.sync(log, { epoch: first.epoch });
+    expect(results.map(({ status }) => status)).toEqual([
+      "duplicate",
+      "duplicate",
+      "duplicate",
+      "stored",
+      "stored",
+    ]);
+    expect(await restored.summary(bikeId)).toEqual(summary);
+  });
+
+  it("does not bring back what was erased since the backup", async () => {
+    const server = await startTestServer();
+    const [rider, leaver] = [await signUpRider(server), await signUpRider(server, "Bob")];
+    const [bikeId, kept] = [newId(), newId()];
+    const log = smallLog(bikeId);
+    await rider.sync([...log, bikeEntry(kept)]);
+    await leaver.sync(smallLog(newId()));
+    const backup = await backUp(server);
+    const late = noteEntry(bikeId);
+    await rider.sync([late]);
+    await rider.phone.delete(`/api/bikes/${bikeId}`).expect(204);
+    await leaver.phone.delete("/api/account").send({ password: PASSWORD }).expect(204);
+
+    const restoredServer = await restoreAndStart(server, backup);
+    const restored = await signInRider(restoredServer, rider.user.email);
+    expect((await restored.sync([])).bikes.map((bike) => bike.bikeId)).toEqual([kept]);
+    const { results } = await restored.sync([...log, late]);
+    expect(new Set(results.map(({ reason }) => reason))).toEqual(new Set(["erased"]));
+    expect(restoredServer.store.users.findByEmail(leaver.user.email)).toBeUndefined();
+  });
+
+  it("heeds every erasure that was confirmed, also after one that was cut short", async () => {
+    const server = await startTestServer();
+    const rider = await signUpRider(server);
+    const bikeId = newId();
+    await rider.sync(smallLog(bikeId));
+    const backup = await backUp(server);
+    writeFileSync(path.join(server.dataDir, "erased.jsonl"), '{"erasedAt":"2026-0', { flag: "a" });
+    await rider.phone.delete(`/api/bikes/${bikeId}`).expect(204);
+    const restored = await signInRider(await restoreAndStart(server, backup), rider.user.email);
+    expect((await restored.sync([])).bikes).toEqual([]);
+  });
+});
+
+describe("restoring", () => {
+  it("keeps the database that was there", async () => {
+    const server = await startTestServer();
+    const rider = await signUpRider(server);
+    const backup = await backUp(server);
+    await rider.sync(smallLog(newId()));
+    await server.stop();
+    const { setAside } = await restoreDatabase(server.dataDir, backup);
+    assertIntegrity(setAside!);
+    const undone = await restoreAndStart(server, setAside!);
+    const again = await signInRider(undone, rider.user.email);
+    expect((await again.sync([])).bikes[0]!.entries).toHaveLength(5);
+  });
+
+  it("is refused while the server runs", async () => {
+    const server = await startTestServer();
+    const backup = await backUp(server);
+    const restoring = restoreDatabase(server.dataDir, backup);
+    await expect(restoring).rejects.toThrow("stop the server first");
+    await signUpRider(server);
+  }, 15_000);
+
+  it("is refused from a damaged backup, and possible over a damaged database", async () => {
+    const server = await startTestServer();
+    const rider = await signUpRider(server);
+    const backup = await backUp(server);
+    const damaged = path.join(temporaryDir(), "damaged.sqlite");
+    writeFileSync(damaged, "not a database, but long enough to be looked at as one");
+    await server.stop();
+    await expect(restoreDatabase(server.dataDir, damaged)).rejects.toThrow();
+    expect(existsSync(databaseFile(server.dataDir))).toBe(true);
+    writeFileSync(databaseFile(server.dataDir), "no database any more, whatever it was before");
+    await signInRider(await restoreAndStart(server, backup), rider.user.email);
+  });
+});
+
+it("making all summaries anew finds what the entries say", async () => {
+  const server = await startTestServer();
+  const rider = await signUpRider(server);
+  const bikeId = newId();
+  await rider.sync([...smallLog(bikeId), hoursEntry(bikeId, 34, "2026-04-12T09:00:00.000Z")]);
+  const summary = await rider.summary(bikeId);
+  server.database.$client.exec(`UPDATE bike_summaries SET summary = '{}', verdict = 'none'`);
+  expect(rebuildSummaries(server.store)).toBe(1);
+  expect(await rider.summary(bikeId)).toEqual(summary);
+  const columns = server.database.$client
+    .prepare("SELECT name, verdict, action, p_low, hours_now, due_in_hours FROM bike_summaries")
+    .get();
+  expect(columns).toEqual({
+    name: "Moss",
+    verdict: "low",
+    action: "stop",
+    p_low: summary.pLow,
+    hours_now: 34,
+    due_in_hours: -2,
+  });
+});
