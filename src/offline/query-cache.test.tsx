@@ -1,0 +1,70 @@
+import { useQuery } from "@tanstack/react-query";
+import { PersistQueryClientProvider } from "@tanstack/react-query-persist-client";
+import { cleanup, render, screen, waitFor } from "@testing-library/react";
+import { afterEach, describe, expect, it, vi } from "vitest";
+import { createReadCache } from "./query-cache.ts";
+
+interface Question {
+  name: string;
+  persist: boolean;
+  /** What the server would say; never, with no network. */
+  answer?: string;
+}
+
+function Answer({ name, persist, answer }: Question) {
+  const { data } = useQuery({
+    queryKey: [name],
+    queryFn: () => answer ?? new Promise<string>(() => undefined),
+    networkMode: "always",
+    meta: { persist },
+  });
+  return <p>{`${name}: ${data ?? "nothing"}`}</p>;
+}
+
+/** Opens the app as `accountId`, asking the questions. */
+function open(accountId: string, ...questions: Question[]) {
+  const cache = createReadCache(accountId);
+  return render(
+    <PersistQueryClientProvider {...cache}>
+      {questions.map((question) => (
+        <Answer key={question.name} {...question} />
+      ))}
+    </PersistQueryClientProvider>,
+  );
+}
+
+async function openAndClose(accountId: string, ...questions: Question[]): Promise<void> {
+  open(accountId, ...questions);
+  const key = `sumpless-read-${accountId}`;
+  await waitFor(() => expect(localStorage.getItem(key)).toContain("queries"), { timeout: 3_000 });
+  cleanup();
+}
+
+const clubs = { name: "clubs", persist: true };
+const logbook = { name: "logbook", persist: false };
+
+describe("the read cache", () => {
+  afterEach(cleanup);
+
+  it("keeps the queries that ask for it, and no others", async () => {
+    await openAndClose("a", { ...logbook, answer: "bikes" }, { ...clubs, answer: "two" });
+    open("a", clubs, logbook);
+    expect(await screen.findByText("clubs: two")).toBeVisible();
+    expect(screen.getByText("logbook: nothing")).toBeVisible();
+  });
+
+  it("shows nothing of one account to another", async () => {
+    await openAndClose("b", { ...clubs, answer: "three" });
+    open("c", clubs);
+    expect(await screen.findByText("clubs: nothing")).toBeVisible();
+  });
+
+  it("may be damaged, with no loss but its own", async () => {
+    const reports = [vi.mocked(console.error), vi.mocked(console.warn)];
+    for (const report of reports) report.mockImplementation(() => undefined);
+    localStorage.setItem("sumpless-read-d", "{");
+    open("d", { ...clubs, answer: "four" });
+    expect(await screen.findByText("clubs: four")).toBeVisible();
+    for (const report of reports) report.mockClear();
+  });
+});
