@@ -4,7 +4,27 @@ import { defineConfig } from "vite";
 import { VitePWA } from "vite-plugin-pwa";
 
 export default defineConfig({
-  build: { outDir: "dist/client", target: "es2022", sourcemap: false },
+  build: {
+    outDir: "dist/client",
+    target: "es2022",
+    sourcemap: false,
+    // Browsers without modulepreload load the same files, only later.
+    modulePreload: { polyfill: false },
+    rolldownOptions: {
+      output: {
+        // What the first load needs of libraries in one file: it packs better than in slices, and
+        // stays the same from one version of the app to the next.
+        codeSplitting: {
+          groups: [
+            {
+              name: "libraries",
+              test: /node_modules\/(react|react-dom|react-router|react-router-dom|scheduler|@tanstack|idb)\//,
+            },
+          ],
+        },
+      },
+    },
+  },
   server: { proxy: { "/api": "http://localhost:3000" } },
   plugins: [
     react(),

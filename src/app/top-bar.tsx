@@ -1,5 +1,5 @@
-import { CircleUserRound, RefreshCw } from "lucide-react";
 import { Link } from "react-router-dom";
+import { AccountIcon, ExchangeIcon } from "../ui/icons.tsx";
 import { syncNow, useAccount, useSyncStatus } from "../offline/index.ts";
 import { patterns } from "../ui/paths.ts";
 import { statusWords } from "./status-words.ts";
@@ -21,7 +21,7 @@ export function TopBar() {
         {account && <SyncButton />}
         {account && (
           <Link to={patterns.account} aria-label="Account" className={iconClass}>
-            <CircleUserRound aria-hidden />
+            <AccountIcon />
           </Link>
         )}
       </div>
@@ -56,7 +56,7 @@ function SyncButton() {
       onClick={() => void syncNow()}
       className={`${iconClass} disabled:text-soft`}
     >
-      <RefreshCw aria-hidden />
+      <ExchangeIcon />
     </button>
   );
 }

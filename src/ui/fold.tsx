@@ -1,5 +1,5 @@
-import { ChevronDown } from "lucide-react";
 import type { ReactNode } from "react";
+import { DownIcon } from "./icons.tsx";
 
 /** What is seldom needed, one tap away. */
 export function Fold({ title, children }: { title: ReactNode; children: ReactNode }) {
@@ -7,7 +7,7 @@ export function Fold({ title, children }: { title: ReactNode; children: ReactNod
     <details className="group">
       <summary className="flex min-h-target items-center gap-1 font-bold text-oil">
         {title}
-        <ChevronDown aria-hidden className="shrink-0 group-open:rotate-180" />
+        <DownIcon className="shrink-0 group-open:rotate-180" />
       </summary>
       <div className="pt-1">{children}</div>
     </details>

@@ -1,10 +1,10 @@
-import { CircleX, Info, TriangleAlert } from "lucide-react";
 import type { ReactNode } from "react";
+import { ErrorIcon, InfoIcon, CautionIcon } from "./icons.tsx";
 
 const tones = {
-  info: { Icon: Info, look: "border-edge", ink: "text-soft" },
-  caution: { Icon: TriangleAlert, look: "border-dropping", ink: "text-dropping" },
-  error: { Icon: CircleX, look: "border-low", ink: "text-low" },
+  info: { Icon: InfoIcon, look: "border-edge", ink: "text-soft" },
+  caution: { Icon: CautionIcon, look: "border-dropping", ink: "text-dropping" },
+  error: { Icon: ErrorIcon, look: "border-low", ink: "text-low" },
 };
 
 interface Props {
@@ -21,7 +21,7 @@ export function Notice({ tone, title, children }: Props) {
       role={tone === "error" ? "alert" : undefined}
       className={`flex gap-3 rounded-card border-2 bg-card p-3 ${look}`}
     >
-      <Icon aria-hidden className={`mt-0.5 shrink-0 ${ink}`} />
+      <Icon className={`mt-0.5 shrink-0 ${ink}`} />
       <div className="flex min-w-0 flex-1 flex-col gap-2">
         {title && <p className={`text-lg leading-snug font-bold ${ink}`}>{title}</p>}
         {children}

@@ -1,5 +1,5 @@
-import { Minus, Plus } from "lucide-react";
 import type { ReactNode } from "react";
+import { MinusIcon, PlusIcon } from "./icons.tsx";
 import { numberClass, Field, type FieldWiring, type FieldWords } from "./field.tsx";
 import { stepDecimal, type StepLimits } from "./step-decimal.ts";
 
@@ -31,7 +31,7 @@ function StepperInput(props: NumberInput & { label: string; wiring: FieldWiring 
   return (
     <div className="flex items-stretch gap-2">
       <StepButton name={`${label}: less`} onClick={() => press(-step)}>
-        <Minus aria-hidden />
+        <MinusIcon />
       </StepButton>
       <div className="relative min-w-0 flex-1">
         <input
@@ -52,7 +52,7 @@ function StepperInput(props: NumberInput & { label: string; wiring: FieldWiring 
         )}
       </div>
       <StepButton name={`${label}: more`} onClick={() => press(step)}>
-        <Plus aria-hidden />
+        <PlusIcon />
       </StepButton>
     </div>
   );

@@ -1,6 +1,6 @@
-import { ChevronLeft } from "lucide-react";
 import { useEffect, useRef, type ReactNode } from "react";
 import { Link } from "react-router-dom";
+import { BackIcon } from "./icons.tsx";
 
 interface Props {
   title: string;
@@ -30,7 +30,7 @@ export function Page({ title, back, action, wide = false, children }: Props) {
               to={back.to}
               className="-ml-1 inline-flex min-h-target items-center gap-1 font-bold text-oil"
             >
-              <ChevronLeft aria-hidden className="shrink-0" />
+              <BackIcon className="shrink-0" />
               {back.label}
             </Link>
           )}

@@ -1,5 +1,5 @@
-import { X } from "lucide-react";
 import { useEffect, useId, useRef, type ReactNode } from "react";
+import { CloseIcon } from "./icons.tsx";
 
 interface Props {
   title: string;
@@ -40,7 +40,7 @@ export function Sheet({ title, onClose, children }: Props) {
           onClick={onClose}
           className="-mt-1 -mr-2 flex min-h-target min-w-target shrink-0 items-center justify-center rounded-card"
         >
-          <X aria-hidden />
+          <CloseIcon />
         </button>
       </div>
       {children}

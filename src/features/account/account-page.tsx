@@ -13,9 +13,9 @@ export default function AccountPage() {
   if (!account) return null;
   return (
     <Page title={account.name} back={{ to: patterns.shed, label: "Shed" }}>
-      <p className="-mt-3 text-soft">{account.email}</p>
+      <p className="-mt-3 mb-2 text-soft">{account.email}</p>
       <ThemeChoice />
-      <section className="flex flex-col gap-2">
+      <section className="flex flex-col gap-2 border-t border-rule pt-4">
         <h2 className="text-xl">Syringes</h2>
         <p>What you measure with; a check names one, so that its marks are known.</p>
         <ButtonLink to={patterns.syringes}>My syringes</ButtonLink>
@@ -32,7 +32,7 @@ function ThemeChoice() {
     <Choice
       label="Light or dark"
       options={[
-        { value: "system", label: "As the phone" },
+        { value: "system", label: "Automatic" },
         { value: "light", label: "Light" },
         { value: "dark", label: "Dark" },
       ]}

@@ -8,6 +8,7 @@ import {
 } from "../../offline/index.ts";
 import { Button } from "../../ui/button.tsx";
 import { EntryStateMark } from "../../ui/entry-state-mark.tsx";
+import { Fold } from "../../ui/fold.tsx";
 import { formatWhen } from "../../ui/format-when.ts";
 import { kindWords, refusalWords } from "../../ui/words.ts";
 import { saveFile } from "./save-file.ts";
@@ -30,18 +31,20 @@ export function OnThisPhone() {
     saveFile(await exportUnsent(), `sumpless-not-sent-${day}.json`);
   };
   return (
-    <section className="flex flex-col gap-2">
+    <section className="flex flex-col gap-2 border-t border-rule pt-4">
       <h2 className="text-xl">On this phone</h2>
       <p>{healthWords[health]}</p>
       {unsent.length === 0 ? (
         <p>Every entry has been sent.</p>
       ) : (
         <>
-          <ul className="divide-y divide-rule border-y border-rule">
-            {unsent.map((kept) => (
-              <UnsentLine key={kept.entry.id} kept={kept} />
-            ))}
-          </ul>
+          <Fold title={`Not sent yet: ${unsent.length}`}>
+            <ul className="divide-y divide-rule border-y border-rule">
+              {unsent.map((kept) => (
+                <UnsentLine key={kept.entry.id} kept={kept} />
+              ))}
+            </ul>
+          </Fold>
           <Button onClick={() => void save()}>Save these as a file</Button>
         </>
       )}

@@ -28,7 +28,7 @@ export function SignOut() {
   const problemNotice = problem && <Notice tone="error" title={problem} />;
   const words = unsent === 1 ? "1 entry is not sent yet" : `${unsent} entries are not sent yet`;
   return (
-    <section className="flex flex-col gap-2">
+    <section className="flex flex-col gap-2 border-t border-rule pt-4">
       <Button disabled={busy} onClick={() => (unsent > 0 ? setAsking(true) : void submit())}>
         Sign out
       </Button>

@@ -1,6 +1,6 @@
-import { ChevronRight } from "lucide-react";
 import { lazy, Suspense, useState } from "react";
 import { Link } from "react-router-dom";
+import { OnwardIcon } from "../../ui/icons.tsx";
 import { ActionLine } from "../../ui/action-line.tsx";
 import { ButtonLink } from "../../ui/button-link.tsx";
 import { Button } from "../../ui/button.tsx";
@@ -30,17 +30,14 @@ export function BikeCard({ bike }: { bike: ShedBike }) {
           className="-my-2 flex min-h-target items-center justify-between gap-1 wrap-anywhere"
         >
           {details.name}
-          <ChevronRight aria-hidden className="shrink-0 text-oil" />
+          <OnwardIcon className="shrink-0 text-oil" />
         </Link>
       </h2>
       {hoseMaybeOff && (
         <Notice tone="error" title="Hose may be off: do not start">
-          <Link
-            to={closeOutPath(bikeId)}
-            className="inline-flex min-h-target items-center font-bold text-oil underline"
-          >
-            Close out the last check
-          </Link>
+          <ButtonLink look="danger" to={closeOutPath(bikeId)}>
+            Close out the check
+          </ButtonLink>
         </Notice>
       )}
       <div className="flex justify-between gap-3">

@@ -1,5 +1,5 @@
-import { Plus } from "lucide-react";
 import { Link } from "react-router-dom";
+import { PlusIcon } from "../../ui/icons.tsx";
 import { useBikes, useOpenChecks } from "../../offline/index.ts";
 import { ButtonLink } from "../../ui/button-link.tsx";
 import { Fold } from "../../ui/fold.tsx";
@@ -30,7 +30,7 @@ export function ShedPage() {
       </ul>
       {own && (
         <ButtonLink to={patterns.newBike} className="sm:self-start">
-          <Plus aria-hidden />
+          <PlusIcon />
           Add a bike
         </ButtonLink>
       )}
