@@ -27,8 +27,15 @@ export function createSessions(db: Database, publicOrigin: string) {
     },
   });
   const cookieFor = (token: string) => lucia.createSessionCookie(token).serialize();
-  const readToken = (cookieHeader: string | undefined) =>
-    lucia.readSessionCookie(cookieHeader ?? "");
+
+  /** Null also for a cookie that cannot be decoded: it is none of ours. */
+  function readToken(cookieHeader: string | undefined): string | null {
+    try {
+      return lucia.readSessionCookie(cookieHeader ?? "");
+    } catch {
+      return null;
+    }
+  }
 
   return {
     /** Answers the cookie to send. */

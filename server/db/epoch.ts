@@ -16,5 +16,6 @@ export function createEpoch(db: Database) {
       .run();
     return value;
   };
-  return { current: (): string => read.get()?.value ?? renew(), renew };
+  if (!read.get()) renew();
+  return { current: () => read.get()!.value, renew };
 }

@@ -48,6 +48,7 @@ describe("the session cookie", () => {
 
   it("that nobody was given signs nobody in", async () => {
     const phone = createPhone(await startTestServer());
-    await phone.get("/api/auth/me").set("Cookie", "session=made-up").expect(401);
+    for (const cookie of ["session=made-up", "session=", "session=%E0%A4%A"])
+      await phone.get("/api/auth/me").set("Cookie", cookie).expect(401);
   });
 });
