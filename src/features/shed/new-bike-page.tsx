@@ -3,17 +3,18 @@ import { useNavigate } from "react-router-dom";
 import { v7 as uuidv7 } from "uuid";
 import { saveEntry, useHoldUpdates } from "../../offline/index.ts";
 import { Button } from "../../ui/button.tsx";
-import { Choice } from "../../ui/choice.tsx";
 import { Fold } from "../../ui/fold.tsx";
 import { Form } from "../../ui/form.tsx";
 import { HoursField } from "../../ui/hours-field.tsx";
-import { NumberField } from "../../ui/number-field.tsx";
+import { IntervalFields } from "../../ui/interval-fields.tsx";
+import { MakeFields } from "../../ui/make-fields.tsx";
+import { MeterFields } from "../../ui/meter-fields.tsx";
 import { Page } from "../../ui/page.tsx";
 import { patterns } from "../../ui/paths.ts";
+import { SequenceFields } from "../../ui/sequence-fields.tsx";
 import { TextField } from "../../ui/text-field.tsx";
 import { useSubmit } from "../../ui/use-submit.ts";
-import { emptyForm, newBikeEntry, usualIntervalHours, type NewBikeForm } from "./new-bike-entry.ts";
-import { SequenceFields } from "./sequence-fields.tsx";
+import { emptyForm, newBikeEntry, type NewBikeForm } from "./new-bike-entry.ts";
 
 /** A name is enough; whatever else is known makes the first check easier. */
 export default function NewBikePage() {
@@ -25,11 +26,6 @@ export default function NewBikePage() {
   const { submit, busy, errors, problem } = useSubmit(async () => {
     await saveEntry(newBikeEntry(form, bikeId, new Date().toISOString()));
     await navigate(patterns.shed, { replace: true });
-  });
-  const text = (field: "name" | "make" | "model" | "year") => ({
-    value: form[field],
-    onChange: (event: { target: { value: string } }) => set({ [field]: event.target.value }),
-    error: errors[`body.${field}`],
   });
 
   return (
@@ -43,80 +39,34 @@ export default function NewBikePage() {
       }
     >
       <Form id="new-bike" onSubmit={submit} problem={problem}>
-        <TextField label="Name" hint="What you call it." autoComplete="off" {...text("name")} />
+        <TextField
+          label="Name"
+          hint="What you call it."
+          autoComplete="off"
+          value={form.name}
+          onChange={(event) => set({ name: event.target.value })}
+          error={errors["body.name"]}
+        />
         <Fold title="Make, model and year">
           <div className="flex flex-col gap-5">
-            <TextField label="Make" autoComplete="off" {...text("make")} />
-            <TextField label="Model" autoComplete="off" {...text("model")} />
-            <TextField label="Year" inputMode="numeric" autoComplete="off" {...text("year")} />
+            <MakeFields form={form} set={set} errors={errors} />
           </div>
         </Fold>
-        <MeterFields form={form} set={set} errors={errors} />
-        <Choice
-          label="Screen ahead of the oil pump"
-          options={[
-            { value: "yes", label: "Yes" },
-            { value: "no", label: "No" },
-            { value: "unknown", label: "Not known" },
-          ]}
-          value={form.screen}
-          onChange={(screen) => set({ screen })}
+        <MeterFields
+          form={form}
+          set={(change) => set(change.meterFormat ? { ...change, hours: "" } : change)}
         />
-        <NumberField
-          label="Hours between checks"
-          hint="Usual: 40 with a screen, 20 without."
-          error={errors["body.intervalHours"]}
-          value={form.interval || String(usualIntervalHours(form.screen))}
-          onChange={(interval) => set({ interval })}
-          step={5}
-          min={1}
-          unit="h"
+        <HoursField
+          label="Hours now"
+          hint="May be left empty."
+          error={errors.hours}
+          value={form.hours}
+          onChange={(hours) => set({ hours })}
+          meterFormat={form.meterFormat}
         />
+        <IntervalFields form={form} set={set} errors={errors} />
         <SequenceFields form={form} set={set} errors={errors} />
       </Form>
     </Page>
-  );
-}
-
-export interface Part {
-  form: NewBikeForm;
-  set: (change: Partial<NewBikeForm>) => void;
-  errors: Record<string, string>;
-}
-
-function MeterFields({ form, set, errors }: Part) {
-  return (
-    <>
-      <Choice
-        label="Hour meter"
-        stacked
-        options={[
-          { value: "engine", label: "Engine hours", hint: "It counts while the engine runs." },
-          { value: "ignition", label: "Ignition hours", hint: "It counts while the key is on." },
-          { value: "estimated", label: "No meter", hint: "You estimate the hours you ride." },
-        ]}
-        value={form.meter}
-        onChange={(meter) => set({ meter })}
-      />
-      {form.meter !== "estimated" && (
-        <Choice
-          label="The meter shows"
-          options={[
-            { value: "decimal", label: "12.5" },
-            { value: "hh:mm", label: "12:30" },
-          ]}
-          value={form.meterFormat}
-          onChange={(meterFormat) => set({ meterFormat, hours: "" })}
-        />
-      )}
-      <HoursField
-        label="Hours now"
-        hint="May be left empty."
-        error={errors.hours}
-        value={form.hours}
-        onChange={(hours) => set({ hours })}
-        meterFormat={form.meterFormat}
-      />
-    </>
   );
 }

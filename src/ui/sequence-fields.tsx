@@ -1,11 +1,11 @@
-import { usualSequences } from "../../../shared/delivery/usual-sequences.ts";
-import { Choice } from "../../ui/choice.tsx";
-import { NumberField } from "../../ui/number-field.tsx";
-import { sequenceWords } from "../../ui/sequence-words.ts";
-import type { Part } from "./new-bike-page.tsx";
+import { usualSequences } from "../../shared/delivery/usual-sequences.ts";
+import type { BikeFormPart } from "./bike-form.ts";
+import { Choice } from "./choice.tsx";
+import { NumberField } from "./number-field.tsx";
+import { sequenceWords } from "./sequence-words.ts";
 
 /** What the bike does when its oil pump is primed; not knowing it is no obstacle. */
-export function SequenceFields({ form, set, errors }: Part) {
+export function SequenceFields({ form, set, errors }: BikeFormPart) {
   return (
     <>
       <Choice
