@@ -49,14 +49,14 @@ describe("the read cache", () => {
   it("keeps the queries that ask for it, and no others", async () => {
     await openAndClose("a", { ...logbook, answer: "bikes" }, { ...clubs, answer: "two" });
     open("a", clubs, logbook);
-    expect(await screen.findByText("clubs: two")).toBeVisible();
-    expect(screen.getByText("logbook: nothing")).toBeVisible();
+    await screen.findByText("clubs: two");
+    screen.getByText("logbook: nothing");
   });
 
   it("shows nothing of one account to another", async () => {
     await openAndClose("b", { ...clubs, answer: "three" });
     open("c", clubs);
-    expect(await screen.findByText("clubs: nothing")).toBeVisible();
+    await screen.findByText("clubs: nothing");
   });
 
   it("may be damaged, with no loss but its own", async () => {
@@ -64,7 +64,7 @@ describe("the read cache", () => {
     for (const report of reports) report.mockImplementation(() => undefined);
     localStorage.setItem("sumpless-read-d", "{");
     open("d", { ...clubs, answer: "four" });
-    expect(await screen.findByText("clubs: four")).toBeVisible();
+    await screen.findByText("clubs: four");
     for (const report of reports) report.mockClear();
   });
 });

@@ -1,3 +1,4 @@
+import "fake-indexeddb/auto";
 import { connectTo } from "../../src/offline/logbook/connection.ts";
 import type { Phone } from "../../src/offline/logbook/phone.ts";
 import type { Account } from "../../src/offline/types.ts";

@@ -1,0 +1,64 @@
+import { syncResponseSchema } from "../../shared/schemas/sync.ts";
+import type { User } from "../../shared/schemas/auth.ts";
+import { apiRequest } from "../../src/offline/api-client.ts";
+import { keepEntry } from "../../src/offline/logbook/keep-entry.ts";
+import { readBike, readUnsent } from "../../src/offline/logbook/read-bike.ts";
+import { runSyncSession } from "../../src/offline/sync/sync-session.ts";
+import type { NewEntry } from "../../src/offline/types.ts";
+import type { Served } from "./rider.ts";
+import { testPhone } from "./test-phone.ts";
+
+/** What lies between a phone and the server: it may lose, delay, double or change what passes. */
+export type Network = typeof fetch;
+
+export interface Wire {
+  /** Asked at each call: after a restore, the server listens elsewhere. */
+  server: () => Served;
+  cookie: () => string;
+  network?: Network;
+  device?: string;
+}
+
+/** A browser's `fetch`, from a page of the server's own origin, with its session cookie. */
+const browserFetch =
+  ({ server, cookie, network = fetch }: Wire): typeof fetch =>
+  (path, init) =>
+    network(new URL(path as string, server().url), {
+      ...init,
+      headers: {
+        ...(init?.headers as Record<string, string>),
+        origin: server().origin,
+        cookie: cookie(),
+      },
+    });
+
+/** The phone's own store and sync over a real connection to a real server. */
+export function wiredPhone({ id, name, email }: User, wire: Wire) {
+  const phone = testPhone({ id, name, email }, wire.device);
+
+  async function sync(network = wire.network): Promise<void> {
+    await runSyncSession({
+      phone,
+      send: (body) =>
+        apiRequest("/api/sync", {
+          method: "POST",
+          body,
+          schema: syncResponseSchema,
+          fetch: browserFetch({ ...wire, ...(network && { network }) }),
+        }),
+      isCurrent: () => true,
+      onApplied: () => undefined,
+    });
+  }
+
+  return {
+    ...phone,
+    sync,
+    keep: (entry: NewEntry) => keepEntry(phone, entry, { signal: new AbortController().signal }),
+    bike: (bikeId: string) => readBike(phone, bikeId),
+    bikes: async () => (await phone.open()).getAll("bikes"),
+    unsent: () => readUnsent(phone),
+  };
+}
+
+export type WiredPhone = ReturnType<typeof wiredPhone>;
