@@ -37,5 +37,5 @@ export function createApp(config: Config, database: Database, log: Logger) {
     throw notFound();
   });
   app.use(handleProblem);
-  return { app, services, store, sessions, mailer };
+  return { app, services, store, mailer };
 }

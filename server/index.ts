@@ -11,7 +11,10 @@ try {
   for (const signal of ["SIGTERM", "SIGINT"] as const) {
     process.once(signal, () => {
       log.info({ signal }, "stopping");
-      void server.stop().then(() => log.info("stopped"));
+      void server.stop().then(() => {
+        log.info("stopped");
+        process.exit();
+      });
     });
   }
 } catch (error) {

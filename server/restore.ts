@@ -3,11 +3,14 @@ import { readConfig } from "./config.ts";
 import { restoreDatabase } from "./services/restore-database.ts";
 
 const [file] = process.argv.slice(2);
-if (file === undefined) {
-  console.error("Say which backup to restore: npm run restore -- data/backups/<name>.sqlite");
-  process.exit(2);
+try {
+  if (file === undefined)
+    throw new Error("Say which backup to restore: npm run restore -- data/backups/<name>.sqlite");
+  const { setAside, erasures } = await restoreDatabase(readConfig(process.env).dataDir, file);
+  if (setAside) console.log(`The database that was there is now ${setAside}`);
+  if (erasures > 0) console.log(`Erased again what was erased since: ${erasures}`);
+  console.log("Restored. The phones will send what is missing.");
+} catch (error) {
+  console.error(error instanceof Error ? error.message : error);
+  process.exitCode = 1;
 }
-const { dataDir } = readConfig(process.env);
-const { setAside, erasures } = await restoreDatabase(dataDir, file);
-if (setAside) console.log(`The database that was there is now ${setAside}.`);
-console.log(`Restored. ${erasures} erasures were carried out again. Phones send what is missing.`);

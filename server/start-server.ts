@@ -1,6 +1,7 @@
 import { secondsToMilliseconds } from "date-fns";
 import { once } from "node:events";
 import type { AddressInfo } from "node:net";
+import { setTimeout } from "node:timers/promises";
 import { createApp } from "./app.ts";
 import type { Config } from "./config.ts";
 import { backupsDir } from "./db/back-up-database.ts";
@@ -8,27 +9,25 @@ import { migrateDatabase } from "./db/migrate-database.ts";
 import { databaseFile, openDatabase } from "./db/open-database.ts";
 import type { Logger } from "./log.ts";
 
-/** How long requests under way may take to finish when the server is asked to stop. */
+/** How long requests and mails under way may take to finish once the server is asked to stop. */
 const PATIENCE_MS = secondsToMilliseconds(10);
 
 /** Opens the database, brings it up to date, and listens. */
 export async function startServer(config: Config, log: Logger) {
   const database = openDatabase(databaseFile(config.dataDir));
   await migrateDatabase(database, backupsDir(config.dataDir));
-  const { app, services, sessions, mailer } = createApp(config, database, log);
-  await sessions.removeExpired();
+  const { app, services, mailer } = createApp(config, database, log);
   const server = app.listen(config.port);
   await once(server, "listening");
 
   /** Takes no more requests, finishes those under way, and leaves one whole database file. */
   async function stop(): Promise<void> {
+    const outOfPatience = setTimeout(PATIENCE_MS, undefined, { ref: false });
+    void outOfPatience.then(() => server.closeAllConnections());
     const closed = once(server, "close");
     server.close();
-    server.closeIdleConnections();
-    const impatience = setTimeout(() => server.closeAllConnections(), PATIENCE_MS);
     await closed;
-    clearTimeout(impatience);
-    await mailer.settled();
+    await Promise.race([mailer.settled(), outOfPatience]);
     database.$client.pragma("wal_checkpoint(TRUNCATE)");
     database.$client.close();
   }

@@ -40,6 +40,7 @@ export function createSessions(db: Database, publicOrigin: string) {
   return {
     /** Answers the cookie to send. */
     async begin(userId: string): Promise<string> {
+      await lucia.deleteExpiredSessions();
       const token = generateIdFromEntropySize(25);
       await lucia.createSession(userId, {}, { sessionId: hashToken(token) });
       return cookieFor(token);
@@ -58,7 +59,6 @@ export function createSessions(db: Database, publicOrigin: string) {
       return lucia.createBlankSessionCookie().serialize();
     },
     endAllOf: (userId: string) => lucia.invalidateUserSessions(userId),
-    removeExpired: () => lucia.deleteExpiredSessions(),
   };
 }
 

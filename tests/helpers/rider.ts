@@ -4,6 +4,7 @@ import { expect } from "vitest";
 import { userResponseSchema } from "../../shared/schemas/auth.ts";
 import { summarySchema } from "../../shared/schemas/summary.ts";
 import { syncResponseSchema, type SyncRequest } from "../../shared/schemas/sync.ts";
+import { bikeEntry, newId } from "./make-entry.ts";
 
 export const PASSWORD = "two strokes and a pump";
 
@@ -50,6 +51,14 @@ export async function signUpRider(server: Served, name = "Ann") {
   const response = await phone.post("/api/auth/sign-up").send({ email, password: PASSWORD, name });
   expect(response.status).toBe(201);
   return asRider(phone, response);
+}
+
+/** A new account with one registered bike. */
+export async function riderWithBike(server: Served) {
+  const rider = await signUpRider(server);
+  const bikeId = newId();
+  await rider.sync([bikeEntry(bikeId)]);
+  return { rider, bikeId };
 }
 
 /** Another phone of the same rider. */
