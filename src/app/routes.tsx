@@ -11,6 +11,7 @@ import { RequireAccount } from "./require-account.tsx";
 const NewBikePage = lazy(() => import("../features/shed/new-bike-page.tsx"));
 const BikeRoutes = lazy(() => import("../features/bike/index.tsx"));
 const CheckPage = lazy(() => import("../features/check/index.tsx"));
+const SyringesPage = lazy(() => import("../features/syringes/index.tsx"));
 const AccountPage = lazy(() => import("../features/account/account-page.tsx"));
 const SignInPage = lazy(() => import("../features/account/sign-in-page.tsx"));
 const SignUpPage = lazy(() => import("../features/account/sign-up-page.tsx"));
@@ -27,6 +28,7 @@ export function AppRoutes() {
           <Route path={patterns.newBike} element={<NewBikePage />} />
           <Route path={patterns.check} element={<CheckPage />} />
           <Route path={patterns.bike} element={<BikeRoutes />} />
+          <Route path={patterns.syringes} element={<SyringesPage />} />
           <Route path={patterns.account} element={<AccountPage />} />
         </Route>
         <Route path={patterns.signIn} element={<SignInPage />} />

@@ -7,11 +7,15 @@ const inks: Record<Action, string> = {
   stop: "text-low",
 };
 
+interface Props {
+  action: Action;
+  large?: boolean;
+  /** Where it is the one thing the screen is about: read from arm's length. */
+  huge?: boolean;
+}
+
 /** What to do, the first thing a rider reads of a verdict. */
-export function ActionLine({ action, large = false }: { action: Action; large?: boolean }) {
-  return (
-    <p className={`leading-tight font-bold ${large ? "text-4xl" : "text-2xl"} ${inks[action]}`}>
-      {actionWords[action]}
-    </p>
-  );
+export function ActionLine({ action, large = false, huge = false }: Props) {
+  const size = huge ? "text-[min(15vw,3.75rem)]" : large ? "text-4xl" : "text-2xl";
+  return <p className={`leading-tight font-bold ${size} ${inks[action]}`}>{actionWords[action]}</p>;
 }

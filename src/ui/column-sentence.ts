@@ -25,5 +25,5 @@ export function columnSentence({ readingMl, uMl, baselineMl, limitMl }: ColumnRe
 
 function sideOf(readingMl: number | null, limitMl: number): string {
   if (readingMl === null) return "limit";
-  return readingMl < limitMl ? "under the limit of" : "above the limit of";
+  return readingMl < limitMl ? "under the limit of" : "at or above the limit of";
 }

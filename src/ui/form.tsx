@@ -8,6 +8,13 @@ interface Props {
   children: ReactNode;
 }
 
+/** Goes to the first field that is wrong, out of a fold if need be. */
+function goToFirstError(form: HTMLFormElement): void {
+  const field = form.querySelector<HTMLElement>("[aria-invalid]");
+  field?.closest("details")?.setAttribute("open", "");
+  field?.focus();
+}
+
 /** Fields one under the other, and what went wrong beside none of them. */
 export function Form({ id, onSubmit, problem, children }: Props) {
   return (
@@ -17,7 +24,8 @@ export function Form({ id, onSubmit, problem, children }: Props) {
       className="flex flex-col gap-5"
       onSubmit={(event) => {
         event.preventDefault();
-        void onSubmit();
+        const form = event.currentTarget;
+        void onSubmit().then(() => goToFirstError(form));
       }}
     >
       {children}

@@ -1,4 +1,5 @@
 import { useState } from "react";
+import { flushSync } from "react-dom";
 
 interface Outcome {
   busy: boolean;
@@ -42,7 +43,8 @@ export function useSubmit(work: () => Promise<void>) {
       () => calm,
       (error: unknown) => outcomeOf(error as TypedError),
     );
-    setOutcome(next);
+    // At once, so that whoever waits for the end finds the sentences on the screen.
+    flushSync(() => setOutcome(next));
   };
   return { ...outcome, submit };
 }

@@ -1,2 +1,6 @@
 import "@testing-library/jest-dom/vitest";
+import { cleanup } from "@testing-library/react";
 import "fake-indexeddb/auto";
+import { afterEach } from "vitest";
+
+afterEach(cleanup);

@@ -22,11 +22,11 @@ export default function SignUpPage() {
   });
   return (
     <Page
-      title="Make an account"
+      title="Create an account"
       back={{ to: patterns.signIn, label: "Sign in" }}
       action={
         <Button type="submit" form="sign-up" look="primary" wide disabled={busy}>
-          Make the account
+          Create the account
         </Button>
       }
     >
