@@ -34,11 +34,13 @@ export const tooLarge = () =>
   problem(413, "too-large", "This is more than fits into one request: at most 2 MB.");
 export const unsupportedType = () =>
   problem(415, "unsupported-type", "Only JSON (application/json, UTF-8) is understood here.");
-export const wrongFields = (errors: Record<string, string>) =>
-  problem(422, "wrong-fields", "Some of what was sent cannot be used.", { errors });
+export const wrongFields = (
+  errors: Record<string, string>,
+  detail = "Some of what was sent cannot be used.",
+) => problem(422, "wrong-fields", detail, { errors });
 export const wrongShape = (error: z.ZodError) => wrongFields(errorsByField(error));
-export const deadLink = () =>
-  wrongFields({ token: "This link was used already or has run out. Ask for a new one." });
+const DEAD_LINK = "This link was used already or has run out. Ask for a new one.";
+export const deadLink = () => wrongFields({ token: DEAD_LINK }, DEAD_LINK);
 export const tooMany = () =>
   problem(429, "too-many", "That was tried too often. Please wait a little.");
 export const failure = () =>
