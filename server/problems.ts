@@ -44,7 +44,7 @@ export const deadLink = () => wrongFields({ token: DEAD_LINK }, DEAD_LINK);
 export const tooMany = () =>
   problem(429, "too-many", "That was tried too often. Please wait a little.");
 export const failure = () =>
-  problem(500, "failure", "Something went wrong on the server. Nothing was stored.");
+  problem(500, "failure", "Something went wrong on the server. Please try again later.");
 export const unavailable = (retryAfterSeconds: number) =>
   problem(503, "unavailable", "The server cannot store anything just now. Nothing was stored.", {
     retryAfterSeconds,
