@@ -5,7 +5,7 @@ import { BackIcon } from "./icons.tsx";
 interface Props {
   title: string;
   back?: { to: string; label: string };
-  /** The screen's main action: full width at the bottom on a phone, always in reach. */
+  /** The main action: on a phone full width at the bottom, always in reach; otherwise at the end. */
   action?: ReactNode;
   /** Room for two columns from 900 px up; otherwise one column of reading width. */
   wide?: boolean;
@@ -23,7 +23,7 @@ export function Page({ title, back, action, wide = false, children }: Props) {
   return (
     <main className="flex flex-1 flex-col">
       <title>{`${title} · Sumpless`}</title>
-      <div className={`${column} flex-1 gap-4 pt-2 pb-8`}>
+      <div className={`${column} flex-1 gap-4 pb-8 sm:flex-none ${back ? "pt-2" : "pt-5"}`}>
         <div>
           {back && (
             <Link
@@ -41,7 +41,7 @@ export function Page({ title, back, action, wide = false, children }: Props) {
         {children}
       </div>
       {action && (
-        <div className="sticky bottom-0 border-t border-rule bg-paper pb-[env(safe-area-inset-bottom)]">
+        <div className="sticky bottom-0 border-t border-rule bg-paper pb-[env(safe-area-inset-bottom)] sm:static sm:border-0">
           <div className={`${column} gap-2 py-3`}>{action}</div>
         </div>
       )}

@@ -3,6 +3,8 @@ import { Link } from "react-router-dom";
 import { useAccount } from "../../offline/index.ts";
 import { Button } from "../../ui/button.tsx";
 import { ButtonLink } from "../../ui/button-link.tsx";
+import { Column } from "../../ui/column.tsx";
+import { usualScale } from "../../ui/column-scale.ts";
 import { Form } from "../../ui/form.tsx";
 import { Page } from "../../ui/page.tsx";
 import { patterns } from "../../ui/paths.ts";
@@ -34,10 +36,22 @@ export default function SignInPage() {
         </>
       }
     >
-      <p className="text-lg">
-        A two-stroke has no sump to fall back on. Sumpless is the logbook that tells you the oil
-        pump is still keeping up.
-      </p>
+      <div className="flex items-center justify-between gap-4">
+        <p className="text-xl text-balance">
+          A two-stroke has no sump to fall back on. Sumpless is the logbook that tells you the oil
+          pump is still keeping up.
+        </p>
+        <div aria-hidden>
+          <Column
+            size="small"
+            scale={usualScale(3)}
+            readingMl={2.9}
+            uMl={0.05}
+            baselineMl={3}
+            limitMl={2.55}
+          />
+        </div>
+      </div>
       <Form id="sign-in" onSubmit={submit} problem={problem}>
         <EmailField value={email} onChange={setEmail} error={errors.email} />
         <PasswordField

@@ -32,7 +32,9 @@ export function EmptyShed() {
             </li>
           ))}
         </ol>
-        <Column size="small" scale={usualScale(3)} readingMl={3} uMl={0.04} baselineMl={3} />
+        <div aria-hidden>
+          <Column size="small" scale={usualScale(3)} readingMl={3} uMl={0.04} baselineMl={3} />
+        </div>
       </div>
     </Page>
   );
