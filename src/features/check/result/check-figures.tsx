@@ -1,0 +1,62 @@
+import type { ReactNode } from "react";
+import { measureDelivery } from "../../../../shared/delivery/measure-delivery.ts";
+import type { CheckBody, Sequence } from "../../../../shared/schemas/entry.ts";
+import type { CheckSummary, Summary } from "../../../../shared/schemas/summary.ts";
+import {
+  formatMl,
+  formatMlGiveOrTake,
+  formatPercent,
+  GIVE_OR_TAKE,
+} from "../../../ui/format-quantity.ts";
+import { heldBaseline } from "./held-baseline.ts";
+import { largestUncertainty } from "./largest-uncertainty.ts";
+
+interface Props {
+  summary: Summary;
+  check: CheckSummary;
+  body: CheckBody;
+  sequence: Sequence | null;
+}
+
+/** The numbers behind the verdict, each with how far it may be off. */
+export function CheckFigures({ summary, check, body, sequence }: Props) {
+  const { perRunMl, uMl, ratio, uRatio, runsCounted } = check;
+  const baseline = ratio === null ? null : heldBaseline(summary, check);
+  const { delivery } = measureDelivery(body, sequence);
+  const sessionMl = ratio !== null && baseline ? ratio * baseline.perRunMl : perRunMl;
+  return (
+    <dl className="grid grid-cols-[auto_1fr] items-baseline gap-x-4 gap-y-2 text-lg">
+      <Figure name="Delivery">
+        <strong className="text-2xl">{formatMlGiveOrTake(perRunMl, uMl)}</strong> a run
+      </Figure>
+      {ratio !== null && uRatio !== null && (
+        <Figure name="Of baseline">
+          <strong className="text-2xl">
+            {formatPercent(ratio)} ± {formatPercent(GIVE_OR_TAKE * uRatio)}
+          </strong>
+        </Figure>
+      )}
+      {Math.abs(sessionMl - perRunMl) > 0.005 && (
+        <Figure name="Together">
+          {formatMl(sessionMl)}: judged with the other checks of this hour
+        </Figure>
+      )}
+      <Figure name="Runs">{runsCounted === 1 ? "1 counted" : `${runsCounted} counted`}</Figure>
+      {delivery && (
+        <Figure name="Most of the ±">
+          comes from{" "}
+          {largestUncertainty(delivery.components, body.syringe, body.oilTempC !== undefined)}
+        </Figure>
+      )}
+    </dl>
+  );
+}
+
+function Figure({ name, children }: { name: string; children: ReactNode }) {
+  return (
+    <>
+      <dt className="text-soft">{name}</dt>
+      <dd className="tabular-nums">{children}</dd>
+    </>
+  );
+}

@@ -1,0 +1,53 @@
+import type { CheckBody } from "../../../../shared/schemas/entry.ts";
+import type { CheckSummary, Summary } from "../../../../shared/schemas/summary.ts";
+import type { BikeRecord } from "../../../offline/index.ts";
+import { ActionLine } from "../../../ui/action-line.tsx";
+import { certaintySentence } from "../../../ui/certainty-sentence.ts";
+import { Column } from "../../../ui/column.tsx";
+import { VerdictMark } from "../../../ui/verdict-mark.tsx";
+import { CheckFigures } from "./check-figures.tsx";
+import { CheckFlags } from "./check-flags.tsx";
+import { columnOfCheck } from "./column-of-check.ts";
+
+interface Props {
+  details: BikeRecord["details"];
+  summary: Summary;
+  check: CheckSummary;
+  body: CheckBody;
+  /** Nothing is said of riding while the engine must not be started. */
+  hoseMaybeOff: boolean;
+  /** Lets the oil rise, once, when a result appears. */
+  fills?: boolean;
+}
+
+/** What one check says: the action first, then the verdict and how sure it is, then the numbers. */
+export function Judgement({ details, summary, check, body, hoseMaybeOff, fills }: Props) {
+  const certainty = certaintySentence(check);
+  const sayAction = check.action !== "ride" || !hoseMaybeOff;
+  return (
+    <div className="flex flex-wrap gap-x-8 gap-y-4">
+      <div className="flex min-w-0 flex-[1_1_18rem] flex-col gap-3">
+        {sayAction && <ActionLine action={check.action} huge />}
+        <p className="text-xl">
+          <VerdictMark verdict={check.verdict} />
+        </p>
+        <p className="text-lg">{certainty ?? settlingSentence(check)}</p>
+        <CheckFigures summary={summary} check={check} body={body} sequence={details.sequence} />
+        <CheckFlags flags={check.flags} spoilers={body.spoilers ?? []} />
+      </div>
+      <div className="mx-auto w-60 max-w-full shrink-0">
+        <Column
+          size="large"
+          fills={fills}
+          {...columnOfCheck(summary, check, details.actDrop, body.syringe)}
+        />
+      </div>
+    </div>
+  );
+}
+
+function settlingSentence({ action }: CheckSummary): string {
+  return action === "ride"
+    ? "There is nothing to compare with yet: this check is the baseline that later ones are held to."
+    : "There is nothing to compare with yet, and the first check gave little: make sure before it becomes the baseline.";
+}

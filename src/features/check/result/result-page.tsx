@@ -1,0 +1,110 @@
+import { useParams } from "react-router-dom";
+import { flagSentences } from "../../../../shared/delivery/flags.ts";
+import type { LogEntryOf } from "../../../../shared/schemas/entry.ts";
+import type { BikeWithLog, KeptEntry } from "../../../offline/index.ts";
+import { ButtonLink } from "../../../ui/button-link.tsx";
+import { EntryStateMark } from "../../../ui/entry-state-mark.tsx";
+import { formatWhen } from "../../../ui/format-when.ts";
+import { Notice } from "../../../ui/notice.tsx";
+import { Page } from "../../../ui/page.tsx";
+import { bikePath, patterns } from "../../../ui/paths.ts";
+import { stepPaths } from "../check-paths.ts";
+import { useHoseMaybeOff } from "../draft/use-hose-maybe-off.ts";
+import { CheckFlags } from "./check-flags.tsx";
+import { Judgement } from "./judgement.tsx";
+import { NextDue } from "./next-due.tsx";
+import { WhatNext } from "./what-next.tsx";
+
+type SavedCheck = KeptEntry & { entry: LogEntryOf<"check"> };
+
+const isCheck = (line: KeptEntry): line is SavedCheck =>
+  line.understood && line.entry.kind === "check";
+
+interface Props {
+  bike: BikeWithLog;
+  /** True while the log is being read again: a check just saved may not be in it yet. */
+  reading: boolean;
+}
+
+/** What a saved check says, and what to do now. */
+export function ResultPage({ bike: { record, log }, reading }: Props) {
+  const { entryId } = useParams();
+  const { bikeId, details, summary } = record;
+  const hoseMaybeOff = useHoseMaybeOff(record);
+  const line = log.filter(isCheck).find(({ entry }) => entry.id === entryId);
+  const check = summary.checks.find((one) => one.entryId === entryId);
+  const back = { to: bikePath(bikeId), label: details.name };
+  if (!line && reading) return <main className="flex-1" aria-busy />;
+  if (!line)
+    return (
+      <Page title="This check is not here" back={back}>
+        <p>The log of this bike on this phone has no such check.</p>
+      </Page>
+    );
+  const { entry } = line;
+  const repeats = check?.action === "repeat";
+  const isLast = summary.checks.at(-1)?.entryId === entryId;
+  return (
+    <Page
+      title="Result"
+      back={back}
+      action={
+        <>
+          {repeats && (
+            <ButtonLink look="primary" wide to={stepPaths(bikeId).start}>
+              Repeat the check
+            </ButtonLink>
+          )}
+          <ButtonLink look={repeats ? "quiet" : "primary"} wide to={patterns.shed}>
+            To the Shed
+          </ButtonLink>
+        </>
+      }
+    >
+      <p className="flex flex-wrap justify-between gap-x-4">
+        <span>{formatWhen(entry.at)}</span>
+        <EntryStateMark state={line.state} />
+      </p>
+      {hoseMaybeOff && (
+        <Notice tone="error" title="Hose may be off: do not start">
+          <ButtonLink look="danger" to={stepPaths(bikeId).closeOut}>
+            Close it out
+          </ButtonLink>
+        </Notice>
+      )}
+      {check ? (
+        <Judgement
+          fills
+          details={details}
+          summary={summary}
+          check={check}
+          body={entry.body}
+          hoseMaybeOff={hoseMaybeOff}
+        />
+      ) : (
+        <NotCounted entry={entry} />
+      )}
+      {check && isLast && (check.action !== "ride" || check.verdict === "dropping") && (
+        <WhatNext record={record} checkHours={entry.hours} />
+      )}
+      <NextDue summary={summary} details={details} />
+    </Page>
+  );
+}
+
+/** A check of which no run counts, or that was struck since. */
+function NotCounted({ entry }: { entry: LogEntryOf<"check"> }) {
+  return (
+    <>
+      <Notice tone="caution" title="This check does not count">
+        <p>
+          {entry.body.runs.every((run) => run.void)
+            ? "All its runs are void."
+            : flagSentences["nothing-to-count"]}{" "}
+          It stays in the log.
+        </p>
+      </Notice>
+      <CheckFlags flags={[]} spoilers={entry.body.spoilers ?? []} />
+    </>
+  );
+}
