@@ -2,7 +2,6 @@ import { StrictMode } from "react";
 import { createRoot } from "react-dom/client";
 import { App } from "./app/app.tsx";
 import { reloadOnMissingChunk } from "./app/missing-chunk.ts";
-import { registerServiceWorker } from "./app/service-worker.ts";
 import "./ui/theme.css";
 
 reloadOnMissingChunk();
@@ -12,4 +11,6 @@ createRoot(document.getElementById("root")!).render(
   </StrictMode>,
 );
 // After the first paint: what the worker fetches must not hold it up.
-window.addEventListener("load", () => void registerServiceWorker());
+window.addEventListener("load", () => {
+  void import("./app/service-worker.ts").then((worker) => worker.registerServiceWorker());
+});

@@ -1,8 +1,9 @@
-import { Suspense } from "react";
+import { lazy, Suspense } from "react";
 import { Outlet, useLocation } from "react-router-dom";
 import { ErrorBoundary } from "./error-boundary.tsx";
 import { TopBar } from "./top-bar.tsx";
-import { UpdateBanner } from "./update-banner.tsx";
+
+const UpdateBanner = lazy(() => import("./update-banner.tsx"));
 
 /** What surrounds every screen. */
 export function Layout() {
@@ -10,7 +11,9 @@ export function Layout() {
   return (
     <div className="flex min-h-dvh flex-col">
       <TopBar />
-      <UpdateBanner />
+      <Suspense>
+        <UpdateBanner />
+      </Suspense>
       <ErrorBoundary place={pathname}>
         <Suspense fallback={<main className="flex-1" aria-busy />}>
           <Outlet />

@@ -2,7 +2,7 @@ import { Button } from "../ui/button.tsx";
 import { applyUpdate, useUpdateReady } from "./service-worker.ts";
 
 /** Offered, never forced: the rider says when, and not while a form is open. */
-export function UpdateBanner() {
+export default function UpdateBanner() {
   const ready = useUpdateReady();
   return (
     <div role="status">

@@ -11,10 +11,10 @@ import { EntryStateMark } from "../../ui/entry-state-mark.tsx";
 import { Notice } from "../../ui/notice.tsx";
 import { bikePath, checkPath, closeOutPath } from "../../ui/paths.ts";
 import { VerdictMark } from "../../ui/verdict-mark.tsx";
-import { DoubtfulReadings } from "./doubtful-readings.tsx";
 import { HoursLeft } from "./hours-left.tsx";
 import type { ShedBike } from "./shed-bikes.ts";
 
+const DoubtfulReadings = lazy(() => import("./doubtful-readings.tsx"));
 const LogHoursSheet = lazy(() => import("./log-hours-sheet.tsx"));
 
 /** One bike at arm's length: hours to its next check, what to do, how its delivery stands. */
@@ -50,7 +50,11 @@ export function BikeCard({ bike }: { bike: ShedBike }) {
         </div>
         <Column size="small" {...columnOfSummary(summary, details.actDrop)} />
       </div>
-      <DoubtfulReadings bike={bike} />
+      {summary.hours.doubtful.length > 0 && (
+        <Suspense>
+          <DoubtfulReadings bike={bike} />
+        </Suspense>
+      )}
       <div role="status">{unsent > 0 && <EntryStateMark state="saved" />}</div>
       <div className="mt-auto flex flex-wrap gap-2">
         <Button

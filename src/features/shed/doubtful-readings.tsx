@@ -7,7 +7,7 @@ import { useSubmit } from "../../ui/use-submit.ts";
 import { doubtWords } from "../../ui/doubt-words.ts";
 
 /** Readings that do not fit the others: kept, and not counted until the rider says so. */
-export function DoubtfulReadings({ bike }: { bike: BikeRecord }) {
+export default function DoubtfulReadings({ bike }: { bike: BikeRecord }) {
   return bike.summary.hours.doubtful.map((reading) => (
     <DoubtfulReadingNotice key={reading.entryId} bike={bike} reading={reading} />
   ));

@@ -11,7 +11,7 @@ const steps = [
 ];
 
 /** Teaches the first step. */
-export function EmptyShed() {
+export default function EmptyShed() {
   return (
     <Page
       title="Your shed is empty"

@@ -1,3 +1,4 @@
+import { lazy } from "react";
 import { Link } from "react-router-dom";
 import { PlusIcon } from "../../ui/icons.tsx";
 import { useBikes, useOpenChecks } from "../../offline/index.ts";
@@ -7,8 +8,9 @@ import { Notice } from "../../ui/notice.tsx";
 import { Page } from "../../ui/page.tsx";
 import { bikePath, patterns } from "../../ui/paths.ts";
 import { BikeCard } from "./bike-card.tsx";
-import { EmptyShed } from "./empty-shed.tsx";
 import { shedBikes, type ShedBike } from "./shed-bikes.ts";
+
+const EmptyShed = lazy(() => import("./empty-shed.tsx"));
 
 /** The rider's own bikes, read from this phone: no network has a part in it. */
 export function ShedPage() {
