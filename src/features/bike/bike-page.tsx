@@ -1,0 +1,80 @@
+import { lazy, Suspense, useMemo, useState } from "react";
+import { Link } from "react-router-dom";
+import { useOpenChecks, type BikeWithLog, type KeptEntry } from "../../offline/index.ts";
+import { ButtonLink } from "../../ui/button-link.tsx";
+import { Page } from "../../ui/page.tsx";
+import { bikeDetailsPath, checkPath, patterns } from "../../ui/paths.ts";
+import { CheckTable } from "./checks/check-table.tsx";
+import { countedEntries } from "./counted-entries.ts";
+import { deliveryHistory } from "./history/delivery-history.ts";
+import { LogSection } from "./log/log-section.tsx";
+import { StrikeSheet } from "./log/strike-sheet.tsx";
+import { DoubtfulReadings } from "./now/doubtful-readings.tsx";
+import { HoseMaybeOff } from "./now/hose-maybe-off.tsx";
+import { SavedNotice } from "./saved-notice.tsx";
+import { WhatToDo } from "./now/what-to-do.tsx";
+
+const DeliveryChart = lazy(() => import("./chart/delivery-chart.tsx"));
+
+/** One bike: what to do now, how its delivery went, and everything written about it. */
+export function BikePage({ bike }: { bike: BikeWithLog }) {
+  const { record, log } = bike;
+  const { bikeId, ownerId, details, summary } = record;
+  const history = useMemo(() => deliveryHistory(ownerId, countedEntries(log)), [ownerId, log]);
+  const [striking, setStriking] = useState<KeptEntry | null>(null);
+  const openCheck = useOpenChecks().find((check) => check.bikeId === bikeId);
+  const hoseMaybeOff = summary.flags.includes("not-closed-out") || openCheck?.hoseMaybeOff === true;
+
+  return (
+    <Page
+      title={details.name}
+      back={{ to: patterns.shed, label: "Shed" }}
+      wide
+      action={
+        <ButtonLink look="primary" wide to={checkPath(bikeId)}>
+          {openCheck ? "Go on with the delivery check" : "Start a delivery check"}
+        </ButtonLink>
+      }
+    >
+      <Identity bike={bike} />
+      {hoseMaybeOff && <HoseMaybeOff bikeId={bikeId} />}
+      <DoubtfulReadings bike={bike} onStrike={setStriking} />
+      <WhatToDo record={record} history={history} hoseMaybeOff={hoseMaybeOff} />
+      <div className="mt-4 grid gap-8 min-[900px]:grid-cols-2">
+        {history.points.length > 0 && (
+          <section aria-labelledby="checks" className="flex min-w-0 flex-col gap-4">
+            <h2 id="checks" className="text-2xl">
+              Delivery checks
+            </h2>
+            <Suspense fallback={<div className="h-80" aria-busy />}>
+              <DeliveryChart record={record} history={history} />
+            </Suspense>
+            <CheckTable history={history} meterFormat={details.meterFormat} />
+          </section>
+        )}
+        <LogSection bike={bike} history={history} onStrike={setStriking} />
+      </div>
+      {striking && <StrikeSheet kept={striking} onClose={() => setStriking(null)} />}
+    </Page>
+  );
+}
+
+/** What bike it is, and the way to its details. */
+function Identity({ bike: { record } }: { bike: BikeWithLog }) {
+  const { make, model, year, retired } = record.details;
+  const words = [make, model, year, retired && "Retired"].filter(Boolean).join(" · ");
+  return (
+    <div className="-mt-3 flex flex-wrap items-center gap-x-4">
+      {words && <p className="text-soft">{words}</p>}
+      {record.access === "owner" && (
+        <Link
+          to={bikeDetailsPath(record.bikeId)}
+          className="flex min-h-target items-center font-bold text-oil"
+        >
+          Details and settings
+        </Link>
+      )}
+      <SavedNotice />
+    </div>
+  );
+}
