@@ -12,6 +12,8 @@ export const readings = {
   toHalfMarks: { error: 0, step: 1 / 2 },
   /** To the nearest mark only. */
   toMarks: { error: 0, step: 1 },
+  /** More than is assumed: the eye's error and the rounding on top of it. */
+  worse: { error: 1 / 2, step: 1 / 2 },
 } as const;
 
 export type Reading = keyof typeof readings;
@@ -53,7 +55,7 @@ export function simulateCheck(
   for (let run = 0; run < runs; run++) {
     if (run % perFill === 0) {
       startMl = 0;
-      levelMl = graduationMl * rectangular(random, error + step / 2);
+      levelMl = graduationMl * (rectangular(random, error) + rectangular(random, step / 2));
     }
     levelMl += ranMl * (1 + REPEATABILITY * normal(random));
     const endMl = Math.max(startMl, read(levelMl, graduationMl, reading, random));
