@@ -53,8 +53,13 @@ export default {
         settling: thinned(70),
       },
       fontFamily: { sans: ["Atkinson Hyperlegible", "system-ui", "sans-serif"] },
-      // The one figure of a card or screen: 57 px on the narrowest phone, never wider than it.
-      fontSize: { figure: ["min(18vw, 4.5rem)", "1"], "figure-xl": ["min(22vw, 5rem)", "1"] },
+      // The one figure of a card or screen: 57 px on the narrowest phone, and no wider than it
+      // when letters are set large.
+      fontSize: {
+        figure: ["min(18vw, 4.5rem)", "1"],
+        "figure-xl": ["min(22vw, 5rem)", "1"],
+        "figure-long": ["min(14vw, 3.5rem)", "1"],
+      },
       borderRadius: { card: "12px" },
       minHeight: { target: "var(--target)" },
       minWidth: { target: "var(--target)" },

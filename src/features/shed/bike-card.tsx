@@ -40,8 +40,8 @@ export function BikeCard({ bike }: { bike: ShedBike }) {
           </ButtonLink>
         </Notice>
       )}
-      <div className="flex justify-between gap-3">
-        <div className="flex min-w-0 flex-col gap-3">
+      <div className="flex flex-wrap justify-between gap-3">
+        <div className="flex min-w-0 flex-[1_1_10rem] flex-col gap-3">
           <HoursLeft bike={bike} />
           <div className="flex flex-col gap-1">
             {summary.action && !hoseMaybeOff && <ActionLine action={summary.action} />}

@@ -13,11 +13,11 @@ export function HoursLeft({ bike }: { bike: BikeRecord }) {
   return (
     <p className="leading-tight">
       <span className="flex flex-wrap items-baseline gap-x-2 font-bold">
-        <span className={`tabular-nums ${shown.length > 5 ? "text-5xl" : "text-figure"}`}>
+        <span className={`tabular-nums ${shown.length > 5 ? "text-figure-long" : "text-figure"}`}>
           {isNow ? "Now" : shown}
         </span>
-        {!isNow && <span className="text-2xl">{due.overdue ? "h over" : "h"}</span>}
-      </span>
+        {!isNow && <span className="text-2xl"> {due.overdue ? "h over" : "h"}</span>}
+      </span>{" "}
       {isAhead ? `to the ${check === "check" ? "next check" : check}` : `${check} is due`}
       {isAhead && due.onDate && (
         <span className="block text-soft">about {formatDate(due.onDate)}</span>
