@@ -9,7 +9,7 @@ import type { NewEntry } from "../../src/offline/types.ts";
 import { bikeEntry, checkEntry, hoursEntry, newId, smallLog } from "../helpers/make-entry.ts";
 import { signUpRider, type Rider } from "../helpers/rider.ts";
 import { startTestServer, type TestServer } from "../helpers/start-test-server.ts";
-import { wiredPhone, type Network, type WiredPhone } from "../helpers/wired-phone.ts";
+import { wiredPhone, type Network, type WiredPhone } from "../helpers/phones/wired-phone.ts";
 
 let server: TestServer;
 let rider: Rider;

@@ -1,6 +1,6 @@
 // @vitest-environment node
 import { describe, expect, it } from "vitest";
-import { testPhone } from "../../../tests/helpers/test-phone.ts";
+import { testPhone } from "../../../tests/helpers/phones/test-phone.ts";
 import { changeLogbook } from "./change-logbook.ts";
 
 const draft = { bikeId: "new", form: "bike", content: {}, savedAt: "2026-03-01T09:00:00Z" };

@@ -1,6 +1,6 @@
 // @vitest-environment node
 import { describe, expect, it } from "vitest";
-import { rider, testPhone } from "../../../tests/helpers/test-phone.ts";
+import { rider, testPhone } from "../../../tests/helpers/phones/test-phone.ts";
 import { InvalidEntryError, NotSavedError, StoreUnavailableError } from "../errors.ts";
 import type { NewEntry } from "../types.ts";
 import { openDatabase } from "./database.ts";

@@ -34,17 +34,19 @@ async function beginApplying(change: Applying["change"], phone: Phone): Promise<
 }
 
 /**
- * Applies an answer, all or nothing. True where the server turned out to have been restored: of
- * such an answer only the results count, and the phone has to ask again.
+ * Applies an answer, all or nothing. False where only its results count and the phone has to ask
+ * again: the server turned out to have been restored since the phone last spoke to it, or while
+ * this answer was on its way.
  */
 export function applyAnswer(phone: Phone, round: Round, answer: SyncResponse): Promise<boolean> {
   return changeLogbook(phone, async (change) => {
     const applying = await beginApplying(change, phone);
-    const sync = await change.objectStore("meta").get("sync");
-    const restored = sync !== undefined && sync.epoch !== answer.epoch;
+    const last = await change.objectStore("meta").get("sync");
+    const restored = last !== undefined && last.epoch !== answer.epoch;
     if (restored) await startOver(applying);
     await applyResults(applying, answer.results);
-    if (!restored) {
+    const counts = !restored && round.epoch === last?.epoch;
+    if (counts) {
       await keepPulled(applying, answer.bikes);
       await dropGone(applying, answer.gone, round.known);
     }
@@ -54,6 +56,6 @@ export function applyAnswer(phone: Phone, round: Round, answer: SyncResponse): P
     }
     const lastSyncAt = phone.now().toISOString();
     await change.objectStore("meta").put({ id: "sync", epoch: answer.epoch, lastSyncAt });
-    return restored;
+    return counts;
   });
 }

@@ -6,6 +6,7 @@ import { rememberSyringe } from "../logbook/remember-syringe.ts";
 import type { EntryRow } from "../logbook/database.ts";
 import { setAside } from "./apply-results.ts";
 import type { Applying } from "./applying.ts";
+import { dropBike } from "./drop-bike.ts";
 
 type PulledBike = SyncResponse["bikes"][number];
 
@@ -41,31 +42,24 @@ export async function keepPulled(applying: Applying, bikes: PulledBike[]): Promi
   for (const bike of bikes) await keepPulledBike(applying, bike);
 }
 
-/** Takes a bike off this phone. What was not sent stays: it may be the only copy. */
-async function dropBike({ change, bikes, touched }: Applying, bikeId: string): Promise<void> {
-  const entries = change.objectStore("entries");
-  for (const row of await entries.index("bike").getAll(bikeId))
-    if (row.unsentSince === undefined) await entries.delete(row.entry.id);
-  await change.objectStore("bikes").delete(bikeId);
-  bikes.delete(bikeId);
-  touched.delete(bikeId);
-}
-
 async function isWaiting({ change }: Applying, bikeId: string): Promise<boolean> {
   const rows = await change.objectStore("entries").index("bike").getAll(bikeId);
   return rows.some((row) => row.unsentSince !== undefined && !row.refusal);
 }
 
 /**
- * Heeds the server's list of bikes no longer visible: only those the phone asked about, and only
- * once the server has answered for all that this phone has written about them.
+ * Heeds the server's list of bikes no longer visible: only those the phone asked about and has
+ * heard nothing of since, and only once the server has answered for all that this phone has
+ * written about them.
  */
 export async function dropGone(
   applying: Applying,
   gone: string[],
   known: Record<string, number>,
 ): Promise<void> {
-  for (const bikeId of gone)
-    if (Object.hasOwn(known, bikeId) && !(await isWaiting(applying, bikeId)))
-      await dropBike(applying, bikeId);
+  for (const bikeId of gone) {
+    const bike = applying.bikes.get(bikeId);
+    const isLatestWord = bike !== undefined && bike.rev === known[bikeId];
+    if (isLatestWord && !(await isWaiting(applying, bikeId))) await dropBike(applying, bikeId);
+  }
 }

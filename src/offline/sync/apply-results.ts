@@ -2,6 +2,7 @@ import { v7 as makeId } from "uuid";
 import type { SyncResult } from "../../../shared/schemas/sync.ts";
 import type { EntryRow } from "../logbook/database.ts";
 import type { Applying } from "./applying.ts";
+import { dropBike } from "./drop-bike.ts";
 
 /**
  * The server has another entry under this id. Ours keeps its content under a new id, refused, so
@@ -30,6 +31,8 @@ async function applyResult(applying: Applying, result: SyncResult): Promise<void
   } else {
     const { reason = "invalid", errors } = result;
     await entries.put({ ...row, refusal: { reason, ...(errors && { errors }) } });
+    // Entries are erased with their whole bike only: it was deleted on another phone.
+    if (reason === "erased") await dropBike(applying, row.entry.bikeId);
   }
 }
 

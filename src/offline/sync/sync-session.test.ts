@@ -3,7 +3,7 @@ import { v7 as makeId } from "uuid";
 import { describe, expect, it } from "vitest";
 import type { Entry } from "../../../shared/schemas/entry.ts";
 import type { SyncRequest, SyncResponse, SyncResult } from "../../../shared/schemas/sync.ts";
-import { rider, testPhone } from "../../../tests/helpers/test-phone.ts";
+import { rider, testPhone } from "../../../tests/helpers/phones/test-phone.ts";
 import { ApiError, NoNetworkError } from "../errors.ts";
 import { keepEntry } from "../logbook/keep-entry.ts";
 import type { Phone } from "../logbook/phone.ts";
@@ -148,17 +148,24 @@ describe("sending", () => {
     },
   );
 
-  it.each(["invalid", "erased"] as const)(
-    "never sends an entry refused as %s again",
-    async (reason) => {
-      const phone = testPhone();
-      await keep(phone, newBike);
-      await sync(phone, refuses(reason));
-      const [request] = await sync(phone);
-      expect(request!.entries).toEqual([]);
-      expect(await statesOf(phone)).toEqual([["bike", "refused"]]);
-    },
-  );
+  it("never sends an entry refused as invalid again, and keeps its bike in sight", async () => {
+    const phone = testPhone();
+    await keep(phone, newBike);
+    await sync(phone, refuses("invalid"));
+    const [request] = await sync(phone);
+    expect(request!.entries).toEqual([]);
+    expect(await statesOf(phone)).toEqual([["bike", "refused"]]);
+  });
+
+  it("takes a bike that was erased elsewhere out of the Shed, and keeps what was refused", async () => {
+    const phone = await settledPhone();
+    await keep(phone, hours(4));
+    await sync(phone, refuses("erased"));
+    const [request] = await sync(phone);
+    expect(request).toMatchObject({ known: {}, entries: [] });
+    expect(await readBike(phone, bikeId)).toBeNull();
+    expect(await readUnsent(phone)).toMatchObject([{ reason: "erased", entry: { hours: 4 } }]);
+  });
 
   it("keeps the content of an entry whose id is taken, and takes the server's entry too", async () => {
     const phone = await settledPhone();
@@ -432,6 +439,27 @@ describe("a server that was restored", () => {
       ["hours", "saved"],
       ["bike", "saved"],
     ]);
+  });
+
+  it("is not believed where its answer was on its way while another sync went on", async () => {
+    const phone = await settledPhone();
+    let interrupt = true;
+    const session = {
+      phone,
+      async send(request: SyncRequest): Promise<SyncResponse> {
+        if (interrupt) {
+          interrupt = false;
+          await runSyncSession(session);
+          return { epoch: "two", results: [], bikes: [], gone: [bikeId], more: false };
+        }
+        const results = each(request, "stored");
+        return { epoch: "two", results, bikes: [], gone: [], more: false };
+      },
+      isCurrent: () => true,
+      onApplied: () => undefined,
+    };
+    await runSyncSession(session);
+    expect((await readBike(phone, bikeId))?.log).toHaveLength(2);
   });
 
   it("is not sent what others wrote", async () => {

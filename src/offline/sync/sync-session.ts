@@ -60,10 +60,11 @@ export async function runSyncSession(session: SyncSession): Promise<void> {
       if (round.entries.length === 1) answered.add(round.entries[0]!.id);
       continue;
     }
-    const restored = await applyAnswer(session.phone, round, answer);
+    const counts = await applyAnswer(session.phone, round, answer);
     session.onApplied();
-    if (restored) answered.clear();
-    for (const { id } of round.entries) answered.add(id);
-    asked = !restored && !answer.more;
+    // What a restored server refused for want of a bike's registration may go once that is there.
+    if (counts) for (const { id } of round.entries) answered.add(id);
+    else answered.clear();
+    asked = counts && !answer.more;
   }
 }

@@ -1,7 +1,7 @@
 import "fake-indexeddb/auto";
-import { connectTo } from "../../src/offline/logbook/connection.ts";
-import type { Phone } from "../../src/offline/logbook/phone.ts";
-import type { Account } from "../../src/offline/types.ts";
+import { connectTo } from "../../../src/offline/logbook/connection.ts";
+import type { Phone } from "../../../src/offline/logbook/phone.ts";
+import type { Account } from "../../../src/offline/types.ts";
 
 export const rider: Account = {
   id: "0193a000-0000-7000-8000-00000000aaaa",

@@ -1,11 +1,12 @@
-import { syncResponseSchema } from "../../shared/schemas/sync.ts";
-import type { User } from "../../shared/schemas/auth.ts";
-import { apiRequest } from "../../src/offline/api-client.ts";
-import { keepEntry } from "../../src/offline/logbook/keep-entry.ts";
-import { readBike, readUnsent } from "../../src/offline/logbook/read-bike.ts";
-import { runSyncSession } from "../../src/offline/sync/sync-session.ts";
-import type { NewEntry } from "../../src/offline/types.ts";
-import type { Served } from "./rider.ts";
+import { summarySchema } from "../../../shared/schemas/summary.ts";
+import { syncResponseSchema } from "../../../shared/schemas/sync.ts";
+import type { User } from "../../../shared/schemas/auth.ts";
+import { apiRequest } from "../../../src/offline/api-client.ts";
+import { keepEntry } from "../../../src/offline/logbook/keep-entry.ts";
+import { readBike, readUnsent } from "../../../src/offline/logbook/read-bike.ts";
+import { runSyncSession } from "../../../src/offline/sync/sync-session.ts";
+import type { NewEntry } from "../../../src/offline/types.ts";
+import type { Served } from "../rider.ts";
 import { testPhone } from "./test-phone.ts";
 
 /** What lies between a phone and the server: it may lose, delay, double or change what passes. */
@@ -58,6 +59,9 @@ export function wiredPhone({ id, name, email }: User, wire: Wire) {
     bike: (bikeId: string) => readBike(phone, bikeId),
     bikes: async () => (await phone.open()).getAll("bikes"),
     unsent: () => readUnsent(phone),
+    /** The summary as the server computed it. */
+    serverSummary: (bikeId: string) =>
+      apiRequest(`/api/bikes/${bikeId}`, { schema: summarySchema, fetch: browserFetch(wire) }),
   };
 }
 

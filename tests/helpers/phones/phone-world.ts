@@ -1,0 +1,174 @@
+/** Three phones, two riders and a server, and what they can do to each other. */
+import path from "node:path";
+import { backUpDatabase, backupsDir } from "../../../server/db/back-up-database.ts";
+import { eraseBike } from "../../../server/services/erase.ts";
+import { restoreDatabase } from "../../../server/services/restore-database.ts";
+import { ApiError, NoNetworkError } from "../../../src/offline/errors.ts";
+import type { NewEntry } from "../../../src/offline/types.ts";
+import { bikeEntry, checkEntry, hoursEntry, newId, noteEntry, strikeEntry } from "../make-entry.ts";
+import { signUpRider, type Rider } from "../rider.ts";
+import { startTestServer, type TestServer } from "../start-test-server.ts";
+import { lateNetwork, networks } from "./networks.ts";
+import { wiredPhone, type WiredPhone } from "./wired-phone.ts";
+
+const DEVICES = 3;
+
+export type Step =
+  | { does: "register"; device: number; year: number }
+  | { does: "write"; device: number; year: number; pick: number }
+  | { does: "strike"; device: number; year: number; pick: number }
+  | { does: "sync"; device: number; network: keyof typeof networks | "late" }
+  | { does: "switch-account"; device: number }
+  | { does: "erase"; device: number; pick: number }
+  | { does: "back-up" }
+  | { does: "restore" };
+
+/** A phone as a thing: whoever is signed in, each account's store stays on it. */
+interface Device {
+  signedIn: number;
+  stores: WiredPhone[];
+}
+
+export interface World {
+  server: TestServer;
+  riders: Rider[];
+  devices: Device[];
+  /** What riders were told is saved, by the store they were saved in: each entry's id and bike. */
+  saved: Map<WiredPhone, Map<string, string>>;
+  /** Whose bike it is, erased ones included. */
+  owners: Map<string, string>;
+  erased: Set<string>;
+  backup: string | null;
+}
+
+let worlds = 0;
+
+export async function createWorld(): Promise<World> {
+  const server = await startTestServer();
+  const riders = [await signUpRider(server, "Ann"), await signUpRider(server, "Bob")];
+  const name = `world-${(worlds += 1)}`;
+  const world: World = {
+    server,
+    riders,
+    devices: [],
+    saved: new Map(),
+    owners: new Map(),
+    erased: new Set(),
+    backup: null,
+  };
+  const wire = (rider: Rider, device: number) =>
+    wiredPhone(rider.user, {
+      server: () => world.server,
+      cookie: () => rider.cookie,
+      device: `${name}-device-${device}`,
+    });
+  for (let device = 0; device < DEVICES; device += 1)
+    world.devices.push({
+      signedIn: device % riders.length,
+      stores: riders.map((rider) => wire(rider, device)),
+    });
+  return world;
+}
+
+export const storesOf = ({ devices }: World): WiredPhone[] =>
+  devices.flatMap(({ stores }) => stores);
+
+function inHand(world: World, device: number): WiredPhone {
+  const { stores, signedIn } = world.devices[device]!;
+  return stores[signedIn]!;
+}
+
+const choose = <T>(from: readonly T[], pick: number): T | undefined => from[pick % from.length];
+
+/** A phone's clock may say anything. */
+const clockOf = (year: number) => new Date(Date.UTC(year, 2, 1, 9));
+
+async function save(world: World, phone: WiredPhone, entry: object, year: number): Promise<void> {
+  phone.clock.now = clockOf(year);
+  const { entry: kept } = await phone.keep({
+    ...entry,
+    at: clockOf(year).toISOString(),
+  } as NewEntry);
+  const saved = world.saved.get(phone) ?? new Map<string, string>();
+  world.saved.set(phone, saved.set(kept.id, kept.bikeId));
+}
+
+async function register(world: World, phone: WiredPhone, year: number): Promise<void> {
+  const bikeId = newId();
+  world.owners.set(bikeId, phone.account.id);
+  await save(world, phone, bikeEntry(bikeId), year);
+}
+
+async function write(world: World, phone: WiredPhone, pick: number, year: number): Promise<void> {
+  const bike = choose(await phone.bikes(), pick);
+  if (!bike) return;
+  const { bikeId } = bike;
+  const reading = (pick % 90) + 1;
+  const entries = [
+    hoursEntry(bikeId, reading),
+    checkEntry(bikeId, reading, 2 + (pick % 10) / 10),
+    noteEntry(bikeId, `Note ${pick}`),
+  ];
+  await save(world, phone, choose(entries, pick)!, year);
+}
+
+async function strike(world: World, phone: WiredPhone, pick: number, year: number): Promise<void> {
+  const rows = await (await phone.open()).getAll("entries");
+  const targets = rows.filter(({ entry }) => !["bike", "strike"].includes(entry.kind));
+  const entry = choose(targets, pick)?.entry;
+  if (entry && (await phone.bike(entry.bikeId)))
+    await save(world, phone, strikeEntry(entry.bikeId, entry.id), year);
+}
+
+/** What a phone bears with every day. Anything else is a fault of ours. */
+function bear(error: unknown): void {
+  if (!(error instanceof NoNetworkError) && !(error instanceof ApiError)) throw error;
+}
+
+/** The first session's answer comes when another session has come and gone. */
+async function syncLate(phone: WiredPhone): Promise<void> {
+  const { network, letThrough } = lateNetwork();
+  const first = phone.sync(network).catch(bear);
+  await phone.sync().catch(bear);
+  letThrough();
+  await first;
+}
+
+function erase(world: World, phone: WiredPhone, pick: number): void {
+  const { store } = world.server;
+  const bikeId = choose(store.bikes.idsOf(phone.account.id), pick);
+  if (bikeId === undefined) return;
+  eraseBike(store, phone.account.id, bikeId);
+  world.erased.add(bikeId);
+}
+
+async function backUp(world: World): Promise<void> {
+  const { database, dataDir } = world.server;
+  world.backup = path.join(backupsDir(dataDir), `${newId()}.sqlite`);
+  await backUpDatabase(database.$client, world.backup);
+}
+
+async function restore(world: World): Promise<void> {
+  if (world.backup === null) return;
+  const { dataDir } = world.server;
+  await world.server.stop();
+  await restoreDatabase(dataDir, world.backup);
+  world.server = await startTestServer({ dataDir });
+}
+
+export async function perform(world: World, step: Step): Promise<void> {
+  if (step.does === "back-up") return backUp(world);
+  if (step.does === "restore") return restore(world);
+  const phone = inHand(world, step.device);
+  if (step.does === "register") return register(world, phone, step.year);
+  if (step.does === "write") return write(world, phone, step.pick, step.year);
+  if (step.does === "strike") return strike(world, phone, step.pick, step.year);
+  if (step.does === "erase") return erase(world, phone, step.pick);
+  if (step.does === "switch-account") {
+    const device = world.devices[step.device]!;
+    device.signedIn = (device.signedIn + 1) % device.stores.length;
+    return;
+  }
+  if (step.network === "late") return syncLate(phone);
+  await phone.sync(networks[step.network]).catch(bear);
+}
