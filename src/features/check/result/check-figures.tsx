@@ -25,9 +25,9 @@ export function CheckFigures({ summary, check, body, sequence }: Props) {
   const { delivery } = measureDelivery(body, sequence);
   const sessionMl = ratio !== null && baseline ? ratio * baseline.perRunMl : perRunMl;
   return (
-    <dl className="grid grid-cols-[auto_1fr] items-baseline gap-x-4 gap-y-2 text-lg">
-      <Figure name="Delivery">
-        <strong className="text-2xl">{formatMlGiveOrTake(perRunMl, uMl)}</strong> a run
+    <dl className="flex flex-col gap-2 text-lg">
+      <Figure name="Delivery a run">
+        <strong className="text-2xl">{formatMlGiveOrTake(perRunMl, uMl)}</strong>
       </Figure>
       {ratio !== null && uRatio !== null && (
         <Figure name="Of baseline">
@@ -41,7 +41,7 @@ export function CheckFigures({ summary, check, body, sequence }: Props) {
           {formatMl(sessionMl)}: judged with the other checks of this hour
         </Figure>
       )}
-      <Figure name="Runs">{runsCounted === 1 ? "1 counted" : `${runsCounted} counted`}</Figure>
+      <Figure name="Runs counted">{runsCounted}</Figure>
       {delivery && (
         <Figure name="Most of the ±">
           comes from{" "}
@@ -54,9 +54,9 @@ export function CheckFigures({ summary, check, body, sequence }: Props) {
 
 function Figure({ name, children }: { name: string; children: ReactNode }) {
   return (
-    <>
+    <div className="flex flex-wrap items-baseline gap-x-3">
       <dt className="text-soft">{name}</dt>
       <dd className="tabular-nums">{children}</dd>
-    </>
+    </div>
   );
 }

@@ -25,24 +25,26 @@ export function Judgement({ details, summary, check, body, hoseMaybeOff, fills }
   const certainty = certaintySentence(check);
   const sayAction = check.action !== "ride" || !hoseMaybeOff;
   return (
-    <div className="flex flex-wrap gap-x-8 gap-y-4">
-      <div className="flex min-w-0 flex-[1_1_18rem] flex-col gap-3">
-        {sayAction && <ActionLine action={check.action} huge />}
-        <p className="text-xl">
-          <VerdictMark verdict={check.verdict} />
-        </p>
-        <p className="text-lg">{certainty ?? settlingSentence(check)}</p>
-        <CheckFigures summary={summary} check={check} body={body} sequence={details.sequence} />
-        <CheckFlags flags={check.flags} spoilers={body.spoilers ?? []} />
+    <>
+      {sayAction && <ActionLine action={check.action} huge />}
+      <p className="text-xl">
+        <VerdictMark verdict={check.verdict} />
+      </p>
+      <p className="text-lg">{certainty ?? settlingSentence(check)}</p>
+      <div className="flex flex-wrap gap-x-6 gap-y-4">
+        <div className="mx-auto w-60 max-w-full shrink-0">
+          <Column
+            size="large"
+            fills={fills}
+            {...columnOfCheck(summary, check, details.actDrop, body.syringe)}
+          />
+        </div>
+        <div className="flex min-w-0 flex-[1_1_14rem] flex-col gap-4">
+          <CheckFigures summary={summary} check={check} body={body} sequence={details.sequence} />
+          <CheckFlags flags={check.flags} spoilers={body.spoilers ?? []} />
+        </div>
       </div>
-      <div className="mx-auto w-60 max-w-full shrink-0">
-        <Column
-          size="large"
-          fills={fills}
-          {...columnOfCheck(summary, check, details.actDrop, body.syringe)}
-        />
-      </div>
-    </div>
+    </>
   );
 }
 

@@ -51,7 +51,7 @@ export function AgainStep() {
 }
 
 function titleOf(read: number, planned: number | null): string {
-  if (planned === null) return read === 1 ? "1 run read" : `${read} runs read`;
-  if (read >= planned) return `All ${planned} runs read`;
-  return `${read} of ${planned} runs read`;
+  if (planned !== null && read < planned) return `${read} of ${planned} runs read`;
+  const counted = read === 1 ? "1 run read" : `${read} runs read`;
+  return planned === null ? counted : `${counted}: enough`;
 }

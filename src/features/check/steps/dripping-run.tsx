@@ -8,6 +8,8 @@ import { RhythmChoice } from "./rhythm-choice.tsx";
 import { RunLength } from "./run-length.tsx";
 import { RunPage } from "./run-page.tsx";
 import { SoundSwitch } from "./sound-switch.tsx";
+import { bigActionClass } from "./big-action-class.ts";
+import { useArmed } from "./use-armed.ts";
 import { useRun } from "./use-run.ts";
 import { VoidButtons } from "./void-buttons.tsx";
 
@@ -18,6 +20,7 @@ const EARLY = ["drip-wait-varied"] as const;
 export function DrippingRun({ secondsLeft }: { secondsLeft: number }) {
   const { n, change, paths } = useRun();
   const navigate = useNavigate();
+  const armed = useArmed();
   const waits = secondsLeft > 0;
   const readEarly = () => {
     change((now) => chooseSpoilers(now, EARLY, EARLY));
@@ -27,11 +30,11 @@ export function DrippingRun({ secondsLeft }: { secondsLeft: number }) {
     <RunPage
       action={
         waits ? (
-          <Button wide onClick={readEarly}>
-            Read without the full wait: it is marked
+          <Button wide disabled={!armed} onClick={readEarly}>
+            Read now: marked as too early
           </Button>
         ) : (
-          <ButtonLink look="primary" wide to={paths.read(n)} className="min-h-28 text-3xl!">
+          <ButtonLink look="primary" wide to={paths.read(n)} className={bigActionClass}>
             Read the level
           </ButtonLink>
         )

@@ -7,6 +7,8 @@ import { CautionsLine } from "../cautions.tsx";
 import { changeRun, startRun, startTextOf } from "../draft/check-draft.ts";
 import { RunPage } from "./run-page.tsx";
 import { SoundSwitch } from "./sound-switch.tsx";
+import { bigActionClass } from "./big-action-class.ts";
+import { useArmed } from "./use-armed.ts";
 import { useRun } from "./use-run.ts";
 import { VoidButtons } from "./void-buttons.tsx";
 
@@ -14,6 +16,7 @@ import { VoidButtons } from "./void-buttons.tsx";
 export function ReadyRun() {
   const { n, draft, change, nextMl, sequence } = useRun();
   const [tried, setTried] = useState(false);
+  const armed = useArmed();
   const startText = startTextOf(draft, n, nextMl);
   const known = parseDecimal(startText) !== null;
   const start = () => {
@@ -25,7 +28,7 @@ export function ReadyRun() {
   return (
     <RunPage
       action={
-        <Button look="primary" wide onClick={start} className="min-h-40 text-4xl!">
+        <Button look="primary" wide onClick={start} disabled={!armed} className={bigActionClass}>
           Start
         </Button>
       }

@@ -34,7 +34,7 @@ export function RunList() {
 function RunLine({ n, run, startText, to }: RunLineProps) {
   return (
     <li className="border-b border-rule">
-      <Link to={to} className="flex min-h-target items-center gap-3 text-lg">
+      <Link to={to} className="flex min-h-target flex-wrap items-center gap-x-3 py-1 text-lg">
         <strong>{n}.</strong>
         <span className={`flex-1 ${run.voided ? "text-soft line-through" : ""}`}>
           {levels(startText, run)}

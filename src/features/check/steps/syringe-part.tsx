@@ -13,15 +13,15 @@ export function SyringePart({ error }: { error?: string }) {
   const pick = (id: string) =>
     change((now) => ({ ...now, syringe: options.find((one) => one.id === id) ?? now.syringe }));
   return (
-    <div className="flex gap-3">
+    <div className="flex flex-wrap gap-3">
       {draft.syringe && (
         <SyringeDrawing
           syringe={draft.syringe}
           levelMl={null}
-          className="h-56 w-28 shrink-0 self-center"
+          className="h-[224px] w-[112px] shrink-0 self-center"
         />
       )}
-      <div className="flex min-w-0 flex-1 flex-col justify-center gap-2">
+      <div className="flex min-w-0 flex-[1_1_10rem] flex-col justify-center gap-2">
         <Choice
           label="Syringe"
           hint={options.length === 0 ? "Add the one you read from." : undefined}

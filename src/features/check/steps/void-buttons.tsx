@@ -4,16 +4,17 @@ import { voidReasons, type VoidReason } from "../draft/check-draft-schema.ts";
 import { useRun } from "./use-run.ts";
 
 const words: Record<VoidReason, string> = {
-  "not-started": "It did not start",
-  interrupted: "It was interrupted",
-  doubled: "It ran twice",
+  "not-started": "Did not start",
+  interrupted: "Interrupted",
+  doubled: "Ran twice",
 };
 
 /** One tap makes a run void: it stays recorded, and does not count. */
 export function VoidButtons({ only = voidReasons }: { only?: readonly VoidReason[] }) {
   const { n, change } = useRun();
   return (
-    <div role="group" aria-label="Make this run void" className="flex flex-wrap gap-2">
+    <fieldset className="flex min-w-0 flex-wrap gap-2">
+      <legend className="mb-1 font-bold">Make this run void</legend>
       {only.map((reason) => (
         <Button
           key={reason}
@@ -23,6 +24,6 @@ export function VoidButtons({ only = voidReasons }: { only?: readonly VoidReason
           {words[reason]}
         </Button>
       ))}
-    </div>
+    </fieldset>
   );
 }
