@@ -1,7 +1,17 @@
 import { sql } from "drizzle-orm";
-import { index, integer, real, sqliteTable, text, uniqueIndex } from "drizzle-orm/sqlite-core";
+import {
+  index,
+  integer,
+  primaryKey,
+  real,
+  sqliteTable,
+  text,
+  uniqueIndex,
+} from "drizzle-orm/sqlite-core";
+import type { LineUpFacts } from "../../shared/schemas/club.ts";
 import type { Action, Verdict } from "../../shared/schemas/entry.ts";
 import type { Summary } from "../../shared/schemas/summary.ts";
+import type { Message } from "../mail/letter.ts";
 
 // Nothing is deleted by cascade: a table rebuild in a migration would take the children along.
 
@@ -33,9 +43,14 @@ export const sessions = sqliteTable(
   (table) => [index("sessions_user").on(table.userId)],
 );
 
-export const tokenPurposes = ["verify-email", "reset-password"] as const;
+export const tokenPurposes = [
+  "verify-email",
+  "reset-password",
+  "end-due-mails",
+  "end-stop-mails",
+] as const;
 
-/** Tokens sent by mail, each good for one use. */
+/** Tokens sent by mail, each good for one purpose and a limited time. */
 export const mailedTokens = sqliteTable(
   "mailed_tokens",
   {
@@ -83,21 +98,143 @@ export const entries = sqliteTable(
   (table) => [index("entries_bike_rev").on(table.bikeId, table.rev)],
 );
 
-/** What `summariseLogbook` says of each bike, and the columns that boards sort and filter by. */
-export const bikeSummaries = sqliteTable("bike_summaries", {
-  bikeId: text()
-    .primaryKey()
-    .references(() => bikes.id),
+/** What `summariseLogbook` says of each bike, and the columns that are searched and sorted by. */
+export const bikeSummaries = sqliteTable(
+  "bike_summaries",
+  {
+    bikeId: text()
+      .primaryKey()
+      .references(() => bikes.id),
+    name: text().notNull(),
+    retired: integer({ mode: "boolean" }).notNull(),
+    verdict: text().$type<Verdict>().notNull(),
+    action: text().$type<Action>(),
+    pLow: real(),
+    hoursNow: real(),
+    dueInHours: real(),
+    /** YYYY-MM-DD; null where the hours a week are not known. */
+    dueOn: text(),
+    lastCheckAt: text(),
+    /** The bike's place on a Line-up: its index in `lineUpOrder`. */
+    rank: integer().notNull().default(0),
+    /** What a Line-up shows of the bike. Null only until the server's first start after the migration. */
+    lineUp: text({ mode: "json" }).$type<LineUpFacts>(),
+    summary: text({ mode: "json" }).$type<Summary>().notNull(),
+  },
+  (table) => [
+    index("bike_summaries_due_hours").on(table.dueInHours),
+    index("bike_summaries_due_on").on(table.dueOn),
+  ],
+);
+
+export const clubs = sqliteTable("clubs", {
+  id: text().primaryKey(),
   name: text().notNull(),
-  retired: integer({ mode: "boolean" }).notNull(),
-  verdict: text().$type<Verdict>().notNull(),
-  action: text().$type<Action>(),
-  pLow: real(),
-  hoursNow: real(),
-  dueInHours: real(),
-  lastCheckAt: text(),
-  summary: text({ mode: "json" }).$type<Summary>().notNull(),
+  createdAt: text().notNull(),
+  /** Goes up whenever the club's Line-up changes, in the transaction that changes it. */
+  revision: integer().notNull().default(0),
 });
+
+const clubId = () =>
+  text()
+    .notNull()
+    .references(() => clubs.id);
+
+export const clubMembers = sqliteTable(
+  "club_members",
+  {
+    clubId: clubId(),
+    userId: text()
+      .notNull()
+      .references(() => users.id),
+    organiser: integer({ mode: "boolean" }).notNull(),
+    mechanic: integer({ mode: "boolean" }).notNull(),
+    joinedAt: text().notNull(),
+  },
+  (table) => [
+    primaryKey({ columns: [table.clubId, table.userId] }),
+    index("club_members_user").on(table.userId),
+  ],
+);
+
+export const clubInvites = sqliteTable(
+  "club_invites",
+  {
+    id: text().primaryKey(),
+    clubId: clubId(),
+    /** Of the link's token, which is told once and not kept. */
+    hash: text().notNull().unique(),
+    /** Where the link was sent too; null where it was handed over in another way. */
+    email: text(),
+    usesLeft: integer().notNull(),
+    createdAt: text().notNull(),
+    expiresAt: text().notNull(),
+  },
+  (table) => [index("club_invites_club").on(table.clubId)],
+);
+
+/**
+ * The bikes on each club's Line-up. Rank and hours are copies of the summary's, kept in step with
+ * it, so that a page of the board is read off one index, worst first.
+ */
+export const bikeShares = sqliteTable(
+  "bike_shares",
+  {
+    bikeId: text()
+      .notNull()
+      .references(() => bikes.id),
+    clubId: clubId(),
+    sharedAt: text().notNull(),
+    rank: integer().notNull(),
+    dueInHours: real().notNull(),
+  },
+  (table) => [
+    primaryKey({ columns: [table.bikeId, table.clubId] }),
+    index("bike_shares_line_up").on(table.clubId, table.rank, table.dueInHours, table.bikeId),
+  ],
+);
+
+/** Which mails an account gets; one without a row gets them all. */
+export const reminders = sqliteTable("reminders", {
+  userId: text()
+    .primaryKey()
+    .references(() => users.id),
+  dueMails: integer({ mode: "boolean" }).notNull(),
+  stopMails: integer({ mode: "boolean" }).notNull(),
+});
+
+export const mailTopics = ["verify-email", "reset-password", "invitation", "due", "stop"] as const;
+
+/**
+ * Every mail, written in the transaction that causes it, and kept after it was sent, without its
+ * text and address, so that none is sent twice about the same thing.
+ */
+export const mails = sqliteTable(
+  "mails",
+  {
+    id: integer().primaryKey({ autoIncrement: true }),
+    topic: text({ enum: mailTopics }).notNull(),
+    /** The account it goes to; null for an invitation, which goes to an address alone. */
+    userId: text().references(() => users.id),
+    bikeId: text().references(() => bikes.id),
+    /** What it is about, once for each topic and account; null where it may be sent again. */
+    occasion: text(),
+    /** Null once it is sent or given up: it may hold tokens. */
+    letter: text({ mode: "json" }).$type<{ to: string; message: Message }>(),
+    queuedAt: text().notNull(),
+    attempts: integer().notNull().default(0),
+    /** Milliseconds since 1970; null once there is nothing left to try. */
+    nextAttemptAt: integer(),
+    /** Milliseconds since 1970: after this it is of no use to anyone. */
+    goodUntil: integer().notNull(),
+    sentAt: text(),
+  },
+  (table) => [
+    uniqueIndex("mails_occasion").on(table.userId, table.topic, table.occasion),
+    index("mails_bike").on(table.bikeId, table.topic, table.queuedAt),
+    index("mails_next").on(table.nextAttemptAt),
+  ],
+);
 
 /** Ids of bikes, entries and accounts that were erased, so that no phone brings them back. */
 export const erasedIds = sqliteTable("erased_ids", { id: text().primaryKey() });

@@ -6,6 +6,7 @@
  * | `GET /api/clubs` | anyone signed in | `clubsResponseSchema` |
  * | `POST /api/clubs` `newClubSchema` | anyone signed in: becomes its organiser | 201 `clubResponseSchema` |
  * | `GET /api/clubs/:clubId` | member | `clubResponseSchema` |
+ * | `DELETE /api/clubs/:clubId` | organiser: closes it for everyone | 204 |
  * | `GET /api/clubs/:clubId/members` | member | `membersResponseSchema` |
  * | `PUT /api/clubs/:clubId/members/:userId` `memberRolesSchema` | organiser | `memberResponseSchema`; 409 the last organiser |
  * | `DELETE /api/clubs/:clubId/members/:userId` | organiser, or oneself | 204; 409 the last organiser |
@@ -97,7 +98,10 @@ export const sharesResponseSchema = z.object({
   ),
 });
 
-/** The Line-up's places, worst first: what puts a bike where it stands. */
+/**
+ * The Line-up's places, worst first: what puts a bike where it stands. Within a place, the bike
+ * with the fewest hours left comes first.
+ */
 export const lineUpOrder = [
   /** The check's action, or advice written by hand that nothing has lifted. */
   "stop",
@@ -115,13 +119,15 @@ export const DUE_SOON_HOURS = 5;
 
 export const MAX_LINE_UP_PAGE = 200;
 
-/** A bike on the Line-up. Hours are lifetime engine hours; fractions are of the baseline. */
-export const lineUpRowSchema = z.object({
+/**
+ * What a Line-up shows of a bike, whoever owns it: phone and server make it alike from the log.
+ * Hours are lifetime engine hours; fractions are of the baseline.
+ */
+export const lineUpFactsSchema = z.object({
   bikeId: z.string(),
   name: z.string(),
   /** The short tag shown on the bike's page, to type on a test day. */
   tag: z.string(),
-  owner: z.object({ id: z.string(), name: z.string() }),
   place: z.enum(lineUpOrder),
   action: z.enum(actions).nullable(),
   verdict: z.enum(verdicts),
@@ -132,13 +138,18 @@ export const lineUpRowSchema = z.object({
   dueInHours: z.number(),
   onDate: z.string().nullable(),
   lastCheckAt: z.string().nullable(),
-  /** Hours on this pump since it was last renewed, as far as the log knows. */
+  /** Hours since the pump was last renewed; null where the log knows of no renewal. */
   pumpHours: z.number().nullable(),
   limitsTightened: z.boolean(),
   lowCheckStruck: z.boolean(),
   /** A *stop* written by hand that nothing has lifted yet. */
   stopAdvised: z.boolean(),
   hoseMaybeOff: z.boolean(),
+});
+
+/** A bike on the Line-up. */
+export const lineUpRowSchema = lineUpFactsSchema.extend({
+  owner: z.object({ id: z.string(), name: z.string() }),
 });
 export const lineUpResponseSchema = z.object({
   bikes: z.array(lineUpRowSchema),
@@ -152,4 +163,5 @@ export type MemberRoles = z.infer<typeof memberRolesSchema>;
 export type NewInvite = z.infer<typeof newInviteSchema>;
 export type Invite = z.infer<typeof inviteSchema>;
 export type LineUpPlace = (typeof lineUpOrder)[number];
+export type LineUpFacts = z.infer<typeof lineUpFactsSchema>;
 export type LineUpRow = z.infer<typeof lineUpRowSchema>;
