@@ -34,15 +34,20 @@ function StatusLine() {
   return (
     <p role="status" className="text-sm leading-tight text-soft">
       {statusWords(status)}
-      {status.phase === "signed-out" && (
-        <>
-          {" · "}
-          <Link to={patterns.signIn} className="font-bold text-oil underline">
-            Sign in to send
-          </Link>
-        </>
-      )}
+      {status.phase === "signed-out" && <WayOn to={patterns.signIn}>Sign in to send</WayOn>}
+      {status.refused > 0 && <WayOn to={patterns.account}>See which</WayOn>}
     </p>
+  );
+}
+
+function WayOn({ to, children }: { to: string; children: string }) {
+  return (
+    <>
+      {" · "}
+      <Link to={to} className="font-bold text-oil underline">
+        {children}
+      </Link>
+    </>
   );
 }
 

@@ -57,6 +57,8 @@ export function FieldNotes({ id, hint, error }: { id: string } & Omit<FieldWords
 export const boxClass =
   "min-h-target w-full min-w-0 rounded-card border border-edge bg-card text-ink aria-invalid:border-2 aria-invalid:border-low";
 export const controlClass = `${boxClass} px-3 text-xl`;
-/** A box for a number; `large` where it is the one figure of a screen. */
-export const numberClass = (large = false) =>
-  `${boxClass} px-1 text-center font-bold tabular-nums ${large ? "py-2 text-figure" : "text-2xl"}`;
+/** A box for a number; `large` where it is the one figure of a screen, which a long one must fit. */
+export function numberClass(large = false, text = ""): string {
+  const figure = text.length > 5 ? "text-figure-long" : "text-figure";
+  return `${boxClass} px-1 text-center font-bold tabular-nums ${large ? `py-2 ${figure}` : "text-2xl"}`;
+}

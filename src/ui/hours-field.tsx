@@ -64,7 +64,7 @@ function Part({ name, value, set, error, large }: PartProps) {
         value={value}
         onChange={(event) => set(event.target.value)}
         onFocus={(event) => event.target.select()}
-        className={numberClass(large)}
+        className={numberClass(large, value)}
       />
       <span className="text-center text-soft">{name}</span>
     </label>

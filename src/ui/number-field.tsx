@@ -43,7 +43,7 @@ function StepperInput(props: NumberInput & { label: string; wiring: FieldWiring 
           value={value}
           onChange={(event) => onChange(event.target.value)}
           onFocus={(event) => event.target.select()}
-          className={`${numberClass(large)} h-full`}
+          className={`${numberClass(large, value)} h-full`}
         />
         {unit && (
           <span className="pointer-events-none absolute inset-y-0 right-3 flex items-center text-soft">

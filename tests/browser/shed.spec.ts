@@ -1,14 +1,6 @@
 import { bikeEntry, checkEntry, hoursEntry, newId } from "../helpers/make-entry.ts";
-import { expect, expectAccessible, Rider, signUp, test } from "./fixtures.ts";
+import { expect, expectAccessible, signIn, signUp, test } from "./fixtures.ts";
 import type { Page } from "@playwright/test";
-
-async function signIn(page: Page, email: string): Promise<void> {
-  await page.goto("/sign-in");
-  await page.getByLabel("E-mail").fill(email);
-  await page.getByLabel("Password", { exact: true }).fill(Rider.password);
-  await page.getByRole("button", { name: "Sign in" }).click();
-  await expect(page).toHaveURL("/");
-}
 
 const card = (page: Page, name: string) => page.getByRole("region", { name });
 const daysAgo = (days: number) => new Date(Date.now() - days * 86_400_000).toISOString();
@@ -60,8 +52,9 @@ test("A rider is told that a reading does not fit, saves it all the same and con
   await moss.getByRole("button", { name: "Log hours" }).click();
   await page.getByRole("textbox", { name: "Engine hours" }).fill("160");
   await expect(page.getByText("more hours than have passed")).toBeVisible();
+  await expectAccessible(page);
   await page.getByRole("button", { name: "Save hours" }).click();
-  await expect(moss).toContainText("160.0 h?");
+  await expect(moss).toContainText("Does the meter show 160.0 h?");
   await expect(moss).toContainText("16.0 h to the next check");
 
   await moss.getByRole("button", { name: "Yes, the meter shows this" }).click();

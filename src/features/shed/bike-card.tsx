@@ -23,7 +23,7 @@ export function BikeCard({ bike }: { bike: ShedBike }) {
   const { bikeId, details, summary, unsent, hoseMaybeOff, checkOpen } = bike;
   const checkFirst = summary.due.inHours <= 0;
   return (
-    <Card aria-labelledby={`bike-${bikeId}`} className="flex h-full flex-col gap-3">
+    <Card aria-labelledby={`bike-${bikeId}`} className="flex flex-col gap-3">
       <h2 id={`bike-${bikeId}`} className="border-b border-rule pb-2 text-xl">
         <Link
           to={bikePath(bikeId)}
@@ -56,7 +56,7 @@ export function BikeCard({ bike }: { bike: ShedBike }) {
         </Suspense>
       )}
       <div role="status">{unsent > 0 && <EntryStateMark state="saved" />}</div>
-      <div className="mt-auto flex flex-wrap gap-2">
+      <div className="flex flex-wrap gap-2">
         <Button
           look={checkFirst ? "quiet" : "primary"}
           className="flex-auto"

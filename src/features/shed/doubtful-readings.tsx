@@ -24,8 +24,9 @@ function DoubtfulReadingNotice({ bike, reading }: { bike: BikeRecord; reading: D
       body: { confirms: reading.entryId },
     });
   });
+  const shown = `${formatHours(hours, bike.details.meterFormat)}\u00a0h`;
   return (
-    <Notice tone="caution" title={`${formatHours(hours, bike.details.meterFormat)} h?`}>
+    <Notice tone="caution" title={`Does the meter show ${shown}?`}>
       <p>{doubtWords[reading.why]} It is kept, and does not count until you confirm it.</p>
       {problem && <p className="font-bold text-low">{problem}</p>}
       <Button disabled={busy} onClick={() => void submit()}>

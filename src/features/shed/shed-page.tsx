@@ -23,7 +23,7 @@ export function ShedPage() {
   return (
     <Page title="Shed" wide>
       {error && <Notice tone="error" title={error.message} />}
-      <ul className="grid gap-4 grid-cols-[repeat(auto-fill,minmax(min(20rem,100%),1fr))]">
+      <ul className="grid items-start gap-4 grid-cols-[repeat(auto-fill,minmax(min(20rem,100%),1fr))]">
         {riding.map((bike) => (
           <li key={bike.bikeId}>
             <BikeCard bike={bike} />
