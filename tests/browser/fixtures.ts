@@ -153,6 +153,14 @@ export async function signUp(page: Page, email: string, name = "Wren"): Promise<
   await expect(page).toHaveURL("/");
 }
 
+export async function signIn(page: Page, email: string): Promise<void> {
+  await page.goto("/sign-in");
+  await page.getByLabel("E-mail").fill(email);
+  await page.getByLabel("Password", { exact: true }).fill(Rider.password);
+  await page.getByRole("button", { name: "Sign in" }).click();
+  await expect(page).toHaveURL("/");
+}
+
 /** No violation of axe's rules on the page as it stands. */
 export async function expectAccessible(page: Page): Promise<void> {
   const { violations } = await new AxeBuilder({ page }).analyze();
