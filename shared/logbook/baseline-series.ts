@@ -41,7 +41,8 @@ const isSame = (a: Sequence, b: Sequence) => a.seconds === b.seconds && a.rhythm
 
 const startsSeries = (entry: LogEntry) => entry.kind === "work" && entry.body.startsSeries;
 
-function measured(
+/** A check with its delivery; null where it holds nothing to count. */
+export function measuredCheck(
   entry: LogEntryOf<"check">,
   sequence: Sequence | null,
   hours: LifetimeHours,
@@ -105,7 +106,7 @@ export function baselineSeries(standing: readonly LogEntry[], hours: LifetimeHou
         entry.body.items.some((item) => RESETTING_WORK.includes(item)),
       );
     if (entry.kind === "check") {
-      const check = measured(entry, sequence, hours);
+      const check = measuredCheck(entry, sequence, hours);
       if (check && series.length === 0) start(entry, "first-check", true);
       const current = series.at(-1);
       if (check && current) addToSessions(current.sessions, check);

@@ -49,7 +49,7 @@ function worse(a: Judged, b: Judged): Judged {
 
 const isFaulty = ({ verdict }: Judged) => VERDICT_RANK[verdict] > VERDICT_RANK.holding;
 
-const volumeOf = (check: MeasuredCheck): Volume => ({
+export const volumeOf = (check: MeasuredCheck): Volume => ({
   perRunMl: check.delivery.perRunMl,
   uMl: check.delivery.uMl,
   uScaleMl: check.delivery.uScaleMl,

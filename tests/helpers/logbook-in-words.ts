@@ -1,4 +1,5 @@
 import type {
+  Action,
   BikePatch,
   CheckBody,
   EntryBody,
@@ -63,7 +64,7 @@ export function logbook(start = "2026-03-01T09:00:00.000Z") {
       add("work", hours, { items, startsSeries }, at),
     meter: (oldHours: number | null, newReading: number, at?: string) =>
       add("meter", oldHours, { newReading }, at),
-    note: (text: string) => add("note", null, { text }),
+    note: (text: string, advice?: Action) => add("note", null, { text, ...(advice && { advice }) }),
     strike: (entryId: string, reason = "Wrong bike") => add("strike", null, { entryId, reason }),
   };
   return book;
