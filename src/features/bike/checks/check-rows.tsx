@@ -16,14 +16,14 @@ interface Props {
 /** A check in figures, and under it what has to be said of it. */
 export function CheckRows({ point, meterFormat }: Props) {
   const { at, atHours, hoursCount, perRunMl, uMl, ratio, uRatio, verdict, flags } = point;
-  const figures = `py-2 pr-3 align-top tabular-nums ${verdict ? "" : "text-soft line-through"}`;
+  const figures = `py-2 pr-2 align-top tabular-nums ${verdict ? "" : "text-soft line-through"}`;
   return (
     <>
       <tr className="border-t border-rule">
         <th scope="row" className={`${figures} font-bold`}>
           {formatHours(atHours, meterFormat)}
           {!hoursCount && "?"}
-          <Small>{formatDay(at)}</Small>
+          <span className="block text-sm font-normal">{formatDay(at)}</span>
         </th>
         <td className={figures}>
           {formatMl(perRunMl)}

@@ -25,13 +25,13 @@ export function CheckTable({ history, meterFormat }: Props) {
       <table className="w-full border-collapse text-left [overflow-wrap:normal]">
         <thead className="text-soft">
           <tr>
-            <th scope="col" className="py-1 pr-3 font-normal">
+            <th scope="col" className="py-1 pr-2 font-normal">
               Hours
             </th>
-            <th scope="col" className="py-1 pr-3 font-normal">
+            <th scope="col" className="py-1 pr-2 font-normal">
               Delivery a run
             </th>
-            <th scope="col" className="py-1 pr-3 font-normal">
+            <th scope="col" className="py-1 pr-2 font-normal">
               Of baseline
             </th>
             <th scope="col" className="py-1 font-normal">

@@ -2,6 +2,7 @@ import type { BikeDetails } from "../../../../shared/logbook/bike-details.ts";
 import type { BikePatch } from "../../../../shared/schemas/entry.ts";
 import { bikeFormOf, readBikeForm, type BikeForm } from "../../../ui/bike-form.ts";
 import { parseDecimal } from "../../../ui/parse-decimal.ts";
+import { percentText } from "../percent-text.ts";
 
 /** The bike's form with its limits, which only a bike in use has reason to tighten. */
 export interface DetailsForm extends BikeForm {
@@ -9,8 +10,6 @@ export interface DetailsForm extends BikeForm {
   watchPercent: string;
   actPercent: string;
 }
-
-const percentText = (fraction: number) => String(Number((100 * fraction).toFixed(2)));
 
 export function detailsFormOf(details: BikeDetails): DetailsForm {
   return {

@@ -10,6 +10,7 @@ import { formatMl, formatTemperature } from "../../../ui/format-quantity.ts";
 import { sequenceWords } from "../../../ui/sequence-words.ts";
 import { spoilerWords } from "../../../ui/spoiler-words.ts";
 import { actionWords } from "../../../ui/words.ts";
+import { percentText } from "../percent-text.ts";
 import { workWords } from "../../../ui/work-words.ts";
 
 const sentence = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
@@ -107,9 +108,6 @@ export function patchFacts(patch: BikePatch): string[] {
     retired !== undefined && (retired ? "Retired" : "Brought back"),
   );
 }
-
-/** 0.075 is 7.5 %: one decimal where there is one. */
-export const percentText = (fraction: number) => String(Number((100 * fraction).toFixed(1)));
 
 const screenWords = (hasScreen: boolean | null) =>
   hasScreen === null ? "not known" : hasScreen ? "yes" : "no";

@@ -1,7 +1,12 @@
 import { standingEntries } from "../../../../shared/logbook/standing-entries.ts";
-import { entryKinds, type EntryKind, type LogEntryOf } from "../../../../shared/schemas/entry.ts";
+import {
+  entryKinds,
+  type EntryKind,
+  type LogEntry,
+  type LogEntryOf,
+} from "../../../../shared/schemas/entry.ts";
 import type { BikeRecord, KeptEntry } from "../../../offline/index.ts";
-import { countedEntries } from "../counted-entries.ts";
+import { isRefusedForGood } from "../counted-entries.ts";
 
 export interface LogLine {
   kept: KeptEntry;
@@ -13,9 +18,15 @@ export interface LogLine {
   canStrike: boolean;
 }
 
+/** A refused entry may be struck out of sight; a strike that was refused strikes nothing. */
+function heeded(kept: KeptEntry): LogEntry[] {
+  if (!kept.understood) return [];
+  return kept.entry.kind === "strike" && isRefusedForGood(kept) ? [] : [kept.entry];
+}
+
 /** The lines of a log, newest first, each with what its neighbours say of it. */
 export function logLines(record: BikeRecord, log: readonly KeptEntry[]): LogLine[] {
-  const { struck } = standingEntries(record.ownerId, countedEntries(log));
+  const { struck } = standingEntries(record.ownerId, log.flatMap(heeded));
   const byId = new Map(log.map((kept) => [kept.entry.id, kept]));
   const strikes = new Map<string, LogEntryOf<"strike">>();
   for (const kept of log) {
