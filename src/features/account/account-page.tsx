@@ -12,8 +12,11 @@ export default function AccountPage() {
   const account = useAccount();
   if (!account) return null;
   return (
-    <Page title={account.name} back={{ to: patterns.shed, label: "Shed" }}>
-      <p className="-mt-3 mb-2 text-soft">{account.email}</p>
+    <Page title="Account" back={{ to: patterns.shed, label: "Shed" }}>
+      <p>
+        <span className="block text-xl font-bold wrap-anywhere">{account.name}</span>
+        <span className="text-soft wrap-anywhere">{account.email}</span>
+      </p>
       <ThemeChoice />
       <section className="flex flex-col gap-2 border-t border-rule pt-4">
         <h2 className="text-xl">Syringes</h2>
