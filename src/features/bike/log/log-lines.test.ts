@@ -53,7 +53,7 @@ describe("logLines", () => {
   it("heeds no strike that the server refused for good", () => {
     const log = newestFirst(book.entries).map((one) =>
       one.entry.kind === "strike"
-        ? ({ ...one, state: "refused", reason: "invalid" } as KeptEntry)
+        ? ({ ...one, state: "refused", reason: "invalid" })
         : one,
     );
     expect(logLines(record(), log).every(({ struckBy }) => struckBy === null)).toBe(true);
@@ -62,7 +62,7 @@ describe("logLines", () => {
   it("rules through a refused entry that was written anew", () => {
     const log = newestFirst(book.entries).map((one) =>
       one.entry.id === struckId
-        ? ({ ...one, state: "refused", reason: "id-taken" } as KeptEntry)
+        ? ({ ...one, state: "refused", reason: "id-taken" })
         : one,
     );
     const refused = logLines(record(), log).find((one) => one.kept.entry.id === struckId);
@@ -71,7 +71,7 @@ describe("logLines", () => {
 
   it("keeps an entry of a newer version, which nobody can strike", () => {
     const photo = { ...book.entries[1]!, kind: "photo", v: 2 };
-    const log = [kept(photo as never, { understood: false } as Partial<KeptEntry>)];
+    const log = [kept(photo as never, { understood: false })];
     expect(logLines(record(), log)).toMatchObject([{ canStrike: false, struckBy: null }]);
     expect(kindsIn(logLines(record(), log))).toEqual([]);
   });
