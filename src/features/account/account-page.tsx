@@ -35,7 +35,7 @@ function ThemeChoice() {
     <Choice
       label="Light or dark"
       options={[
-        { value: "system", label: "Automatic" },
+        { value: "system", label: "System" },
         { value: "light", label: "Light" },
         { value: "dark", label: "Dark" },
       ]}
