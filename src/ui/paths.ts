@@ -11,8 +11,8 @@ export const patterns = {
   signIn: "/sign-in",
   signUp: "/sign-up",
   forgot: "/forgot",
-  reset: "/reset-password",
-  verify: "/verify-email",
+  reset: "/reset",
+  verify: "/verify",
 } as const;
 
 export const bikePath = (bikeId: string) => `/bikes/${bikeId}`;
