@@ -35,14 +35,12 @@ export class ProductServer {
       env: { ...environment, LOG_LEVEL: "error" },
       stdio: ["ignore", "ignore", "inherit"],
     });
-    await expect
-      .poll(() =>
-        fetch(`${this.origin}/api/health`).then(
-          (answer) => answer.ok,
-          () => false,
-        ),
-      )
-      .toBe(true);
+    const isUp = () =>
+      fetch(`${this.origin}/api/health`).then(
+        (answer) => answer.ok,
+        () => false,
+      );
+    await expect.poll(isUp, { timeout: 30_000 }).toBe(true);
   }
 
   async stop(): Promise<void> {
