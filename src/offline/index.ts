@@ -16,7 +16,7 @@ export {
   whenUpdatesFree,
 } from "./hold-updates.ts";
 export { useBike, useBikes, useUnsent } from "./logbook-queries.ts";
-export { CHECK_FORM, useOpenChecks, type OpenCheck } from "./open-checks.ts";
+export { CHECK_FORM, isHoseMaybeOff, useOpenChecks, type OpenCheck } from "./open-checks.ts";
 export { createReadCache, type ReadCache } from "./query-cache.ts";
 export { previewSummary, saveEntry, type SaveOptions } from "./save-entry.ts";
 export { storageHealth, useStorageHealth } from "./storage-health.ts";

@@ -12,7 +12,8 @@ export interface OpenCheck {
   savedAt: string;
 }
 
-const isHoseMaybeOff = (content: unknown) =>
+/** Whether a check's draft, of whatever version of the app, says that the hose may be off. */
+export const isHoseMaybeOff = (content: unknown) =>
   (content as { hoseMaybeOff?: unknown } | null)?.hoseMaybeOff === true;
 
 const asOpenCheck = ({ bikeId, content, savedAt }: Draft): OpenCheck => ({

@@ -10,7 +10,6 @@ import { furthestStep, stepPaths } from "./check-paths.ts";
 import { abandoned, readRuns } from "./draft/check-draft.ts";
 import type { CheckDraft } from "./draft/check-draft-schema.ts";
 import { useBeginCheck } from "./draft/use-begin-check.ts";
-import { useHoseMaybeOff } from "./draft/use-hose-maybe-off.ts";
 import { useOpenDraft } from "./draft/use-open-draft.ts";
 import { GiveUpSheet } from "./give-up-sheet.tsx";
 
@@ -18,10 +17,9 @@ import { GiveUpSheet } from "./give-up-sheet.tsx";
 export function StartPage({ bike: { record, log } }: { bike: BikeWithLog }) {
   const { bikeId, details, summary } = record;
   const paths = stepPaths(bikeId);
-  const { ready, open, set } = useOpenDraft(record);
-  const begin = useBeginCheck({ record, log }, set);
+  const { ready, open, set, hoseMaybeOff } = useOpenDraft(record);
+  const begin = useBeginCheck({ record, log }, { set, hoseMaybeOff });
   const [givingUp, setGivingUp] = useState(false);
-  const hoseMaybeOff = useHoseMaybeOff(record);
   if (!ready) return <main className="flex-1" aria-busy />;
   return (
     <Page

@@ -6,7 +6,6 @@ import { cautionsRead } from "../cautions-read.ts";
 import { stepPaths } from "../check-paths.ts";
 import { beginCheck } from "./check-draft.ts";
 import type { CheckDraft } from "./check-draft-schema.ts";
-import { useHoseMaybeOff } from "./use-hose-maybe-off.ts";
 
 /** The syringe of the bike's last check, while it is in use; or else the one used last. */
 export function usualSyringe(log: BikeWithLog["log"], syringes: Syringe[]): Syringe | null {
@@ -21,11 +20,10 @@ export function usualSyringe(log: BikeWithLog["log"], syringes: Syringe[]): Syri
 /** Begins a check with all that is known, and goes to its first step. */
 export function useBeginCheck(
   { record, log }: BikeWithLog,
-  set: (draft: CheckDraft) => void,
+  { set, hoseMaybeOff }: { set: (draft: CheckDraft) => void; hoseMaybeOff: boolean },
 ): () => void {
   const { data: syringes = [] } = useSyringes();
   const accountId = useAccount()?.id ?? "";
-  const hoseMaybeOff = useHoseMaybeOff(record);
   const navigate = useNavigate();
   const paths = stepPaths(record.bikeId);
   return () => {

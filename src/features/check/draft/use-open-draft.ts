@@ -1,4 +1,4 @@
-import { CHECK_FORM, type BikeRecord } from "../../../offline/index.ts";
+import { CHECK_FORM, isHoseMaybeOff, type BikeRecord } from "../../../offline/index.ts";
 import { parseHours } from "../../../ui/parse-hours.ts";
 import { stepPaths } from "../check-paths.ts";
 import type { OpenCheckContext } from "../open-check.ts";
@@ -7,10 +7,15 @@ import { checkDraftSchema, type CheckDraft } from "./check-draft-schema.ts";
 import { planCheck } from "./plan-check.ts";
 import { useLiveDraft, type LiveDraft } from "./use-live-draft.ts";
 
-/** The bike's guided check in progress with all that follows from it; `open` is null without one. */
+/**
+ * The bike's guided check in progress with all that follows from it; `open` is null without one.
+ * `hoseMaybeOff`: a check was saved, left or given up without its close-out.
+ */
 export function useOpenDraft(record: BikeRecord) {
   const live = useLiveDraft(record.bikeId, CHECK_FORM, checkDraftSchema);
-  return { ...live, open: live.draft && openCheck(record, live.draft, live) };
+  const hoseMaybeOff =
+    record.summary.flags.includes("not-closed-out") || isHoseMaybeOff(live.stored);
+  return { ...live, hoseMaybeOff, open: live.draft && openCheck(record, live.draft, live) };
 }
 
 type Live = LiveDraft<CheckDraft>;

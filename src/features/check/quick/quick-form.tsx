@@ -2,6 +2,7 @@ import { useState } from "react";
 import { useNavigate } from "react-router-dom";
 import type { BikeRecord, Syringe } from "../../../offline/index.ts";
 import { Button } from "../../../ui/button.tsx";
+import { Notice } from "../../../ui/notice.tsx";
 import { Page } from "../../../ui/page.tsx";
 import { TextArea } from "../../../ui/text-area.tsx";
 import { Tick } from "../../../ui/tick.tsx";
@@ -13,7 +14,7 @@ import { saveCheck } from "../draft/save-check.ts";
 import type { LiveDraft } from "../draft/use-live-draft.ts";
 import { HoursPart } from "../hours-part.tsx";
 import { OilTempField } from "../oil-temp-field.tsx";
-import { ProblemList } from "../problem-list.tsx";
+import { UnkeptNotice } from "../unkept-notice.tsx";
 import { LiveResult } from "./live-result.tsx";
 import {
   closeOutAll,
@@ -61,13 +62,19 @@ export function QuickForm({ record, live, begin, syringes }: Props) {
       back={{ to: paths.start, label: "Delivery check" }}
       action={
         <>
-          <ProblemList errors={shown} problem={problem} />
+          {problem && <Notice tone="error" title={problem} />}
+          {Object.keys(shown).length > 0 && (
+            <p role="alert" className="font-bold text-low">
+              Not saved yet: look at what is marked above.
+            </p>
+          )}
           <Button look="primary" wide disabled={busy} onClick={() => void submit()}>
             Save the check
           </Button>
         </>
       }
     >
+      <UnkeptNotice unkept={live.unkept} />
       <CautionsLine />
       {resumed && live.draft && (
         <ResumedNotice
@@ -86,6 +93,7 @@ export function QuickForm({ record, live, begin, syringes }: Props) {
       />
       <QuickRuns draft={draft} edit={edit} errors={shown} />
       <OilTempField
+        baselineC={record.summary.series.at(-1)?.baseline?.oilTempC ?? null}
         value={draft.oilTempText}
         onChange={(oilTempText) => patch({ oilTempText })}
         error={shown.oilTemp}

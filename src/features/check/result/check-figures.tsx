@@ -27,11 +27,11 @@ export function CheckFigures({ summary, check, body, sequence }: Props) {
   return (
     <dl className="flex flex-col gap-2 text-lg">
       <Figure name="Delivery a run">
-        <strong className="text-2xl">{formatMlGiveOrTake(perRunMl, uMl)}</strong>
+        <strong className="text-[min(1.5rem,9vw)]">{formatMlGiveOrTake(perRunMl, uMl)}</strong>
       </Figure>
       {ratio !== null && uRatio !== null && (
         <Figure name="Of baseline">
-          <strong className="text-2xl">
+          <strong className="text-[min(1.5rem,9vw)]">
             {formatPercent(ratio)} ± {formatPercent(GIVE_OR_TAKE * uRatio)}
           </strong>
         </Figure>

@@ -4,7 +4,11 @@ import { CautionIcon } from "../../../ui/icons.tsx";
 import { spoilerWords } from "../../../ui/spoiler-words.ts";
 
 /** Said by the page itself, with what to do about it. */
-const saidElsewhere: readonly string[] = ["not-closed-out", "spoiled"] satisfies FlagCode[];
+const saidElsewhere: readonly string[] = [
+  "not-closed-out",
+  "spoiled",
+  "baseline-cannot-settle",
+] satisfies FlagCode[];
 
 const isFlag = (flag: string): flag is FlagCode => flag in flagSentences;
 

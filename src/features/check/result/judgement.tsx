@@ -13,6 +13,8 @@ interface Props {
   details: BikeRecord["details"];
   summary: Summary;
   check: CheckSummary;
+  /** All that has to be said beside the numbers. */
+  flags: readonly string[];
   body: CheckBody;
   /** Nothing is said of riding while the engine must not be started. */
   hoseMaybeOff: boolean;
@@ -21,7 +23,7 @@ interface Props {
 }
 
 /** What one check says: the action first, then the verdict and how sure it is, then the numbers. */
-export function Judgement({ details, summary, check, body, hoseMaybeOff, fills }: Props) {
+export function Judgement({ details, summary, check, flags, body, hoseMaybeOff, fills }: Props) {
   const certainty = certaintySentence(check);
   const sayAction = check.action !== "ride" || !hoseMaybeOff;
   return (
@@ -41,7 +43,7 @@ export function Judgement({ details, summary, check, body, hoseMaybeOff, fills }
         </div>
         <div className="flex min-w-0 flex-[1_1_14rem] flex-col gap-4">
           <CheckFigures summary={summary} check={check} body={body} sequence={details.sequence} />
-          <CheckFlags flags={check.flags} spoilers={body.spoilers ?? []} />
+          <CheckFlags flags={flags} spoilers={body.spoilers ?? []} />
         </div>
       </div>
     </>

@@ -1,6 +1,6 @@
 import { useParams } from "react-router-dom";
-import { flagSentences } from "../../../../shared/delivery/flags.ts";
-import type { LogEntryOf } from "../../../../shared/schemas/entry.ts";
+import { measureDelivery } from "../../../../shared/delivery/measure-delivery.ts";
+import type { CheckBody, LogEntryOf, Sequence } from "../../../../shared/schemas/entry.ts";
 import type { BikeWithLog, KeptEntry } from "../../../offline/index.ts";
 import { ButtonLink } from "../../../ui/button-link.tsx";
 import { EntryStateMark } from "../../../ui/entry-state-mark.tsx";
@@ -9,7 +9,7 @@ import { Notice } from "../../../ui/notice.tsx";
 import { Page } from "../../../ui/page.tsx";
 import { bikePath, patterns } from "../../../ui/paths.ts";
 import { stepPaths } from "../check-paths.ts";
-import { useHoseMaybeOff } from "../draft/use-hose-maybe-off.ts";
+import { useOpenDraft } from "../draft/use-open-draft.ts";
 import { CheckFlags } from "./check-flags.tsx";
 import { Judgement } from "./judgement.tsx";
 import { NextDue } from "./next-due.tsx";
@@ -30,7 +30,7 @@ interface Props {
 export function ResultPage({ bike: { record, log }, reading }: Props) {
   const { entryId } = useParams();
   const { bikeId, details, summary } = record;
-  const hoseMaybeOff = useHoseMaybeOff(record);
+  const { hoseMaybeOff } = useOpenDraft(record);
   const line = log.filter(isCheck).find(({ entry }) => entry.id === entryId);
   const check = summary.checks.find((one) => one.entryId === entryId);
   const back = { to: bikePath(bikeId), label: details.name };
@@ -78,33 +78,35 @@ export function ResultPage({ bike: { record, log }, reading }: Props) {
           details={details}
           summary={summary}
           check={check}
+          flags={isLast ? [...check.flags, ...summary.flags] : check.flags}
           body={entry.body}
           hoseMaybeOff={hoseMaybeOff}
         />
       ) : (
-        <NotCounted entry={entry} />
+        <NotCounted body={entry.body} sequence={details.sequence} />
       )}
       {check && isLast && (check.action !== "ride" || check.verdict === "dropping") && (
-        <WhatNext record={record} checkHours={entry.hours} />
+        <WhatNext record={record} check={entry} />
       )}
       <NextDue summary={summary} details={details} />
     </Page>
   );
 }
 
-/** A check of which no run counts, or that was struck since. */
-function NotCounted({ entry }: { entry: LogEntryOf<"check"> }) {
+interface NotCountedProps {
+  body: CheckBody;
+  sequence: Sequence | null;
+}
+
+/** A check of which no run counts, or one that was struck or refused since. */
+function NotCounted({ body, sequence }: NotCountedProps) {
+  const { delivery, flags } = measureDelivery(body, sequence);
   return (
     <>
       <Notice tone="caution" title="This check does not count">
-        <p>
-          {entry.body.runs.every((run) => run.void)
-            ? "All its runs are void."
-            : flagSentences["nothing-to-count"]}{" "}
-          It stays in the log.
-        </p>
+        <p>{delivery && "It was struck, or not accepted. "}It stays in the log.</p>
       </Notice>
-      <CheckFlags flags={[]} spoilers={entry.body.spoilers ?? []} />
+      <CheckFlags flags={flags} spoilers={body.spoilers ?? []} />
     </>
   );
 }

@@ -1,5 +1,6 @@
 import { useState } from "react";
 import { z } from "zod";
+import type { LogEntryOf } from "../../../../shared/schemas/entry.ts";
 import { saveEntry, type BikeRecord } from "../../../offline/index.ts";
 import { Button } from "../../../ui/button.tsx";
 import { TickGroup } from "../../../ui/tick-group.tsx";
@@ -12,19 +13,24 @@ import { Premix } from "./premix.tsx";
 
 /** The form under which the ticks are kept until they are written down. */
 const FORM = "causes";
-const draftSchema = z.object({ ids: z.array(z.string()), startsSeries: z.boolean().nullable() });
+const draftSchema = z.object({
+  entryId: z.string(),
+  ids: z.array(z.string()),
+  startsSeries: z.boolean().nullable(),
+});
 
 interface Props {
   record: BikeRecord;
-  /** What the meter showed at the check. */
-  checkHours: number;
+  check: LogEntryOf<"check">;
 }
 
 /** Where to look for the cause, in order; what was done becomes one entry of work. */
-export function WhatNext({ record, checkHours }: Props) {
+export function WhatNext({ record, check }: Props) {
   const { bikeId, summary } = record;
   const live = useLiveDraft(bikeId, FORM, draftSchema);
-  const { ids, startsSeries } = live.draft ?? { ids: [], startsSeries: null };
+  // What was ticked after an earlier check, and never written down, is of that check.
+  const nothing = { entryId: check.id, ids: [], startsSeries: null };
+  const { ids, startsSeries } = live.draft?.entryId === check.id ? live.draft : nothing;
   const resets = chosenCauses(ids).some((cause) => cause.resets);
   const [written, setWritten] = useState(false);
   const { now, displayOffset } = summary.hours;
@@ -35,7 +41,7 @@ export function WhatNext({ record, checkHours }: Props) {
         bikeId,
         kind: "work",
         at: new Date().toISOString(),
-        hours: now === null ? checkHours : now - displayOffset,
+        hours: now === null ? check.hours : now - displayOffset,
         body: workBody(ids, resets && (startsSeries ?? true)),
       },
       { draft: { bikeId, form: FORM } },
@@ -56,10 +62,13 @@ export function WhatNext({ record, checkHours }: Props) {
           label: `${index + 1}. ${line}`,
         }))}
         chosen={ids}
-        onChange={(chosen) => live.set({ ids: chosen, startsSeries })}
+        onChange={(chosen) => live.set({ entryId: check.id, ids: chosen, startsSeries })}
       />
       {resets && (
-        <Tick checked={startsSeries ?? true} onChange={(on) => live.set({ ids, startsSeries: on })}>
+        <Tick
+          checked={startsSeries ?? true}
+          onChange={(on) => live.set({ entryId: check.id, ids, startsSeries: on })}
+        >
           <strong>Start a new baseline:</strong> the pump gives something else from here on
         </Tick>
       )}

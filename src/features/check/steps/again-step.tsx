@@ -8,12 +8,12 @@ import { OneMoreRun } from "./one-more-run.tsx";
 import { RunList } from "./run-list.tsx";
 import { RunsNeeded } from "./runs-needed.tsx";
 import { StepProgress } from "./step-progress.tsx";
-import { UnkeptNotice } from "./unkept-notice.tsx";
+import { UnkeptNotice } from "../unkept-notice.tsx";
 import { useRun } from "./use-run.ts";
 
 /** What the runs say so far, and whether one more is worth it. */
 export function AgainStep() {
-  const { n, exists, run, draft, paths, plan } = useRun();
+  const { n, exists, run, draft, paths, plan, unkept } = useRun();
   if (!exists || n > draft.runs.length) return <Navigate to={furthestStep(paths, draft)} replace />;
   const read = readRuns(draft).length;
   const enough = plan.runs !== null && read >= plan.runs;
@@ -41,7 +41,7 @@ export function AgainStep() {
       }
     >
       <StepProgress at="Again or done" />
-      <UnkeptNotice />
+      <UnkeptNotice unkept={unkept} />
       <RunList />
       <FoundSequence n={n} />
       <OneMoreRun />

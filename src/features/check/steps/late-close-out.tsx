@@ -1,6 +1,5 @@
 import { useState } from "react";
 import { useNavigate } from "react-router-dom";
-import { z } from "zod";
 import { CHECK_FORM, saveEntry, type BikeRecord } from "../../../offline/index.ts";
 import { Button } from "../../../ui/button.tsx";
 import { formatHours } from "../../../ui/format-hours.ts";
@@ -12,13 +11,9 @@ import { bikePath } from "../../../ui/paths.ts";
 import { FieldErrors, useSubmit } from "../../../ui/use-submit.ts";
 import { CloseOutTicks } from "../close-out-ticks.tsx";
 import { isClosedOut } from "../draft/check-draft.ts";
-import { closeOutItems } from "../draft/check-draft-schema.ts";
-import { draftsWritten, useLiveDraft } from "../draft/use-live-draft.ts";
+import type { CloseOutItem } from "../draft/check-draft-schema.ts";
+import { draftsWritten } from "../draft/use-live-draft.ts";
 import { ProblemList } from "../problem-list.tsx";
-
-const ticksSchema = z.array(z.enum(closeOutItems));
-/** The form under which the ticks are kept until all are there. */
-const FORM = "close-out";
 
 interface Props {
   record: BikeRecord;
@@ -29,8 +24,8 @@ interface Props {
 export function LateCloseOut({ record, onClosed }: Props) {
   const { bikeId, details, summary } = record;
   const { now, displayOffset } = summary.hours;
-  const live = useLiveDraft(bikeId, FORM, ticksSchema);
-  const done = live.draft ?? [];
+  // Not kept over a reload: an old tick must never stand for what was not looked at today.
+  const [done, setDone] = useState<CloseOutItem[]>([]);
   const [hours, setHours] = useState(() =>
     now === null ? "" : formatHours(now - displayOffset, details.meterFormat),
   );
@@ -56,7 +51,6 @@ export function LateCloseOut({ record, onClosed }: Props) {
       { draft: { bikeId, form: CHECK_FORM } },
     );
     onClosed();
-    live.set(null);
     await navigate(bikePath(bikeId), { replace: true });
   });
   return (
@@ -72,7 +66,7 @@ export function LateCloseOut({ record, onClosed }: Props) {
       <Notice tone="error" title="Hose may be off: do not start">
         <p>A check was left without its close-out. This goes when all five are ticked and saved.</p>
       </Notice>
-      <CloseOutTicks chosen={done} onChange={live.set} />
+      <CloseOutTicks chosen={done} onChange={setDone} />
       <HoursField
         label="Engine hours"
         error={errors.hours}

@@ -21,7 +21,7 @@ export function OneMoreRun() {
     <div className="flex flex-col gap-2">
       <p className="text-lg">
         Mean{" "}
-        <strong className="block text-4xl tabular-nums">
+        <strong className="block text-[min(2.25rem,9vw)] tabular-nums">
           {formatMlGiveOrTake(statistics.meanMl, uMl)}
         </strong>
         {statistics.count > 1 && `The runs lie ${formatMl(statistics.spreadMl)} apart. `}

@@ -11,7 +11,7 @@ import { levelErrors } from "../draft/level-errors.ts";
 import { SpoilerTicks } from "../spoiler-ticks.tsx";
 import { LevelField } from "./level-field.tsx";
 import { StepProgress } from "./step-progress.tsx";
-import { UnkeptNotice } from "./unkept-notice.tsx";
+import { UnkeptNotice } from "../unkept-notice.tsx";
 import { useRun } from "./use-run.ts";
 import { useWakeLock } from "./use-wake-lock.ts";
 
@@ -28,7 +28,7 @@ const whileReading = [
 const unknownSyringe = { capacityMl: 5, graduationMl: 0.2 };
 
 export function ReadStep() {
-  const { n, exists, run, draft, change, paths, name } = useRun();
+  const { n, exists, run, draft, change, paths, name, unkept } = useRun();
   const navigate = useNavigate();
   const [tried, setTried] = useState(false);
   useWakeLock();
@@ -63,7 +63,7 @@ export function ReadStep() {
       }
     >
       <StepProgress at="Read" />
-      <UnkeptNotice />
+      <UnkeptNotice unkept={unkept} />
       <LevelField
         label="Level after the run"
         hint="Eye level with the oil, at the bottom of its curve; the hose clear of the oil."

@@ -1,7 +1,7 @@
 import type { ReactNode } from "react";
 import { Page } from "../../../ui/page.tsx";
 import { StepProgress } from "./step-progress.tsx";
-import { UnkeptNotice } from "./unkept-notice.tsx";
+import { UnkeptNotice } from "../unkept-notice.tsx";
 import { useRun } from "./use-run.ts";
 
 interface Props {
@@ -11,7 +11,7 @@ interface Props {
 
 /** The frame of every stage of a run. */
 export function RunPage({ action, children }: Props) {
-  const { n, name, paths } = useRun();
+  const { n, name, paths, unkept } = useRun();
   const back =
     n === 1
       ? { to: paths.setUp, label: "Set up" }
@@ -19,7 +19,7 @@ export function RunPage({ action, children }: Props) {
   return (
     <Page title={name} back={back} action={action}>
       <StepProgress at="Run" />
-      <UnkeptNotice />
+      <UnkeptNotice unkept={unkept} />
       {children}
     </Page>
   );

@@ -13,7 +13,7 @@ import { SequencePart } from "./sequence-part.tsx";
 import { SpoilerTicks } from "../spoiler-ticks.tsx";
 import { StepProgress } from "./step-progress.tsx";
 import { SyringePart } from "./syringe-part.tsx";
-import { UnkeptNotice } from "./unkept-notice.tsx";
+import { UnkeptNotice } from "../unkept-notice.tsx";
 
 /** Before a run these can still be put right. */
 const beforeRun = [
@@ -25,7 +25,7 @@ const beforeRun = [
 ] as const;
 
 export function SetUpStep() {
-  const { draft, change, paths, record } = useOpenCheck();
+  const { draft, change, paths, record, unkept } = useOpenCheck();
   const navigate = useNavigate();
   const [tried, setTried] = useState(false);
   const errors = tried ? setUpErrors(draft) : {};
@@ -44,7 +44,7 @@ export function SetUpStep() {
       }
     >
       <StepProgress at="Set up" />
-      <UnkeptNotice />
+      <UnkeptNotice unkept={unkept} />
       <CautionsLine />
       <SyringePart error={errors.syringe} />
       <RunsNeeded />
@@ -56,6 +56,7 @@ export function SetUpStep() {
       />
       <SequencePart />
       <OilTempField
+        baselineC={record.summary.series.at(-1)?.baseline?.oilTempC ?? null}
         value={draft.oilTempText}
         onChange={(oilTempText) => change((now) => ({ ...now, oilTempText }))}
         error={errors.oilTemp}

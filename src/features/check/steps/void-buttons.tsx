@@ -18,7 +18,7 @@ export function VoidButtons({ only = voidReasons }: { only?: readonly VoidReason
       {only.map((reason) => (
         <Button
           key={reason}
-          className="flex-1"
+          className="flex-1 px-2!"
           onClick={() => change((now) => voidRun(now, n, reason))}
         >
           {words[reason]}

@@ -1,0 +1,555 @@
+import type { Page } from "@playwright/test";
+import type { LogEntry } from "../../shared/schemas/entry.ts";
+import { syncResponseSchema } from "../../shared/schemas/sync.ts";
+import { bikeEntry, checkEntry, newId } from "../helpers/make-entry.ts";
+import { expect, expectAccessible, Rider, signUp, test } from "./fixtures.ts";
+
+const short = { seconds: 30, rhythm: "steady", nominalMl: 3 } as const;
+const daysAgo = (days: number) => new Date(Date.now() - days * 86_400_000).toISOString();
+
+async function signIn(page: Page, email: string): Promise<void> {
+  await page.goto("/sign-in");
+  await page.getByLabel("E-mail").fill(email);
+  await page.getByLabel("Password", { exact: true }).fill(Rider.password);
+  await page.getByRole("button", { name: "Sign in" }).click();
+  await expect(page).toHaveURL("/");
+}
+
+/** A bike whose sequence is known, with a baseline of 3 mL from four runs at 12.0 h. */
+async function withBaseline(page: Page, rider: Rider): Promise<string> {
+  const bikeId = newId();
+  const baseline = checkEntry(bikeId, 12, 3, daysAgo(40));
+  baseline.body.runs = Array.from({ length: 4 }, () => ({ startMl: 0, endMl: 3 }));
+  await rider.signUp();
+  await rider.push([bikeEntry(bikeId, { name: "Moss", sequence: short }), baseline]);
+  await signIn(page, rider.email);
+  await expect(page.getByRole("region", { name: "Moss" })).toBeVisible();
+  return bikeId;
+}
+
+/** Everything the app needs is on the phone: from here on it works with the server gone. */
+async function installed(page: Page): Promise<void> {
+  await page.evaluate(() => navigator.serviceWorker.ready);
+  await page.reload();
+  await expect
+    .poll(() => page.evaluate(() => navigator.serviceWorker.controller !== null))
+    .toBe(true);
+}
+
+const button = (page: Page, name: string | RegExp) => page.getByRole("button", { name });
+const link = (page: Page, name: string | RegExp) => page.getByRole("link", { name });
+const field = (page: Page, name: string) => page.getByRole("textbox", { name });
+const heading = (page: Page, name: string | RegExp) =>
+  page.getByRole("heading", { name, level: 1 });
+
+async function expectNoSidewaysScroll(page: Page): Promise<void> {
+  const [content = 0, screen = 0] = await page.evaluate(() => [
+    document.documentElement.scrollWidth,
+    window.innerWidth,
+  ]);
+  expect(content).toBeLessThanOrEqual(screen);
+}
+
+/** A step stands the same after the page is loaded anew, and axe finds nothing wrong with it. */
+async function expectStep(page: Page, title: string | RegExp): Promise<void> {
+  await expect(heading(page, title)).toBeVisible();
+  await page.reload();
+  await expect(heading(page, title)).toBeVisible();
+  await expectAccessible(page);
+  await expectNoSidewaysScroll(page);
+}
+
+/** One run of a known sequence: started, waited for and read. */
+async function runAndRead(page: Page, startMl: string, endMl: string): Promise<void> {
+  await field(page, "Level before the run").fill(startMl);
+  await button(page, /^Start$/).click();
+  await page.clock.runFor(61_000);
+  await link(page, "Read the level").click();
+  await field(page, "Level after the run").fill(endMl);
+  await button(page, "That is the level").click();
+}
+
+async function closeOut(page: Page): Promise<void> {
+  for (const tick of await page.getByRole("checkbox").all()) await tick.check();
+}
+
+/** The entries of the rider's one bike, as the server has them. */
+async function entriesOnServer(rider: Rider): Promise<LogEntry[]> {
+  const answer = await rider.call("POST", "/api/sync", { known: {}, entries: [] });
+  const { bikes } = syncResponseSchema.parse(await answer.json());
+  return (bikes[0]?.entries ?? []) as unknown as LogEntry[];
+}
+
+test("A rider can do a first check with no signal, reloading at every step", async ({
+  page,
+  rider,
+  server,
+}) => {
+  test.setTimeout(120_000);
+  await signUp(page, rider.email);
+  await link(page, "Add a bike").click();
+  await page.getByLabel("Name").fill("Heather");
+  await button(page, "Save the bike").click();
+  await expect(page.getByText(/^All sent/)).toBeVisible();
+  await installed(page);
+  await server.stop();
+  await page.clock.install();
+
+  await link(page, "Delivery check").click();
+  await expectStep(page, "Delivery check");
+  await button(page, "Start the guided check").click();
+  await expect(page.getByText("Never start the engine with the oil hose off")).toBeVisible();
+  await expectStep(page, "Before the first run");
+  await button(page, "I have read this: go on").click();
+
+  await button(page, "Go to run 1").click();
+  await expect(page.getByText("Choose the syringe you read from.")).toBeVisible();
+  await expect(page.getByText("Type the engine hours as the meter shows them.")).toBeVisible();
+  await button(page, "Add a syringe").click();
+  await expectAccessible(page);
+  await button(page, "Save the syringe").click();
+  await field(page, "Engine hours").fill("12,0");
+  await expectStep(page, "Set up");
+  await expect(field(page, "Engine hours")).toHaveValue("12,0");
+  await expect(page.getByRole("img", { name: /A 5 mL barrel/ })).toBeVisible();
+  await button(page, "Go to run 1").click();
+
+  await expectStep(page, "Run 1");
+  await button(page, /^Start$/).click();
+  await page.clock.runFor(12_000);
+  await expectStep(page, "Run 1");
+  await expect(page.getByRole("timer")).toContainText(/1[2-9]/);
+  await page.getByText("Steady").click();
+  await page.clock.runFor(18_000);
+  await button(page, "The ticking stopped").click();
+  await page.clock.runFor(5_000);
+  await expectStep(page, "Run 1");
+  await expect(page.getByRole("timer")).toContainText("wait for the last drops");
+  await page.clock.runFor(30_000);
+  await expectStep(page, "Run 1");
+  await link(page, "Read the level").click();
+
+  await expectStep(page, "Read the level, run 1");
+  await button(page, "Level up 1 mL").click();
+  await button(page, "Level up 1 mL").click();
+  await button(page, "Level up 1 mL").click();
+  await button(page, "Level down 0.1 mL").click();
+  await expect(field(page, "Level after the run")).toHaveValue("2.9");
+  await expectStep(page, "Read the level, run 1");
+  await button(page, "That is the level").click();
+
+  await expectStep(page, "1 run read");
+  await page.getByText("A usual kind").click();
+  await expectStep(page, "1 of 2 runs read");
+  await expect(page.getByText(/One more run like this would make it/)).toBeVisible();
+  await link(page, "One more run").click();
+
+  await expect(page.getByText(/there is no room for one more run/)).toBeVisible();
+  await field(page, "Level before the run").fill("0.1");
+  await button(page, /^Start$/).click();
+  await page.clock.runFor(10_000);
+  await button(page, "Interrupted").click();
+  await expectStep(page, "Run 2 of 2");
+  await link(page, "Do it again").click();
+  await runAndRead(page, "0.2", "3.2");
+  await expectStep(page, "2 runs read: enough");
+  await link(page, "Done: close out").click();
+
+  await expectStep(page, "Close-out");
+  await closeOut(page);
+  await expectStep(page, "Close-out");
+  await button(page, "Save the check").click();
+
+  await expectStep(page, "Result");
+  await expect(page.getByText("Saved on this phone", { exact: true })).toBeVisible();
+  await expect(page.getByText("Ride on")).toBeVisible();
+  await expect(page.getByText("Delivery settling")).toBeVisible();
+  await expect(page.getByText("Void runs are kept, and not counted.")).toBeVisible();
+  await expect(page.getByRole("heading", { name: /Next check: in 20.0/ })).toBeVisible();
+
+  await server.start();
+  await button(page, "Send and fetch now").click();
+  await expect(page.getByText("Sent", { exact: true })).toBeVisible();
+  await rider.signIn();
+  const entries = await entriesOnServer(rider);
+  const check = entries.find(({ kind }) => kind === "check");
+  expect(check?.body).toMatchObject({
+    closedOut: true,
+    runs: [
+      { startMl: 0, endMl: 2.9, rhythm: "steady" },
+      { startMl: 0.1, void: true },
+      { startMl: 0.2, endMl: 3.2, seconds: 30 },
+    ],
+    note: "Run 2 is void: it was interrupted.",
+  });
+  expect(entries.at(-2)).toMatchObject({ kind: "bike", body: { sequence: short } });
+});
+
+test("A rider who knows it saves a check with at most six taps and two numbers", async ({
+  page,
+  rider,
+}) => {
+  await withBaseline(page, rider);
+  let taps = 0;
+  const tap = async (target: ReturnType<typeof button>) => {
+    taps += 1;
+    await target.click();
+  };
+  await tap(
+    page.getByRole("region", { name: "Moss" }).getByRole("link", { name: "Delivery check" }),
+  );
+  await tap(link(page, "Quick form"));
+  await tap(field(page, "Engine hours"));
+  await page.keyboard.type("32");
+  await tap(field(page, "Run 1: level after"));
+  await page.keyboard.type("2,95");
+  await expect(page.getByRole("region", { name: "So far" })).toContainText("Ride on");
+  await tap(page.getByRole("checkbox", { name: /Closed out/ }));
+  await tap(button(page, "Save the check"));
+  await expect(heading(page, "Result")).toBeVisible();
+  await expect(page.getByText(/^(Saved on this phone|Sent)$/)).toBeVisible();
+  await expect(page.getByText("Delivery holding")).toBeVisible();
+  await expectAccessible(page);
+  expect(taps).toBeLessThanOrEqual(6);
+});
+
+test("A rider with a delivery low is told to stop, finds the cause and writes down what was done", async ({
+  page,
+  rider,
+}) => {
+  const bikeId = await withBaseline(page, rider);
+  await page.goto(`/bikes/${bikeId}/check/quick`);
+  await field(page, "Engine hours").fill("32");
+  await field(page, "Run 1: level after").fill("2.3");
+  await page.getByRole("checkbox", { name: /Closed out/ }).check();
+  await expectAccessible(page);
+  await button(page, "Save the check").click();
+
+  await expect(page.getByText("Stop, find the cause")).toBeVisible();
+  await expect(page.getByText("Delivery low", { exact: true })).toBeVisible();
+  await expect(page.getByText(/sure the delivery is below the limit/)).toBeVisible();
+  await expect(page.getByText(/your syringe’s 0.2 mL marks/)).toBeVisible();
+  await expect(page.getByRole("img", { name: /^Delivery 2.29.*under the limit/ })).toBeVisible();
+  await expect(page.getByRole("heading", { name: "Next check: now" })).toBeVisible();
+
+  await page.getByText("Mixing oil into the fuel").click();
+  await expect(page.getByText("It never lifts a stop")).toBeVisible();
+  await page.getByRole("textbox", { name: "Fuel to oil" }).fill("1:80");
+  await expect(page.getByText(/Oil to mix in: 63/)).toBeVisible();
+
+  await page.getByRole("checkbox", { name: /Oil level and tank vent/ }).check();
+  await page.getByRole("checkbox", { name: /Pump replaced/ }).check();
+  await page.reload();
+  await expect(page.getByRole("checkbox", { name: /Pump replaced/ })).toBeChecked();
+  await expect(page.getByRole("checkbox", { name: /Start a new baseline/ })).toBeChecked();
+  await expectAccessible(page);
+  await button(page, "Write it in the log").click();
+  await expect(page.getByText("Written in the log: saved on this phone.")).toBeVisible();
+  await expect(page.getByText(/^All sent/)).toBeVisible();
+  const work = (await entriesOnServer(rider)).at(-1);
+  expect(work).toMatchObject({
+    kind: "work",
+    hours: 32,
+    body: {
+      items: ["other", "pump-renewed"],
+      startsSeries: true,
+      note: "Oil level and tank vent looked at.",
+    },
+  });
+});
+
+test("A check given up after its first run keeps the bike from being started until it is closed out", async ({
+  page,
+  rider,
+}) => {
+  const bikeId = await withBaseline(page, rider);
+  await page.clock.install();
+  await page.goto(`/bikes/${bikeId}/check`);
+  await button(page, "Start the guided check").click();
+  await button(page, "I have read this: go on").click();
+  await button(page, "Go to run 1").click();
+  await button(page, /^Start$/).click();
+  await expect(page.getByRole("timer")).toBeVisible();
+  await page.goto("/");
+  await expect(page.getByText("Hose may be off: do not start")).toBeVisible();
+
+  await page.goto(`/bikes/${bikeId}/check`);
+  await expect(page.getByText("A check is half done")).toBeVisible();
+  await button(page, "Give it up").click();
+  await expectAccessible(page);
+  await page.getByRole("dialog").getByRole("button", { name: "Give it up" }).click();
+  await expect(page.getByText("A check was given up with the hose off.")).toBeVisible();
+  await expectAccessible(page);
+  await page.goto("/");
+  await expect(page.getByText("Hose may be off: do not start")).toBeVisible();
+
+  await page.getByRole("region", { name: "Moss" }).getByRole("link", { name: /close/i }).click();
+  await expect(heading(page, "Close-out")).toBeVisible();
+  await button(page, "Save the close-out").click();
+  await expect(page.getByText("Tick all five first.")).toBeVisible();
+  await expectAccessible(page);
+  await closeOut(page);
+  await button(page, "Save the close-out").click();
+  await expect(page).toHaveURL(`/bikes/${bikeId}`);
+  await page.goto("/");
+  await expect(page.getByRole("region", { name: "Moss" })).toBeVisible();
+  await expect(page.getByText("Hose may be off: do not start")).toBeHidden();
+});
+
+test("A check saved with its close-out open is closed out later from the Shed", async ({
+  page,
+  rider,
+}) => {
+  const bikeId = await withBaseline(page, rider);
+  await page.goto(`/bikes/${bikeId}/check/quick`);
+  await field(page, "Engine hours").fill("32");
+  await field(page, "Run 1: level after").fill("3");
+  await button(page, "Save the check").click();
+  await expect(page.getByText("Hose may be off: do not start")).toBeVisible();
+  await expect(page.getByText("Delivery holding")).toBeVisible();
+  await expect(page.getByText("Ride on")).toBeHidden();
+  await link(page, "To the Shed").click();
+  await page.getByRole("region", { name: "Moss" }).getByRole("link", { name: /close/i }).click();
+  await closeOut(page);
+  await button(page, "Save the close-out").click();
+  await page.goto("/");
+  await expect(page.getByText("Ride on")).toBeVisible();
+  await expect(page.getByText("Hose may be off: do not start")).toBeHidden();
+});
+
+test("A run goes on while the phone is off, and its alarm is given when it is on", async ({
+  page,
+  rider,
+}) => {
+  const bikeId = await withBaseline(page, rider);
+  await page.addInitScript(() => {
+    const heard: string[] = [];
+    Object.assign(window, { heard });
+    navigator.vibrate = () => heard.push("shake") > 0;
+    if (!("wakeLock" in navigator)) return;
+    navigator.wakeLock.request = () => {
+      heard.push("awake");
+      return Promise.reject(new Error("The battery is low."));
+    };
+  });
+  const heard = () =>
+    page.evaluate(() => (window as unknown as { heard: string[] }).heard.join(" "));
+  await page.clock.install();
+  await page.goto(`/bikes/${bikeId}/check`);
+  await button(page, "Start the guided check").click();
+  await button(page, "I have read this: go on").click();
+  await button(page, "Go to run 1").click();
+  await expect(page.getByText("The timer stops by itself after 30 s.")).toBeVisible();
+  await button(page, "Sound is on").click();
+  await expect(button(page, "Sound is off")).toBeVisible();
+  await button(page, /^Start$/).click();
+  await page.clock.runFor(30_500);
+  await expect(page.getByRole("timer")).toContainText("wait");
+  expect(await heard()).toBe("awake shake");
+
+  await page.goto("about:blank");
+  await page.clock.fastForward("02:00:00");
+  await page.goto(`/bikes/${bikeId}/check`);
+  await link(page, "Go on with it").click();
+  await expect(page.getByText("The last drops have fallen.")).toBeVisible();
+  expect(await heard()).toBe("awake");
+  await link(page, "Read the level").click();
+  await expect(heading(page, /Read the level/)).toBeVisible();
+});
+
+test("Back goes one step back and loses nothing", async ({ page, rider }) => {
+  const bikeId = await withBaseline(page, rider);
+  await page.clock.install();
+  await page.goto(`/bikes/${bikeId}/check`);
+  await button(page, "Start the guided check").click();
+  await button(page, "I have read this: go on").click();
+  await field(page, "Engine hours").fill("32");
+  await button(page, "Go to run 1").click();
+  await runAndRead(page, "0", "2.8");
+  await expect(heading(page, /1 (of \d )?runs? read/)).toBeVisible();
+
+  await page.goBack();
+  await expect(field(page, "Level after the run")).toHaveValue("2.8");
+  await field(page, "Level after the run").fill("2.9");
+  await page.goBack();
+  await expect(page.getByText("The last drops have fallen.")).toBeVisible();
+  await page.goBack();
+  await expect(field(page, "Engine hours")).toHaveValue("32");
+  await page.goForward();
+  await page.goForward();
+  await expect(field(page, "Level after the run")).toHaveValue("2.9");
+  await link(page, "Run 1").click();
+  await link(page, "Set up").click();
+  await expect(field(page, "Engine hours")).toHaveValue("32");
+});
+
+test("A rider can do the whole check by keyboard alone", async ({ page, rider }) => {
+  const bikeId = await withBaseline(page, rider);
+  await page.clock.install();
+  await page.goto(`/bikes/${bikeId}/check`);
+  /** Tabs on until the control with this name has the focus. */
+  const reach = async (name: RegExp) => {
+    for (let presses = 0; presses < 60; presses++) {
+      await page.keyboard.press("Tab");
+      const focused = await page.evaluate(() => {
+        const element = document.activeElement as HTMLInputElement | null;
+        if (element === document.body) return "";
+        const labels = [...(element?.labels ?? [])].map((label) => label.textContent);
+        return [element?.getAttribute("aria-label"), element?.textContent, ...labels].join(" ");
+      });
+      if (name.test(focused)) return;
+    }
+    throw new Error(`The focus never came to ${name}.`);
+  };
+  const press = async (name: RegExp, key = "Enter") => {
+    await reach(name);
+    await page.keyboard.press(key);
+  };
+  await expect(heading(page, "Delivery check")).toBeFocused();
+  await press(/Start the guided check/);
+  await press(/I have read this/);
+  await reach(/^ *Engine hours/);
+  await page.keyboard.type("32");
+  await press(/Go to run 1/);
+  await expect(heading(page, /Run 1/)).toBeFocused();
+  await page.clock.runFor(1_000);
+  await press(/^ ?Start$/);
+  await expect(page.getByRole("timer")).toBeVisible();
+  await page.clock.runFor(61_000);
+  await press(/^ ?Read the level$/);
+  await expect(heading(page, /Read the level/)).toBeFocused();
+  await reach(/Level after the run/);
+  await page.keyboard.type("2.9");
+  await press(/That is the level/);
+  await expect(heading(page, /runs? read/)).toBeFocused();
+  await press(/Done: close out/);
+  for (const name of [/Test lead/, /Oil hose/, /Line primed/, /No leaks/, /Engine started/])
+    await press(name, "Space");
+  await press(/Save the check/);
+  await expect(heading(page, "Result")).toBeFocused();
+});
+
+test("A check whose saving fails keeps all that was typed", async ({ page, rider }) => {
+  const bikeId = await withBaseline(page, rider);
+  await page.goto(`/bikes/${bikeId}/check/quick`);
+  await field(page, "Engine hours").fill("32");
+  await field(page, "Run 1: level after").fill("2,9");
+  await page.getByRole("textbox", { name: "Note" }).fill("Windy.");
+  await page.evaluate(() => {
+    const whole = Object.getOwnPropertyDescriptor(IDBObjectStore.prototype, "add") ?? {};
+    const mend = () => Object.defineProperty(IDBObjectStore.prototype, "add", whole);
+    Object.assign(window, { mend });
+    IDBObjectStore.prototype.add = () => {
+      throw new DOMException("No room.", "QuotaExceededError");
+    };
+  });
+  await button(page, "Save the check").click();
+  await expect(page.getByRole("alert")).toContainText("Not saved yet");
+  await expect(field(page, "Run 1: level after")).toHaveValue("2,9");
+  await expect(page.getByRole("textbox", { name: "Note" })).toHaveValue("Windy.");
+
+  await page.evaluate(() => (window as unknown as { mend: () => void }).mend());
+  await button(page, "Save the check").click();
+  await expect(heading(page, "Result")).toBeVisible();
+  await page.goto(`/bikes/${bikeId}/check/quick`);
+  await expect(field(page, "Run 1: level after")).toHaveValue("");
+});
+
+test("Every wrong field of the quick form is told by a sentence of its own", async ({
+  page,
+  rider,
+}) => {
+  const bikeId = await withBaseline(page, rider);
+  await page.goto(`/bikes/${bikeId}/check/quick`);
+  await field(page, "Engine hours").fill("");
+  await field(page, "Run 1: level before").fill("1");
+  await field(page, "Run 1: level after").fill("0.5");
+  await field(page, "Oil temperature").fill("warm");
+  await button(page, "Save the check").click();
+  await expect(page.getByText("Type the engine hours as the meter shows them.")).toBeVisible();
+  await expect(page.getByText("The end level is below the start level.")).toBeVisible();
+  await expect(page.getByText(/oil’s temperature in figures/)).toBeVisible();
+  await expectAccessible(page);
+  await field(page, "Engine hours").fill("32");
+  await field(page, "Run 1: level after").fill("9");
+  await field(page, "Oil temperature").fill("");
+  await expect(page.getByText("This level is far beyond the 5 mL barrel.")).toBeVisible();
+  await page.reload();
+  await expect(field(page, "Run 1: level after")).toHaveValue("9");
+  await button(page, "Start afresh").click();
+  await expect(field(page, "Run 1: level after")).toHaveValue("");
+});
+
+for (const timezoneId of ["Pacific/Kiritimati", "America/St_Johns"]) {
+  test.describe(timezoneId, () => {
+    test.use({ timezoneId });
+    test("An old note goes in by its volume, in the rider's own time", async ({ page, rider }) => {
+      const bikeId = await withBaseline(page, rider);
+      await page.goto(`/bikes/${bikeId}/check/quick`);
+      await page.getByText("Volume alone").click();
+      await field(page, "Run 1: delivered").fill("2,9");
+      await page.getByRole("combobox", { name: "Syringe" }).selectOption("Not known");
+      await page.getByText(/^When:/).click();
+      await page.getByLabel("Checked at").fill("2025-07-01T23:30");
+      await page.getByRole("checkbox", { name: "The hours are an estimate" }).check();
+      await field(page, "Engine hours, estimated").fill("8");
+      await page.getByRole("checkbox", { name: /Closed out/ }).check();
+      await expect(page.getByText(/marks of 0.2 mL are assumed/).first()).toBeVisible();
+      await button(page, "Save the check").click();
+      await expect(heading(page, "Result")).toBeVisible();
+      await expect(page.getByText("1 Jul 2025, 23:30")).toBeVisible();
+      await expect(page.getByText("The engine hours of this check are an estimate.")).toBeVisible();
+    });
+  });
+}
+
+test("A bike with an hours-and-minutes meter takes 12:30 in the check", async ({ page, rider }) => {
+  const bikeId = newId();
+  await rider.signUp();
+  await rider.push([
+    bikeEntry(bikeId, { name: "Moss", meterFormat: "hh:mm" }),
+    checkEntry(bikeId, 12, 3, daysAgo(9)),
+  ]);
+  await signIn(page, rider.email);
+  await page.goto(`/bikes/${bikeId}/check/quick`);
+  await expect(page.getByRole("textbox", { name: "Hours" })).toHaveValue("12");
+  await page.getByRole("textbox", { name: "Minutes" }).fill("30");
+  await field(page, "Run 1: level after").fill("3");
+  await page.getByRole("checkbox", { name: /Closed out/ }).check();
+  await button(page, "Save the check").click();
+  await expect(page.getByText(/At 32:30/)).toBeVisible();
+  await expect(page.getByText(/^All sent/)).toBeVisible();
+  expect((await entriesOnServer(rider)).at(-1)?.hours).toBe(12.5);
+});
+
+test("The check fits 320 px with letters twice as large", async ({ page, rider }) => {
+  const bikeId = await withBaseline(page, rider);
+  await page.setViewportSize({ width: 320, height: 640 });
+  await page.addInitScript(() => {
+    document.addEventListener("DOMContentLoaded", () => {
+      document.documentElement.style.fontSize = "200%";
+    });
+  });
+  await page.clock.install();
+  await page.goto(`/bikes/${bikeId}/check`);
+  await button(page, "Start the guided check").click();
+  await expectNoSidewaysScroll(page);
+  await button(page, "I have read this: go on").click();
+  await expect(heading(page, "Set up")).toBeVisible();
+  await expectNoSidewaysScroll(page);
+  await button(page, "Go to run 1").click();
+  await expect(heading(page, /Run 1/)).toBeVisible();
+  await expectNoSidewaysScroll(page);
+  await runAndRead(page, "0", "2.5");
+  await expect(heading(page, /runs? read/)).toBeVisible();
+  await expectNoSidewaysScroll(page);
+  await link(page, "Done: close out").click();
+  await closeOut(page);
+  await expectNoSidewaysScroll(page);
+  await button(page, "Save the check").click();
+  await expect(heading(page, "Result")).toBeVisible();
+  await expectNoSidewaysScroll(page);
+  await page.goto(`/bikes/${bikeId}/check/quick`);
+  await expect(heading(page, "Quick form")).toBeVisible();
+  await expectNoSidewaysScroll(page);
+});
