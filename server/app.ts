@@ -9,6 +9,7 @@ import type { Logger } from "./log.ts";
 import { createMailer } from "./mail/mailer.ts";
 import { notFound } from "./problems.ts";
 import { createApi } from "./routes/api.ts";
+import { createDevMailRoutes } from "./routes/dev-mail-routes.ts";
 import { handleProblem } from "./routes/handle-problem.ts";
 import { logRequests } from "./routes/log-requests.ts";
 import { createRateLimits } from "./routes/rate-limits.ts";
@@ -22,7 +23,7 @@ export function createApp(config: Config, database: Database, log: Logger) {
   const store = createStore(database, config.dataDir);
   const sessions = createSessions(database, publicOrigin);
   const passwords = createPasswords(config.hashCost);
-  const mailer = createMailer(config, log);
+  const mailer = createMailer(store, config, log);
   const services = createServices({ store, passwords, sessions, mailer, publicOrigin });
 
   const app: Express = express();
@@ -32,6 +33,7 @@ export function createApp(config: Config, database: Database, log: Logger) {
   app.disable("x-powered-by");
   app.use(logRequests(log), securityHeaders(publicOrigin), compression());
   app.use("/api", createApi({ services, sessions, limits: createRateLimits(), publicOrigin }));
+  if (config.showMail) app.use(createDevMailRoutes(config));
   app.use(serveClient(config.clientDir));
   app.use(() => {
     throw notFound();

@@ -45,6 +45,8 @@ export interface Config {
   /** Null: messages are written to `mail/` in the data folder. */
   smtpUrl: string | null;
   mailFrom: string;
+  /** On a developer's own machine: messages that go to files are shown at `/dev/mail`. */
+  showMail: boolean;
   logLevel: string;
   /** The built client. */
   clientDir: string;
@@ -64,13 +66,16 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
     throw new ConfigError(`The environment is not usable:\n${wrong.join("\n")}`);
   }
   const env = parsed.data;
+  const publicOrigin = env.PUBLIC_ORIGIN ?? `http://localhost:${env.PORT}`;
+  const smtpUrl = env.SMTP_URL ?? null;
   return {
     port: env.PORT,
     dataDir: path.resolve(env.DATA_DIR),
-    publicOrigin: env.PUBLIC_ORIGIN ?? `http://localhost:${env.PORT}`,
+    publicOrigin,
     trustedProxies: env.TRUST_PROXY,
-    smtpUrl: env.SMTP_URL ?? null,
+    smtpUrl,
     mailFrom: env.MAIL_FROM,
+    showMail: smtpUrl === null && /^http:\/\/localhost(:|$)/.test(publicOrigin),
     logLevel: env.LOG_LEVEL,
     clientDir: path.join(projectRoot, "dist/client"),
     hashCost: usualHashCost,

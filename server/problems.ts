@@ -28,6 +28,12 @@ export const emailTaken = () =>
   problem(409, "email-taken", "There is already an account with this e-mail address.", {
     errors: { email: "There is already an account with this e-mail address." },
   });
+export const lastOrganiser = () =>
+  problem(
+    409,
+    "last-organiser",
+    "This club would be left without an organiser. Make another member organiser first, or close the club.",
+  );
 export const otherAccount = () =>
   problem(409, "other-account", "Another account is signed in. Nothing was stored.");
 export const tooLarge = () =>
@@ -40,6 +46,7 @@ export const wrongFields = (
 ) => problem(422, "wrong-fields", detail, { errors });
 export const wrongShape = (error: z.ZodError) => wrongFields(errorsByField(error));
 const DEAD_LINK = "This link was used already or has run out. Ask for a new one.";
+export const goneLink = () => problem(404, "dead-link", DEAD_LINK);
 export const deadLink = () => wrongFields({ token: DEAD_LINK }, DEAD_LINK);
 export const tooMany = () =>
   problem(429, "too-many", "That was tried too often. Please wait a little.");

@@ -15,7 +15,7 @@ cleanupOutdatedCaches();
 
 // Every page of the app is index.html; the API answers for itself.
 const page = createHandlerBoundToURL("/index.html");
-registerRoute(new NavigationRoute(page, { denylist: [/^\/api(\/|$)/] }));
+registerRoute(new NavigationRoute(page, { denylist: [/^\/(api|dev)(\/|$)/] }));
 
 // From the first visit on, so that a screen opened for the first time in a shed is there too.
 clientsClaim();

@@ -15,15 +15,15 @@ const MAX_LIVE_TOKENS = 5;
 /** Tokens for links in mails: kept as hashes, good once, and for a limited time. */
 export function createMailedTokenService({ mailedTokens, write }: Store) {
   return {
-    /** Null where the account has enough unused ones. */
-    issue(userId: string, purpose: TokenPurpose): string | null {
+    /** A token and until when it is good (ms since 1970); null where the account has enough unused ones. */
+    issue(userId: string, purpose: TokenPurpose): { token: string; goodUntil: number } | null {
       const now = Date.now();
       mailedTokens.removeExpired(now);
       if (mailedTokens.countLive(userId, purpose, now) >= MAX_LIVE_TOKENS) return null;
       const token = randomBytes(16).toString("base64url");
-      const expiresAt = now + minutesToMilliseconds(lifetimeMinutes[purpose]);
-      mailedTokens.add({ hash: hashToken(token), userId, purpose, expiresAt });
-      return token;
+      const goodUntil = now + minutesToMilliseconds(lifetimeMinutes[purpose]);
+      mailedTokens.add({ hash: hashToken(token), userId, purpose, expiresAt: goodUntil });
+      return { token, goodUntil };
     },
     /** The account a token was sent to, or null where it is not good; the account's others end too. */
     redeem: (token: string, purpose: TokenPurpose): string | null =>

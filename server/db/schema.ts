@@ -11,7 +11,7 @@ import {
 import type { LineUpFacts } from "../../shared/schemas/club.ts";
 import type { Action, Verdict } from "../../shared/schemas/entry.ts";
 import type { Summary } from "../../shared/schemas/summary.ts";
-import type { Message } from "../mail/letter.ts";
+import type { Letter } from "../mail/letter.ts";
 
 // Nothing is deleted by cascade: a table rebuild in a migration would take the children along.
 
@@ -43,14 +43,9 @@ export const sessions = sqliteTable(
   (table) => [index("sessions_user").on(table.userId)],
 );
 
-export const tokenPurposes = [
-  "verify-email",
-  "reset-password",
-  "end-due-mails",
-  "end-stop-mails",
-] as const;
+export const tokenPurposes = ["verify-email", "reset-password"] as const;
 
-/** Tokens sent by mail, each good for one purpose and a limited time. */
+/** Tokens sent by mail, each good for one use. */
 export const mailedTokens = sqliteTable(
   "mailed_tokens",
   {
@@ -220,7 +215,7 @@ export const mails = sqliteTable(
     /** What it is about, once for each topic and account; null where it may be sent again. */
     occasion: text(),
     /** Null once it is sent or given up: it may hold tokens. */
-    letter: text({ mode: "json" }).$type<{ to: string; message: Message }>(),
+    letter: text({ mode: "json" }).$type<Letter>(),
     queuedAt: text().notNull(),
     attempts: integer().notNull().default(0),
     /** Milliseconds since 1970; null once there is nothing left to try. */

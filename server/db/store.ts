@@ -1,11 +1,19 @@
+import { createBikeShares } from "./bike-shares.ts";
 import { createBikeSummaries } from "./bike-summaries.ts";
 import { createBikes } from "./bikes.ts";
+import { createClubInvites } from "./club-invites.ts";
+import { createClubMembers } from "./club-members.ts";
+import { createClubs } from "./clubs.ts";
+import { createDueBikes } from "./due-bikes.ts";
 import { createEntries } from "./entries.ts";
 import { createEpoch } from "./epoch.ts";
 import { createErasedIds } from "./erased-ids.ts";
 import { createErasureRecord } from "./erasure-record.ts";
 import { createMailedTokens } from "./mailed-tokens.ts";
+import { createMails } from "./mails.ts";
 import type { Database } from "./open-database.ts";
+import { createReminders } from "./reminders.ts";
+import { readSecret } from "./secret.ts";
 import { createUsers } from "./users.ts";
 
 /** All that the server keeps, its statements prepared once. */
@@ -16,6 +24,14 @@ export function createStore(db: Database, dataDir: string) {
     bikes: createBikes(db),
     entries: createEntries(db),
     bikeSummaries: createBikeSummaries(db),
+    dueBikes: createDueBikes(db),
+    clubs: createClubs(db),
+    clubMembers: createClubMembers(db),
+    clubInvites: createClubInvites(db),
+    bikeShares: createBikeShares(db),
+    reminders: createReminders(db),
+    mails: createMails(db),
+    secret: readSecret(db),
     erasedIds: createErasedIds(db),
     erasureRecord: createErasureRecord(dataDir),
     epoch: createEpoch(db),

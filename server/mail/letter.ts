@@ -4,3 +4,10 @@ export interface Message {
   html: string;
   headers?: Record<string, string>;
 }
+
+/** A message on its way. Sent a second time by mischance, it bears the same id. */
+export interface Letter {
+  to: string;
+  messageId: string;
+  message: Message;
+}

@@ -1,33 +1,100 @@
+import { minutesToMilliseconds } from "date-fns";
+import { randomUUID } from "node:crypto";
 import path from "node:path";
 import type { Config } from "../config.ts";
+import type { MailTopic, WaitingMail } from "../db/mails.ts";
+import type { Store } from "../db/store.ts";
 import type { Logger } from "../log.ts";
 import { fileTransport, smtpTransport } from "./mail-transport.ts";
-import type { Message } from "./messages.ts";
+import type { Message } from "./letter.ts";
+
+/** So many letters are on their way at once. */
+const AT_ONCE = 5;
+/** A minute after the first failure, twice as long after each further one, at most four hours. */
+const FIRST_WAIT_MS = minutesToMilliseconds(1);
+const LONGEST_WAIT_MS = minutesToMilliseconds(240);
+
+export interface NewMail {
+  topic: MailTopic;
+  to: string;
+  message: Message;
+  /** Milliseconds since 1970: after this it is of no use to anyone. */
+  goodUntil: number;
+  userId?: string;
+  bikeId?: string;
+  /** What it is about, where an account is to be told of it once. */
+  occasion?: string;
+}
+
+const waitMs = (attempts: number) => Math.min(FIRST_WAIT_MS * 2 ** (attempts - 1), LONGEST_WAIT_MS);
+
+/** Where mail goes when no mail server is set up. */
+export const mailFolder = (dataDir: string) => path.join(dataDir, "mail");
 
 /**
  * Sends mail behind the requests' backs: how long an answer takes must not tell whether anything
- * was sent, and a mail server that is down stops nobody from signing up.
+ * was sent, and a mail server that is down stops nobody from signing up. What is to be sent stands
+ * in the database first, in the transaction that causes it, and is tried until it is sent or of no
+ * use any more, by this life of the server or the next. One whose sending was cut off by a crash
+ * goes out again under the same Message-ID, by which mail programs know it.
  */
-export function createMailer(config: Config, log: Logger) {
-  const sendMail = config.smtpUrl
+export function createMailer({ mails }: Pick<Store, "mails">, config: Config, log: Logger) {
+  const sendLetter = config.smtpUrl
     ? smtpTransport(config.smtpUrl, config.mailFrom)
-    : fileTransport(path.join(config.dataDir, "mail"), config.mailFrom);
-  const underWay = new Set<Promise<void>>();
+    : fileTransport(mailFolder(config.dataDir), config.mailFrom);
+  const { hostname } = new URL(config.publicOrigin);
+  let sending: Promise<void> | null = null;
+
+  /** The next try is written down before this one: whatever happens, no letter goes out in a loop. */
+  async function send({ id, topic, letter, goodUntil, ...mail }: WaitingMail): Promise<void> {
+    if (goodUntil < Date.now()) return void mails.giveUp(id);
+    const attempts = mail.attempts + 1;
+    const nextAttemptAt = Date.now() + waitMs(attempts);
+    mails.postpone(id, attempts, nextAttemptAt);
+    try {
+      await sendLetter(letter);
+    } catch (error) {
+      const { code, name } = error as Error & { code?: string };
+      // The error's own text may hold the address.
+      log.error({ code: code ?? name, topic, attempts }, "mail not sent");
+      if (nextAttemptAt > goodUntil) mails.giveUp(id);
+      return;
+    }
+    mails.markSent(id, new Date().toISOString());
+  }
+
+  async function sendAll(): Promise<void> {
+    for (;;) {
+      const waiting = mails.waiting(Date.now(), AT_ONCE);
+      if (waiting.length === 0) return;
+      await Promise.all(waiting.map(send));
+    }
+  }
+
+  /** Sends what is due, one run at a time; resolves once nothing is. */
+  async function sendDue(): Promise<void> {
+    while (sending) await sending;
+    sending = sendAll()
+      .catch((err: unknown) => log.error({ err }, "mail cannot be sent just now"))
+      .finally(() => (sending = null));
+    await sending;
+  }
 
   return {
-    send(to: string, message: Message): void {
-      const sending = sendMail(to, message)
-        // The error's own text may hold the address.
-        .catch((error: Error & { code?: string }) =>
-          log.error({ code: error.code ?? error.name, subject: message.subject }, "mail not sent"),
-        )
-        .finally(() => underWay.delete(sending));
-      underWay.add(sending);
+    /** Of the present transaction; the sending begins after it. */
+    queue({ to, message, ...mail }: NewMail): void {
+      const now = new Date();
+      const messageId = `<${now.getTime()}-${randomUUID()}@${hostname}>`;
+      const letter = { to, messageId, message };
+      mails.add({
+        ...mail,
+        letter,
+        queuedAt: now.toISOString(),
+        nextAttemptAt: now.getTime(),
+      });
+      setImmediate(() => void sendDue());
     },
-    /** Resolves once nothing is under way. */
-    settled: async () => {
-      await Promise.all(underWay);
-    },
+    sendDue,
   };
 }
 

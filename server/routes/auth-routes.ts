@@ -22,30 +22,30 @@ export function createAuthRoutes({ services: { accounts }, sessions, limits }: A
     response.status(status).json({ user });
   }
 
-  router.post("/sign-up", readJson, limits.signUp, async (request, response) => {
+  router.post("/auth/sign-up", readJson, limits.signUp, async (request, response) => {
     const user = await accounts.signUp(parseBody(signUpSchema, request));
     await answerSignedIn(request, response, 201, user);
   });
 
-  router.post("/sign-in", readJson, ...limits.signIn, async (request, response) => {
+  router.post("/auth/sign-in", readJson, ...limits.signIn, async (request, response) => {
     const user = await accounts.signIn(parseBody(signInSchema, request));
     await answerSignedIn(request, response, 200, user);
   });
 
-  router.post("/sign-out", async (request, response) => {
+  router.post("/auth/sign-out", async (request, response) => {
     response.append("Set-Cookie", await sessions.end(request.headers.cookie));
     response.status(204).end();
   });
 
-  router.get("/me", requireSession(sessions), (_request, response) => {
+  router.get("/auth/me", requireSession(sessions), (_request, response) => {
     response.json({ user: accounts.find(accountIdOf(response)) });
   });
 
-  router.post("/verify-email", readJson, limits.mailedLinks, (request, response) => {
+  router.post("/auth/verify-email", readJson, limits.mailedLinks, (request, response) => {
     response.json({ user: accounts.verifyEmail(parseBody(tokenSchema, request).token) });
   });
 
-  router.post("/request-password-reset", readJson, limits.mailedLinks, (request, response) => {
+  router.post("/auth/request-password-reset", readJson, limits.mailedLinks, (request, response) => {
     const { email } = parseBody(requestPasswordResetSchema, request);
     response.status(204).end();
     // Behind the answer, so that its time does not tell whether there is such an account.
@@ -58,7 +58,7 @@ export function createAuthRoutes({ services: { accounts }, sessions, limits }: A
     });
   });
 
-  router.post("/reset-password", readJson, limits.mailedLinks, async (request, response) => {
+  router.post("/auth/reset-password", readJson, limits.mailedLinks, async (request, response) => {
     const { token, password } = parseBody(resetPasswordSchema, request);
     await accounts.resetPassword(token, password);
     response.status(204).end();

@@ -3,19 +3,15 @@ import type { SignIn, SignUp, User } from "../../shared/schemas/auth.ts";
 import { createMailedTokenService } from "../auth/mailed-token.ts";
 import type { Passwords } from "../auth/password.ts";
 import type { Sessions } from "../auth/session.ts";
-import type { Store } from "../db/store.ts";
 import type { UserRow } from "../db/users.ts";
-import type { Mailer } from "../mail/mailer.ts";
 import { passwordResetMessage, verificationMessage } from "../mail/messages.ts";
 import { deadLink, emailTaken, notSignedIn, wrongCredentials, wrongFields } from "../problems.ts";
 import { eraseAccount } from "./erase.ts";
+import type { MailParts } from "./mail-parts.ts";
 
-export interface AccountParts {
-  store: Store;
+export interface AccountParts extends MailParts {
   passwords: Passwords;
   sessions: Sessions;
-  mailer: Mailer;
-  publicOrigin: string;
 }
 
 const shown = ({ id, name, email, verified }: UserRow): User => ({ id, name, email, verified });
@@ -30,17 +26,22 @@ export function createAccounts({ store, passwords, sessions, mailer, publicOrigi
     return shown(user);
   }
 
-  function sendVerification(user: User): void {
-    const token = tokens.issue(user.id, "verify-email");
-    if (token) mailer.send(user.email, verificationMessage(publicOrigin, token));
+  function sendVerification({ id: userId, email }: User): void {
+    const issued = tokens.issue(userId, "verify-email");
+    if (!issued) return;
+    const { token, goodUntil } = issued;
+    const message = verificationMessage(publicOrigin, token);
+    mailer.queue({ topic: "verify-email", userId, to: email, message, goodUntil });
   }
 
   async function signUp({ email, password, name }: SignUp): Promise<User> {
     const passwordHash = await passwords.hashPassword(password);
     const createdAt = new Date().toISOString();
     const user = { id: randomUUID(), email, name, passwordHash, verified: false, createdAt };
-    if (!users.add(user)) throw emailTaken();
-    sendVerification(user);
+    store.write(() => {
+      if (!users.add(user)) throw emailTaken();
+      sendVerification(user);
+    });
     return shown(user);
   }
 
@@ -59,9 +60,15 @@ export function createAccounts({ store, passwords, sessions, mailer, publicOrigi
   }
 
   function requestPasswordReset(email: string): void {
-    const user = users.findByEmail(email);
-    const token = user && tokens.issue(user.id, "reset-password");
-    if (token) mailer.send(user.email, passwordResetMessage(publicOrigin, token));
+    store.write(() => {
+      const user = users.findByEmail(email);
+      const issued = user && tokens.issue(user.id, "reset-password");
+      if (!issued) return;
+      const { token, goodUntil } = issued;
+      const message = passwordResetMessage(publicOrigin, token);
+      const to = { userId: user.id, to: user.email };
+      mailer.queue({ topic: "reset-password", ...to, message, goodUntil });
+    });
   }
 
   /** Also ends every session of the account: whoever knew the old password is out. */

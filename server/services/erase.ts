@@ -1,16 +1,24 @@
 import type { Erasure } from "../db/erasure-record.ts";
 import type { Store } from "../db/store.ts";
-import { notFound } from "../problems.ts";
-import { accessTo } from "./permissions.ts";
+import { leaveAllClubs } from "./end-membership.ts";
+import { assertOwner } from "./permissions.ts";
 
 /** Takes out the rows; keeps the ids, so that no phone brings them back. */
 function eraseRows(store: Store, { bikeIds, entryIds, accountId }: Erasure): void {
   for (const bikeId of bikeIds) {
+    store.clubs.touchAllOf(bikeId);
+    store.bikeShares.removeAllOf(bikeId);
+    store.mails.removeAbout(bikeId);
     store.bikeSummaries.remove(bikeId);
     store.entries.removeOf(bikeId);
     store.bikes.remove(bikeId);
   }
-  if (accountId !== undefined) store.users.remove(accountId);
+  if (accountId !== undefined) {
+    leaveAllClubs(store, accountId);
+    store.mails.removeTo(accountId);
+    store.reminders.removeOf(accountId);
+    store.users.remove(accountId);
+  }
   store.erasedIds.add([...bikeIds, ...entryIds]);
 }
 
@@ -30,12 +38,12 @@ function erase(store: Store, bikeIds: string[], accountId?: string): void {
 
 export function eraseBike(store: Store, accountId: string, bikeId: string): void {
   store.write(() => {
-    if (accessTo(store, accountId, bikeId) !== "owner") throw notFound();
+    assertOwner(store, accountId, bikeId);
     erase(store, [bikeId]);
   });
 }
 
-/** The account with its bikes and their logs. */
+/** The account with its bikes, their logs, and its place in clubs. */
 export function eraseAccount(store: Store, accountId: string): void {
   store.write(() => erase(store, store.bikes.idsOf(accountId), accountId));
 }

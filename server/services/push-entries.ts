@@ -1,8 +1,9 @@
 import { MAX_ENTRIES_PER_BIKE, type Entry } from "../../shared/schemas/entry.ts";
-import type { SyncResult } from "../../shared/schemas/sync.ts";
+import type { Summary } from "../../shared/schemas/summary.ts";
+import type { BikeAccess, SyncResult } from "../../shared/schemas/sync.ts";
 import type { Store } from "../db/store.ts";
 import { isSameEntry } from "./is-same-entry.ts";
-import { accessTo } from "./permissions.ts";
+import { accessTo, mayStrike, mayWrite } from "./permissions.ts";
 import { readPushedEntry, type Refusal } from "./read-pushed-entry.ts";
 import { summariseBike } from "./summarise-bike.ts";
 
@@ -10,6 +11,7 @@ type Outcome = "stored" | "duplicate" | Refusal;
 
 const FULL = `This bike's log is full: at most ${MAX_ENTRIES_PER_BIKE.toLocaleString("en")} entries.`;
 const NEVER_STRUCK = "The bike's own details and strikes cannot be struck.";
+const ANOTHERS = "Only the bike's owner, or whoever wrote this entry, can strike it.";
 
 /** One account's push, within a transaction. */
 function createPush(store: Store, accountId: string, receivedAt: string) {
@@ -20,19 +22,21 @@ function createPush(store: Store, accountId: string, receivedAt: string) {
     entry.body.name !== undefined &&
     store.bikes.ownerOf(entry.bikeId) === undefined;
 
-  function strikesWhatStands(entry: Entry): boolean {
-    if (entry.kind !== "strike") return false;
-    const target = store.entries.find(entry.body.entryId);
-    return target?.bikeId === entry.bikeId && ["bike", "strike"].includes(target.kind);
+  /** Why a strike cannot be, or null; one that comes before its target is judged by the logbook. */
+  function strikeErrorOf(entry: Entry, access: BikeAccess): string | null {
+    const target = entry.kind === "strike" ? store.entries.find(entry.body.entryId) : undefined;
+    if (target?.bikeId !== entry.bikeId) return null;
+    if (["bike", "strike"].includes(target.kind)) return NEVER_STRUCK;
+    return mayStrike(access, accountId, target.authorId) ? null : ANOTHERS;
   }
 
   /** Why an entry that is new to the database is not stored, or null. */
   function refusalOf(entry: Entry): Refusal | null {
-    if (!registers(entry) && accessTo(store, accountId, entry.bikeId) === null)
-      return { reason: "not-writable" };
+    const access = registers(entry) ? "owner" : accessTo(store, accountId, entry.bikeId);
+    if (access === null || !mayWrite(access, entry.kind)) return { reason: "not-writable" };
     if (store.entries.find(entry.id)) return { reason: "id-taken" };
-    if (strikesWhatStands(entry))
-      return { reason: "invalid", errors: { "body.entryId": NEVER_STRUCK } };
+    const strikeError = strikeErrorOf(entry, access);
+    if (strikeError) return { reason: "invalid", errors: { "body.entryId": strikeError } };
     if (store.entries.countOf(entry.bikeId) >= MAX_ENTRIES_PER_BIKE)
       return { reason: "invalid", errors: { bikeId: FULL } };
     return null;
@@ -56,12 +60,14 @@ function createPush(store: Store, accountId: string, receivedAt: string) {
 
 /**
  * Stores what an account's phone sent, each entry judged alone, and makes the summaries of the bikes
- * it touched anew: all in one transaction. The answers are in the order of what was sent.
+ * it touched anew: all in one transaction, `summarised` included. The answers are in the order of what
+ * was sent.
  */
 export function pushEntries(
   store: Store,
   accountId: string,
   sent: readonly unknown[],
+  summarised: (summary: Summary) => void = () => undefined,
 ): SyncResult[] {
   if (sent.length === 0) return [];
   const pushed = sent.map((raw, index) => ({ index, ...readPushedEntry(raw) }));
@@ -79,7 +85,10 @@ export function pushEntries(
     const others = readable.filter((one) => !registrations.includes(one));
     for (const { index, entry } of [...registrations, ...others])
       outcomes.set(index, push.add(entry));
-    for (const bikeId of push.touched) summariseBike(store, bikeId);
+    for (const bikeId of push.touched) {
+      const summary = summariseBike(store, bikeId);
+      if (summary) summarised(summary);
+    }
     return pushed.map((one) =>
       answer(one.index, one.id, "refusal" in one ? one.refusal : outcomes.get(one.index)!),
     );

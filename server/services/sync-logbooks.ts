@@ -1,13 +1,20 @@
 import type { SyncRequest, SyncResponse } from "../../shared/schemas/sync.ts";
-import type { Store } from "../db/store.ts";
 import { otherAccount } from "../problems.ts";
+import type { MailParts } from "./mail-parts.ts";
 import { pullEntries } from "./pull-entries.ts";
 import { pushEntries } from "./push-entries.ts";
+import { mailStop } from "./stop-mails.ts";
 
 /** Push, then pull: what was just stored comes back with its `rev`. */
-export function syncLogbooks(store: Store, accountId: string, request: SyncRequest): SyncResponse {
+export function syncLogbooks(
+  parts: MailParts,
+  accountId: string,
+  request: SyncRequest,
+): SyncResponse {
   if (request.account !== undefined && request.account !== accountId) throw otherAccount();
-  const results = pushEntries(store, accountId, request.entries);
-  const { epoch, ...pulled } = pullEntries(store, accountId, request);
+  const results = pushEntries(parts.store, accountId, request.entries, (summary) =>
+    mailStop(parts, summary, accountId),
+  );
+  const { epoch, ...pulled } = pullEntries(parts.store, accountId, request);
   return { epoch, results, ...pulled };
 }

@@ -6,7 +6,7 @@ import { effectiveTime } from "./effective-order.ts";
 import type { LifetimeHours } from "./lifetime-hours.ts";
 
 /** Checks this close to the first of them, engine hours, are one session. */
-const SESSION_HOURS = 1;
+export const SESSION_HOURS = 1;
 /** Work after which another delivery is to be expected: the old baseline says nothing any more. */
 const RESETTING_WORK: readonly WorkItem[] = ["pump-renewed", "controller-updated"];
 

@@ -87,16 +87,13 @@ export const inviteOfTokenSchema = z.object({
   club: z.object({ id: z.string(), name: z.string() }),
 });
 
-/** Who may see a bike: the clubs it is shared with, and the names of their mechanics. */
-export const sharesResponseSchema = z.object({
-  shares: z.array(
-    z.object({
-      club: z.object({ id: z.string(), name: z.string() }),
-      since: z.string(),
-      mechanics: z.array(z.string()),
-    }),
-  ),
+/** Who may see a bike: a club it is shared with, and the names of the club's other mechanics. */
+export const shareSchema = z.object({
+  club: z.object({ id: z.string(), name: z.string() }),
+  since: z.string(),
+  mechanics: z.array(z.string()),
 });
+export const sharesResponseSchema = z.object({ shares: z.array(shareSchema) });
 
 /**
  * The Line-up's places, worst first: what puts a bike where it stands. Within a place, the bike
@@ -118,6 +115,16 @@ export const lineUpOrder = [
 export const DUE_SOON_HOURS = 5;
 
 export const MAX_LINE_UP_PAGE = 200;
+/** The query of a Line-up: its numbers come as text. */
+export const lineUpPageSchema = z.object({
+  after: z.string("This is no place on the Line-up.").max(200).optional(),
+  limit: z.coerce
+    .number("How many bikes must be a whole number.")
+    .int("How many bikes must be a whole number.")
+    .min(1, "At least one bike.")
+    .max(MAX_LINE_UP_PAGE, `At most ${MAX_LINE_UP_PAGE} bikes at a time.`)
+    .default(50),
+});
 
 /**
  * What a Line-up shows of a bike, whoever owns it: phone and server make it alike from the log.
@@ -162,6 +169,8 @@ export type Member = z.infer<typeof memberSchema>;
 export type MemberRoles = z.infer<typeof memberRolesSchema>;
 export type NewInvite = z.infer<typeof newInviteSchema>;
 export type Invite = z.infer<typeof inviteSchema>;
+export type Share = z.infer<typeof shareSchema>;
+export type LineUpPage = z.infer<typeof lineUpPageSchema>;
 export type LineUpPlace = (typeof lineUpOrder)[number];
 export type LineUpFacts = z.infer<typeof lineUpFactsSchema>;
 export type LineUpRow = z.infer<typeof lineUpRowSchema>;

@@ -1,4 +1,5 @@
 import type { EntryKind } from "../../shared/schemas/entry.ts";
+import { mailedPages } from "../../shared/schemas/mailed-pages.ts";
 
 /** Route patterns, with their link builders below: a screen's address is written here only. */
 export const patterns = {
@@ -11,8 +12,8 @@ export const patterns = {
   signIn: "/sign-in",
   signUp: "/sign-up",
   forgot: "/forgot",
-  reset: "/reset",
-  verify: "/verify",
+  reset: mailedPages.reset,
+  verify: mailedPages.verify,
 } as const;
 
 export const bikePath = (bikeId: string) => `/bikes/${bikeId}`;

@@ -188,7 +188,7 @@ describe("a mailed link", () => {
     const server = await startTestServer();
     const { user } = await signUpRider(server);
     for (let n = 0; n < 7; n++) await askForReset(server, user.email);
-    await server.mailer.settled();
+    await server.mailer.sendDue();
     const resets = server.mails().filter((mail) => mail.includes("Choose a new password for"));
     expect(resets).toHaveLength(5);
   });

@@ -35,7 +35,7 @@ it("a mail goes out by the mail server that is set up, its link in one piece", a
   const { letters, smtpUrl } = await startMailServer();
   const server = await startTestServer({ smtpUrl, mailFrom: "Sumpless <log@club.example>" });
   const { user } = await signUpRider(server, "Zoë <b>");
-  await server.mailer.settled();
+  await server.mailer.sendDue();
   const [letter] = letters;
   expect(letter!.to).toEqual([user.email]);
   expect(letter!.text).toContain("From: Sumpless <log@club.example>");

@@ -37,7 +37,7 @@ it("a mail that cannot be sent is logged without its address, and stops nobody",
   // Nothing listens on the discard port.
   const server = await startTestServer({ smtpUrl: "smtp://127.0.0.1:9" }, log);
   const { user } = await signUpRider(server);
-  await server.mailer.settled();
+  await server.mailer.sendDue();
   expect(text()).toContain("mail not sent");
   expect(text()).not.toContain(user.email);
 });

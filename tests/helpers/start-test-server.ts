@@ -38,7 +38,7 @@ export async function startTestServer(overrides: Partial<Config> = {}, log = cre
   const { dataDir, publicOrigin: origin } = config;
   const database = openDatabase(databaseFile(dataDir));
   await migrateDatabase(database, backupsDir(dataDir));
-  const { app, store, mailer } = createApp(config, database, log);
+  const { app, services, store, mailer } = createApp(config, database, log);
   const server = app.listen(0, "127.0.0.1");
   await once(server, "listening");
   const url = `http://127.0.0.1:${(server.address() as AddressInfo).port}`;
@@ -47,12 +47,22 @@ export async function startTestServer(overrides: Partial<Config> = {}, log = cre
     if (!server.listening) return;
     server.close();
     server.closeAllConnections();
-    await mailer.settled();
+    await mailer.sendDue();
     database.$client.close();
   }
   onTestFinished(stop);
 
-  return { url, origin, dataDir, database, store, mailer, mails: () => readMails(dataDir), stop };
+  return {
+    url,
+    origin,
+    dataDir,
+    database,
+    services,
+    store,
+    mailer,
+    mails: () => readMails(dataDir),
+    stop,
+  };
 }
 
 export type TestServer = Awaited<ReturnType<typeof startTestServer>>;

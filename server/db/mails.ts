@@ -1,0 +1,74 @@
+import { and, asc, eq, isNull, lt, lte, sql } from "drizzle-orm";
+import type { Letter } from "../mail/letter.ts";
+import type { Database } from "./open-database.ts";
+import { mails, type mailTopics } from "./schema.ts";
+
+export type MailTopic = (typeof mailTopics)[number];
+export type MailRow = typeof mails.$inferSelect;
+export type WaitingMail = Pick<MailRow, "id" | "topic" | "attempts" | "goodUntil"> & {
+  letter: Letter;
+};
+
+/** Nothing left to try, and nothing kept that could be read. */
+const settled = { letter: null, nextAttemptAt: null };
+
+export function createMails(db: Database) {
+  const { placeholder } = sql;
+  const waiting = db
+    .select({
+      id: mails.id,
+      topic: mails.topic,
+      attempts: mails.attempts,
+      goodUntil: mails.goodUntil,
+      letter: mails.letter,
+    })
+    .from(mails)
+    .where(lte(mails.nextAttemptAt, placeholder("now")))
+    .orderBy(asc(mails.nextAttemptAt))
+    .limit(placeholder("limit"))
+    .prepare();
+  const about = db
+    .select({ id: mails.id })
+    .from(mails)
+    .where(
+      and(
+        eq(mails.userId, placeholder("userId")),
+        eq(mails.topic, placeholder("topic")),
+        eq(mails.occasion, placeholder("occasion")),
+      ),
+    )
+    .prepare();
+  const change = (id: number, values: Partial<MailRow>) =>
+    db.update(mails).set(values).where(eq(mails.id, id)).run();
+
+  return {
+    /** Nothing where the account was written to about this occasion before. */
+    add: (mail: typeof mails.$inferInsert) =>
+      db.insert(mails).values(mail).onConflictDoNothing().run(),
+    isKnown: (userId: string, topic: MailTopic, occasion: string): boolean =>
+      about.get({ userId, topic, occasion }) !== undefined,
+    /** Those whose time has come, the longest waiting first. */
+    waiting: (now: number, limit: number): WaitingMail[] =>
+      waiting
+        .all({ now, limit })
+        .flatMap(({ letter, ...mail }) => (letter ? [{ ...mail, letter }] : [])),
+    markSent: (id: number, sentAt: string) => change(id, { ...settled, sentAt }),
+    postpone: (id: number, attempts: number, nextAttemptAt: number) =>
+      change(id, { attempts, nextAttemptAt }),
+    giveUp: (id: number) => change(id, settled),
+    removeInvitation: (inviteId: string) =>
+      db
+        .delete(mails)
+        .where(
+          and(isNull(mails.userId), eq(mails.topic, "invitation"), eq(mails.occasion, inviteId)),
+        )
+        .run(),
+    removeAbout: (bikeId: string) => db.delete(mails).where(eq(mails.bikeId, bikeId)).run(),
+    removeTo: (userId: string) => db.delete(mails).where(eq(mails.userId, userId)).run(),
+    removeBefore: (queuedAt: string) =>
+      db
+        .delete(mails)
+        .where(and(isNull(mails.nextAttemptAt), lt(mails.queuedAt, queuedAt)))
+        .run(),
+  };
+}

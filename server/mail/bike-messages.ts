@@ -1,0 +1,64 @@
+/** Letters about a bike, each of which can be ended by a click. */
+import { format, parseISO } from "date-fns";
+import type { Due } from "../../shared/schemas/summary.ts";
+import { compose, type Words } from "./compose.ts";
+import type { Message } from "./letter.ts";
+
+interface AboutBike {
+  bikeName: string;
+  link: string;
+  unsubscribe: NonNullable<Words["unsubscribe"]>;
+}
+
+const day = (date: string) => format(parseISO(date.slice(0, 10)), "d MMMM yyyy");
+const hours = (value: number) => `${Math.abs(value).toFixed(1)} engine hours`;
+
+/** What is known of when: hours by the last reading, and the likely date where there is one. */
+function whenDue({ inHours, onDate }: Due, readAt: string | null): string {
+  const byHours = inHours < 0 ? `${hours(inHours)} over` : `${hours(inHours)} left`;
+  const read = readAt ? `, by the reading of ${day(readAt)}` : "";
+  const byDate = onDate ? ` As the bike is ridden, that is about ${day(onDate)}.` : "";
+  return `There are ${byHours}${read}.${byDate}`;
+}
+
+export const dueMessage = ({
+  bikeName,
+  due,
+  readAt,
+  overdue,
+  ...about
+}: AboutBike & { due: Due; readAt: string | null; overdue: boolean }): Message =>
+  compose({
+    ...about,
+    subject: `${bikeName}: delivery check ${overdue ? "overdue" : "due soon"}`,
+    opening: [
+      `The next delivery check of ${bikeName} ${overdue ? "is overdue" : "is due soon"}. ${whenDue(due, readAt)}`,
+      due.reason,
+    ],
+    linkText: `Open ${bikeName}`,
+    closing: ["If you have ridden since, log the engine hours: the date follows them."],
+  });
+
+/** To the owner, or, naming the owner, to a mechanic of a club that the bike is shared with. */
+export const stopMessage = ({
+  bikeName,
+  ownerName,
+  authorName,
+  ratio,
+  ...about
+}: AboutBike & { ownerName: string | null; authorName: string; ratio: number | null }): Message => {
+  const whose = ownerName === null ? bikeName : `${bikeName}, the bike of ${ownerName},`;
+  const share = ratio === null ? "" : `, at ${Math.round(ratio * 100)} % of its baseline`;
+  return compose({
+    ...about,
+    subject: `${bikeName}: delivery low, stop`,
+    opening: [
+      `After an entry by ${authorName}, the delivery of ${whose} is judged low${share}. Stop, find the cause.`,
+      "Do not ride it before the cause is found and another check holds.",
+    ],
+    linkText: `Open ${bikeName}`,
+    closing: [
+      "The verdict is a guide: the maker's manual and a licensed mechanic come first. In doubt, do not ride.",
+    ],
+  });
+};

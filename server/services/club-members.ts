@@ -1,0 +1,47 @@
+import type { Member, MemberRoles } from "../../shared/schemas/club.ts";
+import type { Store } from "../db/store.ts";
+import { lastOrganiser, notFound } from "../problems.ts";
+import { endMembership } from "./end-membership.ts";
+import { assertMayRemove, maySeeMember, membershipAs } from "./permissions.ts";
+
+/** The members of clubs, each for the account that asks. */
+export function createClubMemberService(store: Store) {
+  function find(clubId: string, userId: string): Member {
+    const member = store.clubMembers.membersOf(clubId).find(({ id }) => id === userId);
+    if (!member) throw notFound();
+    return member;
+  }
+
+  /** A club is never without somebody who can invite and remove. */
+  function assertOrganiserLeft(clubId: string, without: string): void {
+    const members = store.clubMembers.membersOf(clubId);
+    if (!members.some(({ id, organiser }) => organiser && id !== without)) throw lastOrganiser();
+  }
+
+  return {
+    list(accountId: string, clubId: string): Member[] {
+      const viewer = membershipAs(store, accountId, clubId, "member");
+      const members = store.clubMembers.membersOf(clubId);
+      return members.filter((member) => maySeeMember(viewer, accountId, member));
+    },
+
+    setRoles: (accountId: string, clubId: string, userId: string, roles: MemberRoles): Member =>
+      store.write(() => {
+        membershipAs(store, accountId, clubId, "organiser");
+        const member = { ...find(clubId, userId), ...roles };
+        if (!member.organiser) assertOrganiserLeft(clubId, userId);
+        const { organiser, mechanic } = member;
+        store.clubMembers.setRoles(clubId, userId, { organiser, mechanic });
+        return member;
+      }),
+
+    /** Removes a member, or lets one leave; what that member shared is shared no more. */
+    remove(accountId: string, clubId: string, userId: string): void {
+      store.write(() => {
+        assertMayRemove(store, accountId, clubId, userId);
+        if (find(clubId, userId).organiser) assertOrganiserLeft(clubId, userId);
+        endMembership(store, clubId, userId);
+      });
+    },
+  };
+}

@@ -1,0 +1,48 @@
+import { addDays, formatISO, subDays } from "date-fns";
+import { setImmediate } from "node:timers/promises";
+import { DUE_SOON_HOURS } from "../../shared/schemas/club.ts";
+import type { DueBike } from "../db/due-bikes.ts";
+import { dueMessage } from "../mail/bike-messages.ts";
+import { aboutBike } from "./about-bike.ts";
+import type { MailParts } from "./mail-parts.ts";
+
+/** A check whose likely date is this close is due soon. */
+const SOON_DAYS = 7;
+/** About one bike nothing more is sent for so long. */
+const QUIET_DAYS = 7;
+const GOOD_DAYS = 3;
+
+const dateOf = (time: Date) => formatISO(time, { representation: "date" });
+
+/** Once when it is due soon and once when it is overdue; another check begins anew. */
+function mailDue(parts: MailParts, { due, readAt, ...bike }: DueBike, now: Date): void {
+  const { bikeId, name: bikeName, userId, email } = bike;
+  const overdue = due.overdue || (due.onDate !== null && due.onDate < dateOf(now));
+  const occasion = `${bikeId} ${overdue ? "overdue" : "soon"} ${due.atHours.toFixed(1)}`;
+  if (parts.store.mails.isKnown(userId, "due", occasion)) return;
+  parts.mailer.queue({
+    ...{ topic: "due", userId, bikeId, to: email, occasion },
+    goodUntil: addDays(now, GOOD_DAYS).getTime(),
+    message: dueMessage({
+      ...aboutBike(parts, { bikeId, bikeName, userId }, "dueMails"),
+      ...{ due, readAt, overdue },
+    }),
+  });
+}
+
+/**
+ * Reminds the owners whose bikes' checks are due soon or overdue, by engine hours or by the likely
+ * date. Whom it told stands in the database, so that it may run at any time, as often as one likes.
+ */
+export async function mailAllDue(parts: MailParts, now = new Date()): Promise<void> {
+  const found = parts.store.dueBikes.find({
+    inHours: DUE_SOON_HOURS,
+    onDate: dateOf(addDays(now, SOON_DAYS)),
+    remindedSince: subDays(now, QUIET_DAYS).toISOString(),
+  });
+  for (const bike of found) {
+    parts.store.write(() => mailDue(parts, bike, now));
+    // Requests come first.
+    await setImmediate();
+  }
+}

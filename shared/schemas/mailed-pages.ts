@@ -1,0 +1,7 @@
+/** The pages that links in mails and invites lead to, each with `?token=`. */
+export const mailedPages = {
+  verify: "/verify",
+  reset: "/reset",
+  join: "/join",
+  unsubscribe: "/unsubscribe",
+} as const;
