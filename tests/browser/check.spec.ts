@@ -85,7 +85,7 @@ test("A rider can do a first check with no signal, reloading at every step", asy
   rider,
   server,
 }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(180_000);
   await signUp(page, rider.email);
   await link(page, "Add a bike").click();
   await page.getByLabel("Name").fill("Heather");
@@ -312,6 +312,7 @@ test("A check saved with its close-out open is closed out later from the Shed", 
   await page.getByRole("region", { name: "Moss" }).getByRole("link", { name: /close/i }).click();
   await closeOut(page);
   await button(page, "Save the close-out").click();
+  await expect(page).toHaveURL(`/bikes/${bikeId}`);
   await page.goto("/");
   await expect(page.getByText("Ride on")).toBeVisible();
   await expect(page.getByText("Hose may be off: do not start")).toBeHidden();
