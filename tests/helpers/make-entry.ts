@@ -1,5 +1,5 @@
 import { v7 as uuid } from "uuid";
-import type { EntryBody, EntryKind } from "../../shared/schemas/entry.ts";
+import type { Action, EntryBody, EntryKind, WorkItem } from "../../shared/schemas/entry.ts";
 
 export const newId = () => uuid();
 
@@ -16,8 +16,13 @@ export const bikeEntry = (bikeId: string, body: EntryBody<"bike"> = { name: "Mos
   make(bikeId, "bike", null, body);
 export const hoursEntry = (bikeId: string, hours: number, at?: string) =>
   make(bikeId, "hours", hours, {}, at);
-export const noteEntry = (bikeId: string, text = "Chain oiled") =>
-  make(bikeId, "note", null, { text });
+export const noteEntry = (bikeId: string, text = "Chain oiled", advice?: Action) =>
+  make(bikeId, "note", null, { text, ...(advice && { advice }) });
+export const workEntry = (bikeId: string, hours: number, items: WorkItem[]) =>
+  make(bikeId, "work", hours, { items, startsSeries: false });
+export const meterEntry = (bikeId: string, hours: number, newReading: number) =>
+  make(bikeId, "meter", hours, { newReading });
+export const topupEntry = (bikeId: string, oilMl: number) => make(bikeId, "topup", null, { oilMl });
 export const strikeEntry = (bikeId: string, entryId: string) =>
   make(bikeId, "strike", null, { entryId, reason: "Wrong bike" });
 

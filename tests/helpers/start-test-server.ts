@@ -53,6 +53,7 @@ export async function startTestServer(overrides: Partial<Config> = {}, log = cre
   onTestFinished(stop);
 
   return {
+    app,
     url,
     origin,
     dataDir,
