@@ -42,7 +42,7 @@ export default tseslint.config(
   {
     languageOptions: {
       parserOptions: {
-        projectService: { allowDefaultProject: ["*.js"] },
+        projectService: { allowDefaultProject: ["*.js", "public/*.js"] },
         tsconfigRootDir: import.meta.dirname,
       },
       globals: { ...globals.node },
@@ -103,5 +103,6 @@ export default tseslint.config(
     files: ["tests/browser/**/*.ts"],
     rules: { "no-empty-pattern": ["error", { allowObjectPatternsAsParameters: true }] },
   },
-  { files: ["*.js"], ...tseslint.configs.disableTypeChecked },
+  { files: ["**/*.js"], ...tseslint.configs.disableTypeChecked },
+  { files: ["public/*.js"], languageOptions: { globals: globals.browser } },
 );
