@@ -39,7 +39,7 @@ export function LogSection({ bike, history, onStrike }: Props) {
           ...kindsIn(lines).map((value) => ({ value, label: kindWords[value] })),
         ]}
       />
-      <ol className="flex flex-col">
+      <ol aria-label="Entries, newest first" className="flex flex-col">
         {wanted.slice(0, shown).map((line) => (
           <LogEntryLine
             key={line.kept.entry.id}
