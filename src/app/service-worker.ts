@@ -8,13 +8,25 @@ const listeners = new Set<Listener>();
 let worker: Workbox | null = null;
 let waiting = false;
 
-function setWaiting(): void {
-  waiting = true;
+function setWaiting(now: boolean): void {
+  waiting = now;
   for (const listener of [...listeners]) listener();
 }
 
-/** The new version has taken over, perhaps at the word of another tab. */
-const reload = () => void whenUpdatesFree(() => window.location.reload());
+/** A new version has taken over, perhaps at the word of another tab. */
+function onTakenOver(): void {
+  setWaiting(false);
+  void whenUpdatesFree(() => window.location.reload());
+}
+
+/** The first version to take charge of a page is no new one. */
+function watchController({ serviceWorker }: Navigator): void {
+  let controlled = serviceWorker.controller !== null;
+  serviceWorker.addEventListener("controllerchange", () => {
+    if (controlled) onTakenOver();
+    controlled = true;
+  });
+}
 
 const checkWhenSeen = () => {
   if (document.visibilityState === "visible") void worker?.update().catch(() => undefined);
@@ -25,8 +37,8 @@ export async function registerServiceWorker(): Promise<void> {
   if (worker || !import.meta.env.PROD || !("serviceWorker" in navigator)) return;
   const { Workbox } = await import("workbox-window");
   worker = new Workbox("/sw.js");
-  worker.addEventListener("waiting", setWaiting);
-  worker.addEventListener("controlling", (event) => event.isUpdate && reload());
+  worker.addEventListener("waiting", () => setWaiting(true));
+  watchController(navigator);
   document.addEventListener("visibilitychange", checkWhenSeen);
   // With no network there is nothing to register, and nothing amiss.
   await worker.register().catch(() => undefined);
@@ -45,5 +57,12 @@ function subscribe(listener: Listener): () => void {
 export const useUpdateReady = (): boolean =>
   useSyncExternalStore(subscribe, () => waiting && !updatesHeld());
 
+const HEED_MS = 2_000;
+
 /** Puts the new version in place once no form is open in any tab; the page then loads anew. */
-export const applyUpdate = (): Promise<void> => whenUpdatesFree(() => worker?.messageSkipWaiting());
+export async function applyUpdate(): Promise<void> {
+  await whenUpdatesFree(() => worker?.messageSkipWaiting());
+  // Chrome sits on it for half a minute if the old version was just waking up; said once more, it
+  // moves at once.
+  setTimeout(() => waiting && void applyUpdate(), HEED_MS);
+}
