@@ -95,5 +95,7 @@ export function createBikeShares(db: Database) {
     /** The rows of a club's board that come after a place, worst first. */
     board: (clubId: string, after: Omit<BoardRow, "json">, limit: number): BoardRow[] =>
       boardPage.all({ clubId, ...after, limit }),
+    /** How a board is read, for those who watch over its cost. */
+    boardQuery: () => board.toSQL(),
   };
 }

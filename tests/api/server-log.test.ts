@@ -1,20 +1,7 @@
-import { Writable } from "node:stream";
 import { expect, it } from "vitest";
-import { createLog } from "../../server/log.ts";
+import { keepLog } from "../helpers/keep-log.ts";
 import { PASSWORD, signUpRider } from "../helpers/rider.ts";
 import { startTestServer } from "../helpers/start-test-server.ts";
-
-/** A log kept in memory. */
-function keepLog(level: string) {
-  const lines: string[] = [];
-  const to = new Writable({
-    write(chunk: Buffer, _encoding, done) {
-      lines.push(chunk.toString());
-      done();
-    },
-  });
-  return { log: createLog(level, to), text: () => lines.join("") };
-}
 
 it("the server's log holds no secret, no token and no address of a person", async () => {
   const { log, text } = keepLog("trace");
