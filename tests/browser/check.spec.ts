@@ -1,84 +1,18 @@
-import type { Page } from "@playwright/test";
-import type { LogEntry } from "../../shared/schemas/entry.ts";
-import { syncResponseSchema } from "../../shared/schemas/sync.ts";
-import { bikeEntry, checkEntry, newId } from "../helpers/make-entry.ts";
-import { expect, expectAccessible, Rider, signUp, test } from "./fixtures.ts";
-
-const short = { seconds: 30, rhythm: "steady", nominalMl: 3 } as const;
-const daysAgo = (days: number) => new Date(Date.now() - days * 86_400_000).toISOString();
-
-async function signIn(page: Page, email: string): Promise<void> {
-  await page.goto("/sign-in");
-  await page.getByLabel("E-mail").fill(email);
-  await page.getByLabel("Password", { exact: true }).fill(Rider.password);
-  await page.getByRole("button", { name: "Sign in" }).click();
-  await expect(page).toHaveURL("/");
-}
-
-/** A bike whose sequence is known, with a baseline of 3 mL from four runs at 12.0 h. */
-async function withBaseline(page: Page, rider: Rider): Promise<string> {
-  const bikeId = newId();
-  const baseline = checkEntry(bikeId, 12, 3, daysAgo(40));
-  baseline.body.runs = Array.from({ length: 4 }, () => ({ startMl: 0, endMl: 3 }));
-  await rider.signUp();
-  await rider.push([bikeEntry(bikeId, { name: "Moss", sequence: short }), baseline]);
-  await signIn(page, rider.email);
-  await expect(page.getByRole("region", { name: "Moss" })).toBeVisible();
-  return bikeId;
-}
-
-/** Everything the app needs is on the phone: from here on it works with the server gone. */
-async function installed(page: Page): Promise<void> {
-  await page.evaluate(() => navigator.serviceWorker.ready);
-  await page.reload();
-  await expect
-    .poll(() => page.evaluate(() => navigator.serviceWorker.controller !== null))
-    .toBe(true);
-}
-
-const button = (page: Page, name: string | RegExp) => page.getByRole("button", { name });
-const link = (page: Page, name: string | RegExp) => page.getByRole("link", { name });
-const field = (page: Page, name: string) => page.getByRole("textbox", { name });
-const heading = (page: Page, name: string | RegExp) =>
-  page.getByRole("heading", { name, level: 1 });
-
-async function expectNoSidewaysScroll(page: Page): Promise<void> {
-  const [content = 0, screen = 0] = await page.evaluate(() => [
-    document.documentElement.scrollWidth,
-    window.innerWidth,
-  ]);
-  expect(content).toBeLessThanOrEqual(screen);
-}
-
-/** A step stands the same after the page is loaded anew, and axe finds nothing wrong with it. */
-async function expectStep(page: Page, title: string | RegExp): Promise<void> {
-  await expect(heading(page, title)).toBeVisible();
-  await page.reload();
-  await expect(heading(page, title)).toBeVisible();
-  await expectAccessible(page);
-  await expectNoSidewaysScroll(page);
-}
-
-/** One run of a known sequence: started, waited for and read. */
-async function runAndRead(page: Page, startMl: string, endMl: string): Promise<void> {
-  await field(page, "Level before the run").fill(startMl);
-  await button(page, /^Start$/).click();
-  await page.clock.runFor(61_000);
-  await link(page, "Read the level").click();
-  await field(page, "Level after the run").fill(endMl);
-  await button(page, "That is the level").click();
-}
-
-async function closeOut(page: Page): Promise<void> {
-  for (const tick of await page.getByRole("checkbox").all()) await tick.check();
-}
-
-/** The entries of the rider's one bike, as the server has them. */
-async function entriesOnServer(rider: Rider): Promise<LogEntry[]> {
-  const answer = await rider.call("POST", "/api/sync", { known: {}, entries: [] });
-  const { bikes } = syncResponseSchema.parse(await answer.json());
-  return (bikes[0]?.entries ?? []) as unknown as LogEntry[];
-}
+import {
+  button,
+  closeOut,
+  entriesOnServer,
+  expectNoSidewaysScroll,
+  expectStep,
+  field,
+  heading,
+  installed,
+  link,
+  runAndRead,
+  short,
+  withBaseline,
+} from "./check-scene.ts";
+import { expect, expectAccessible, signUp, test } from "./fixtures.ts";
 
 test("A rider can do a first check with no signal, reloading at every step", async ({
   page,
@@ -185,79 +119,6 @@ test("A rider can do a first check with no signal, reloading at every step", asy
   expect(entries.at(-2)).toMatchObject({ kind: "bike", body: { sequence: short } });
 });
 
-test("A rider who knows it saves a check with at most six taps and two numbers", async ({
-  page,
-  rider,
-}) => {
-  await withBaseline(page, rider);
-  let taps = 0;
-  const tap = async (target: ReturnType<typeof button>) => {
-    taps += 1;
-    await target.click();
-  };
-  await tap(
-    page.getByRole("region", { name: "Moss" }).getByRole("link", { name: "Delivery check" }),
-  );
-  await tap(link(page, "Quick form"));
-  await tap(field(page, "Engine hours"));
-  await page.keyboard.type("32");
-  await tap(field(page, "Run 1: level after"));
-  await page.keyboard.type("2,95");
-  await expect(page.getByRole("region", { name: "So far" })).toContainText("Ride on");
-  await tap(page.getByRole("checkbox", { name: /Closed out/ }));
-  await tap(button(page, "Save the check"));
-  await expect(heading(page, "Result")).toBeVisible();
-  await expect(page.getByText(/^(Saved on this phone|Sent)$/)).toBeVisible();
-  await expect(page.getByText("Delivery holding")).toBeVisible();
-  await expectAccessible(page);
-  expect(taps).toBeLessThanOrEqual(6);
-});
-
-test("A rider with a delivery low is told to stop, finds the cause and writes down what was done", async ({
-  page,
-  rider,
-}) => {
-  const bikeId = await withBaseline(page, rider);
-  await page.goto(`/bikes/${bikeId}/check/quick`);
-  await field(page, "Engine hours").fill("32");
-  await field(page, "Run 1: level after").fill("2.3");
-  await page.getByRole("checkbox", { name: /Closed out/ }).check();
-  await expectAccessible(page);
-  await button(page, "Save the check").click();
-
-  await expect(page.getByText("Stop, find the cause")).toBeVisible();
-  await expect(page.getByText("Delivery low", { exact: true })).toBeVisible();
-  await expect(page.getByText(/sure the delivery is below the limit/)).toBeVisible();
-  await expect(page.getByText(/your syringe’s 0.2 mL marks/)).toBeVisible();
-  await expect(page.getByRole("img", { name: /^Delivery 2.29.*under the limit/ })).toBeVisible();
-  await expect(page.getByRole("heading", { name: "Next check: now" })).toBeVisible();
-
-  await page.getByText("Mixing oil into the fuel").click();
-  await expect(page.getByText("It never lifts a stop")).toBeVisible();
-  await page.getByRole("textbox", { name: "Fuel to oil" }).fill("1:80");
-  await expect(page.getByText(/Oil to mix in: 63/)).toBeVisible();
-
-  await page.getByRole("checkbox", { name: /Oil level and tank vent/ }).check();
-  await page.getByRole("checkbox", { name: /Pump replaced/ }).check();
-  await page.reload();
-  await expect(page.getByRole("checkbox", { name: /Pump replaced/ })).toBeChecked();
-  await expect(page.getByRole("checkbox", { name: /Start a new baseline/ })).toBeChecked();
-  await expectAccessible(page);
-  await button(page, "Write it in the log").click();
-  await expect(page.getByText("Written in the log: saved on this phone.")).toBeVisible();
-  await expect(page.getByText(/^All sent/)).toBeVisible();
-  const work = (await entriesOnServer(rider)).at(-1);
-  expect(work).toMatchObject({
-    kind: "work",
-    hours: 32,
-    body: {
-      items: ["other", "pump-renewed"],
-      startsSeries: true,
-      note: "Oil level and tank vent looked at.",
-    },
-  });
-});
-
 test("A check given up after its first run keeps the bike from being started until it is closed out", async ({
   page,
   rider,
@@ -293,28 +154,6 @@ test("A check given up after its first run keeps the bike from being started unt
   await expect(page).toHaveURL(`/bikes/${bikeId}`);
   await page.goto("/");
   await expect(page.getByRole("region", { name: "Moss" })).toBeVisible();
-  await expect(page.getByText("Hose may be off: do not start")).toBeHidden();
-});
-
-test("A check saved with its close-out open is closed out later from the Shed", async ({
-  page,
-  rider,
-}) => {
-  const bikeId = await withBaseline(page, rider);
-  await page.goto(`/bikes/${bikeId}/check/quick`);
-  await field(page, "Engine hours").fill("32");
-  await field(page, "Run 1: level after").fill("3");
-  await button(page, "Save the check").click();
-  await expect(page.getByText("Hose may be off: do not start")).toBeVisible();
-  await expect(page.getByText("Delivery holding")).toBeVisible();
-  await expect(page.getByText("Ride on")).toBeHidden();
-  await link(page, "To the Shed").click();
-  await page.getByRole("region", { name: "Moss" }).getByRole("link", { name: /close/i }).click();
-  await closeOut(page);
-  await button(page, "Save the close-out").click();
-  await expect(page).toHaveURL(`/bikes/${bikeId}`);
-  await page.goto("/");
-  await expect(page.getByText("Ride on")).toBeVisible();
   await expect(page.getByText("Hose may be off: do not start")).toBeHidden();
 });
 
@@ -428,99 +267,6 @@ test("A rider can do the whole check by keyboard alone", async ({ page, rider })
     await press(name, "Space");
   await press(/Save the check/);
   await expect(heading(page, "Result")).toBeFocused();
-});
-
-test("A check whose saving fails keeps all that was typed", async ({ page, rider }) => {
-  const bikeId = await withBaseline(page, rider);
-  await page.goto(`/bikes/${bikeId}/check/quick`);
-  await field(page, "Engine hours").fill("32");
-  await field(page, "Run 1: level after").fill("2,9");
-  await page.getByRole("textbox", { name: "Note" }).fill("Windy.");
-  await page.evaluate(() => {
-    const whole = Object.getOwnPropertyDescriptor(IDBObjectStore.prototype, "add") ?? {};
-    const mend = () => Object.defineProperty(IDBObjectStore.prototype, "add", whole);
-    Object.assign(window, { mend });
-    IDBObjectStore.prototype.add = () => {
-      throw new DOMException("No room.", "QuotaExceededError");
-    };
-  });
-  await button(page, "Save the check").click();
-  await expect(page.getByRole("alert")).toContainText("Not saved yet");
-  await expect(field(page, "Run 1: level after")).toHaveValue("2,9");
-  await expect(page.getByRole("textbox", { name: "Note" })).toHaveValue("Windy.");
-
-  await page.evaluate(() => (window as unknown as { mend: () => void }).mend());
-  await button(page, "Save the check").click();
-  await expect(heading(page, "Result")).toBeVisible();
-  await page.goto(`/bikes/${bikeId}/check/quick`);
-  await expect(field(page, "Run 1: level after")).toHaveValue("");
-});
-
-test("Every wrong field of the quick form is told by a sentence of its own", async ({
-  page,
-  rider,
-}) => {
-  const bikeId = await withBaseline(page, rider);
-  await page.goto(`/bikes/${bikeId}/check/quick`);
-  await field(page, "Engine hours").fill("");
-  await field(page, "Run 1: level before").fill("1");
-  await field(page, "Run 1: level after").fill("0.5");
-  await field(page, "Oil temperature").fill("warm");
-  await button(page, "Save the check").click();
-  await expect(page.getByText("Type the engine hours as the meter shows them.")).toBeVisible();
-  await expect(page.getByText("The end level is below the start level.")).toBeVisible();
-  await expect(page.getByText(/oil’s temperature in figures/)).toBeVisible();
-  await expectAccessible(page);
-  await field(page, "Engine hours").fill("32");
-  await field(page, "Run 1: level after").fill("9");
-  await field(page, "Oil temperature").fill("");
-  await expect(page.getByText("This level is far beyond the 5 mL barrel.")).toBeVisible();
-  await page.reload();
-  await expect(field(page, "Run 1: level after")).toHaveValue("9");
-  await button(page, "Start afresh").click();
-  await expect(field(page, "Run 1: level after")).toHaveValue("");
-});
-
-for (const timezoneId of ["Pacific/Kiritimati", "America/St_Johns"]) {
-  test.describe(timezoneId, () => {
-    test.use({ timezoneId });
-    test("An old note goes in by its volume, in the rider's own time", async ({ page, rider }) => {
-      const bikeId = await withBaseline(page, rider);
-      await page.goto(`/bikes/${bikeId}/check/quick`);
-      await page.getByText("Volume alone").click();
-      await field(page, "Run 1: delivered").fill("2,9");
-      await page.getByRole("combobox", { name: "Syringe" }).selectOption("Not known");
-      await page.getByText(/^When:/).click();
-      await page.getByLabel("Checked at").fill("2025-07-01T23:30");
-      await page.getByRole("checkbox", { name: "The hours are an estimate" }).check();
-      await field(page, "Engine hours, estimated").fill("8");
-      await page.getByRole("checkbox", { name: /Closed out/ }).check();
-      await expect(page.getByText(/marks of 0.2 mL are assumed/).first()).toBeVisible();
-      await button(page, "Save the check").click();
-      await expect(heading(page, "Result")).toBeVisible();
-      await expect(page.getByText("1 Jul 2025, 23:30")).toBeVisible();
-      await expect(page.getByText("The engine hours of this check are an estimate.")).toBeVisible();
-    });
-  });
-}
-
-test("A bike with an hours-and-minutes meter takes 12:30 in the check", async ({ page, rider }) => {
-  const bikeId = newId();
-  await rider.signUp();
-  await rider.push([
-    bikeEntry(bikeId, { name: "Moss", meterFormat: "hh:mm" }),
-    checkEntry(bikeId, 12, 3, daysAgo(9)),
-  ]);
-  await signIn(page, rider.email);
-  await page.goto(`/bikes/${bikeId}/check/quick`);
-  await expect(page.getByRole("textbox", { name: "Hours" })).toHaveValue("12");
-  await page.getByRole("textbox", { name: "Minutes" }).fill("30");
-  await field(page, "Run 1: level after").fill("3");
-  await page.getByRole("checkbox", { name: /Closed out/ }).check();
-  await button(page, "Save the check").click();
-  await expect(page.getByText(/At 32:30/)).toBeVisible();
-  await expect(page.getByText(/^All sent/)).toBeVisible();
-  expect((await entriesOnServer(rider)).at(-1)?.hours).toBe(12.5);
 });
 
 test("The check fits 320 px with letters twice as large", async ({ page, rider }) => {

@@ -83,7 +83,7 @@ function OpenCheckCard({ draft, onGiveUp }: { draft: CheckDraft; onGiveUp: () =>
     <Notice tone="caution" title="A check is half done">
       <p>
         Begun {formatWhen(draft.at)}; {read === 1 ? "1 run" : `${read} runs`} read. Everything is as
-        you left it.
+        you left it.{draft.hoseMaybeOff && " The hose may be off: do not start the engine."}
       </p>
       <Button onClick={onGiveUp}>Give it up</Button>
     </Notice>

@@ -96,7 +96,7 @@ export function QuickForm({ record, live, begin, syringes }: Props) {
         baselineC={record.summary.series.at(-1)?.baseline?.oilTempC ?? null}
         value={draft.oilTempText}
         onChange={(oilTempText) => patch({ oilTempText })}
-        error={shown.oilTemp}
+        error={shown.oilTemp ?? shown["body.oilTempC"]}
       />
       <TextArea
         label="Note"

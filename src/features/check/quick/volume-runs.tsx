@@ -15,7 +15,7 @@ export function VolumeRuns({ draft, edit, errors }: QuickRunsProps) {
         <NumberField
           key={index}
           label={`Run ${index + 1}: delivered`}
-          error={errors[`volumes.${index}`]}
+          error={errors[`volumes.${index}`] ?? errors[`body.runs.${index}.deliveredMl`]}
           value={volume}
           onChange={(text) =>
             setVolumes((volumes) => volumes.map((one, at) => (at === index ? text : one)))

@@ -25,30 +25,32 @@ export function CheckFigures({ summary, check, body, sequence }: Props) {
   const { delivery } = measureDelivery(body, sequence);
   const sessionMl = ratio !== null && baseline ? ratio * baseline.perRunMl : perRunMl;
   return (
-    <dl className="flex flex-col gap-2 text-lg">
-      <Figure name="Delivery a run">
-        <strong className="text-[min(1.5rem,9vw)]">{formatMlGiveOrTake(perRunMl, uMl)}</strong>
-      </Figure>
-      {ratio !== null && uRatio !== null && (
-        <Figure name="Of baseline">
-          <strong className="text-[min(1.5rem,9vw)]">
-            {formatPercent(ratio)} ± {formatPercent(GIVE_OR_TAKE * uRatio)}
-          </strong>
+    <>
+      <dl className="flex flex-col gap-2 text-lg">
+        <Figure name="Delivery a run">
+          <strong className="text-[min(1.5rem,9vw)]">{formatMlGiveOrTake(perRunMl, uMl)}</strong>
         </Figure>
-      )}
-      {Math.abs(sessionMl - perRunMl) > 0.005 && (
-        <Figure name="Together">
-          {formatMl(sessionMl)}: judged with the other checks of this hour
-        </Figure>
-      )}
-      <Figure name="Runs counted">{runsCounted}</Figure>
+        {ratio !== null && uRatio !== null && (
+          <Figure name="Of baseline">
+            <strong className="text-[min(1.5rem,9vw)]">
+              {formatPercent(ratio)} ± {formatPercent(GIVE_OR_TAKE * uRatio)}
+            </strong>
+          </Figure>
+        )}
+        {Math.abs(sessionMl - perRunMl) > 0.005 && (
+          <Figure name="Together">
+            {formatMl(sessionMl)}: judged with the other checks of this hour
+          </Figure>
+        )}
+        <Figure name="Runs counted">{runsCounted}</Figure>
+      </dl>
       {delivery && (
-        <Figure name="Most of the ±">
-          comes from{" "}
-          {largestUncertainty(delivery.components, body.syringe, body.oilTempC !== undefined)}
-        </Figure>
+        <p className="text-lg">
+          Most of the ± comes from{" "}
+          {largestUncertainty(delivery.components, body.syringe, body.oilTempC !== undefined)}.
+        </p>
       )}
-    </dl>
+    </>
   );
 }
 

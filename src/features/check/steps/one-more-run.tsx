@@ -1,3 +1,4 @@
+import { measureDelivery } from "../../../../shared/delivery/measure-delivery.ts";
 import {
   formatMl,
   formatMlGiveOrTake,
@@ -6,6 +7,7 @@ import {
 } from "../../../ui/format-quantity.ts";
 import { checkBody, checkEntry, type CheckEntry } from "../draft/check-entry.ts";
 import { runStatistics, uncertaintyMl, withOneMoreRun } from "../draft/one-more-run.ts";
+import { CheckFlags } from "../result/check-flags.tsx";
 import { useOpenCheck } from "../open-check.ts";
 import { usePreview } from "../use-preview.ts";
 
@@ -13,21 +15,23 @@ import { usePreview } from "../use-preview.ts";
 export function OneMoreRun() {
   const { draft, record, sequence } = useOpenCheck();
   const body = checkBody(draft, sequence);
+  const { delivery, flags } = measureDelivery(body, sequence);
   const statistics = runStatistics(body);
-  const uMl = uncertaintyMl(body, sequence);
   const thenMl = uncertaintyMl(withOneMoreRun(body), sequence);
-  if (!statistics || uMl === null || thenMl === null) return null;
   return (
     <div className="flex flex-col gap-2">
-      <p className="text-lg">
-        Mean{" "}
-        <strong className="block text-[min(2.25rem,9vw)] tabular-nums">
-          {formatMlGiveOrTake(statistics.meanMl, uMl)}
-        </strong>
-        {statistics.count > 1 && `The runs lie ${formatMl(statistics.spreadMl)} apart. `}
-        One more run like {statistics.count > 1 ? "these" : "this"} would make it ±{" "}
-        {formatMl(GIVE_OR_TAKE * thenMl)}.
-      </p>
+      {statistics && delivery && thenMl !== null && (
+        <p className="text-lg">
+          Mean{" "}
+          <strong className="block text-[min(2.25rem,9vw)] tabular-nums">
+            {formatMlGiveOrTake(statistics.meanMl, delivery.uMl)}
+          </strong>
+          {statistics.count > 1 && `The runs lie ${formatMl(statistics.spreadMl)} apart. `}
+          One more run like {statistics.count > 1 ? "these" : "this"} would make it{" "}
+          {`±\u00a0${formatMl(GIVE_OR_TAKE * thenMl)}`}.
+        </p>
+      )}
+      <CheckFlags flags={flags} spoilers={[]} />
       <Certainty entry={checkEntry(draft, { bikeId: record.bikeId, sequence })} />
     </div>
   );
