@@ -1,17 +1,18 @@
 import { lazy, Suspense, useMemo, useState } from "react";
-import { Link } from "react-router-dom";
 import { useOpenChecks, type BikeWithLog, type KeptEntry } from "../../offline/index.ts";
 import { ButtonLink } from "../../ui/button-link.tsx";
 import { Page } from "../../ui/page.tsx";
-import { bikeDetailsPath, checkPath, patterns } from "../../ui/paths.ts";
+import { backToLineUp } from "../../ui/last-line-up.ts";
+import { checkPath, patterns } from "../../ui/paths.ts";
+import { isStop, StopAdvised } from "../../ui/stop-advised.tsx";
 import { CheckTable } from "./checks/check-table.tsx";
 import { countedEntries } from "./counted-entries.ts";
 import { deliveryHistory } from "./history/delivery-history.ts";
+import { Identity } from "./identity.tsx";
 import { LogSection } from "./log/log-section.tsx";
 import { StrikeSheet } from "./log/strike-sheet.tsx";
 import { DoubtfulReadings } from "./now/doubtful-readings.tsx";
 import { HoseMaybeOff } from "./now/hose-maybe-off.tsx";
-import { SavedNotice } from "./saved-notice.tsx";
 import { WhatToDo } from "./now/what-to-do.tsx";
 
 const DeliveryChart = lazy(() => import("./chart/delivery-chart.tsx"));
@@ -19,7 +20,7 @@ const DeliveryChart = lazy(() => import("./chart/delivery-chart.tsx"));
 /** One bike: what to do now, how its delivery went, and everything written about it. */
 export function BikePage({ bike }: { bike: BikeWithLog }) {
   const { record, log } = bike;
-  const { bikeId, ownerId, details, summary } = record;
+  const { bikeId, access, ownerId, details, summary, advice } = record;
   const history = useMemo(() => deliveryHistory(ownerId, countedEntries(log)), [ownerId, log]);
   const [striking, setStriking] = useState<KeptEntry | null>(null);
   const openCheck = useOpenChecks().find((check) => check.bikeId === bikeId);
@@ -28,7 +29,7 @@ export function BikePage({ bike }: { bike: BikeWithLog }) {
   return (
     <Page
       title={details.name}
-      back={{ to: patterns.shed, label: "Shed" }}
+      back={access === "owner" ? { to: patterns.shed, label: "Shed" } : backToLineUp()}
       wide
       action={
         <ButtonLink look="primary" wide to={checkPath(bikeId)}>
@@ -37,9 +38,10 @@ export function BikePage({ bike }: { bike: BikeWithLog }) {
       }
     >
       <Identity bike={bike} />
+      {isStop(advice) && <StopAdvised advice={advice} />}
       {hoseMaybeOff && <HoseMaybeOff bikeId={bikeId} />}
       <DoubtfulReadings bike={bike} onStrike={setStriking} />
-      <WhatToDo record={record} history={history} hoseMaybeOff={hoseMaybeOff} />
+      <WhatToDo record={record} history={history} mayRide={!hoseMaybeOff && !isStop(advice)} />
       <div className="mt-4 grid gap-8 min-[900px]:grid-cols-2">
         {history.points.length > 0 && (
           <section aria-labelledby="checks" className="flex min-w-0 flex-col gap-4">
@@ -56,25 +58,5 @@ export function BikePage({ bike }: { bike: BikeWithLog }) {
       </div>
       {striking && <StrikeSheet kept={striking} onClose={() => setStriking(null)} />}
     </Page>
-  );
-}
-
-/** What bike it is, and the way to its details. */
-function Identity({ bike: { record } }: { bike: BikeWithLog }) {
-  const { make, model, year, retired } = record.details;
-  const words = [make, model, year, retired && "Retired"].filter(Boolean).join(" · ");
-  return (
-    <div className="-mt-3 flex flex-wrap items-center gap-x-4">
-      {words && <p className="text-soft">{words}</p>}
-      {record.access === "owner" && (
-        <Link
-          to={bikeDetailsPath(record.bikeId)}
-          className="flex min-h-target items-center font-bold text-oil"
-        >
-          Details and settings
-        </Link>
-      )}
-      <SavedNotice />
-    </div>
   );
 }

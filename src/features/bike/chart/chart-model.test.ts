@@ -12,7 +12,10 @@ const moss = () => logbook().bike({ name: "Moss" });
 
 /** Six runs each leave little doubt of the decline. */
 const declining = () =>
-  [3, 2.9, 2.8, 2.7].reduce((book, ml, i) => book.check(10 + 20 * i, Array<number>(6).fill(ml)), moss());
+  [3, 2.9, 2.8, 2.7].reduce(
+    (book, ml, i) => book.check(10 + 20 * i, Array<number>(6).fill(ml)),
+    moss(),
+  );
 
 describe("chartModel", () => {
   it("draws every check with a place, and both limits", () => {

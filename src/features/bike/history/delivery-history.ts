@@ -4,11 +4,11 @@ import { bikeDetails } from "../../../../shared/logbook/bike-details.ts";
 import { judgeSeries, type JudgedSeries } from "../../../../shared/logbook/judge-series.ts";
 import { lifetimeHours } from "../../../../shared/logbook/lifetime-hours.ts";
 import { standingEntries } from "../../../../shared/logbook/standing-entries.ts";
-import type { LogEntry, Syringe } from "../../../../shared/schemas/entry.ts";
+import type { LogEntry, LogEntryOf, Syringe } from "../../../../shared/schemas/entry.ts";
 import type { Baseline } from "../../../../shared/schemas/summary.ts";
 import { ofBaseline, volumeOf, type HistoryPoint } from "./history-point.ts";
 import { seriesCause } from "./series-cause.ts";
-import { struckPoint } from "./struck-point.ts";
+import { struckPoints } from "./struck-points.ts";
 
 export interface HistorySeries {
   /** What began it, in a few words. */
@@ -47,14 +47,13 @@ export function deliveryHistory(ownerId: string, entries: readonly LogEntry[]): 
   const { watchDrop, actDrop } = bikeDetails(standing);
   const hours = lifetimeHours(standing);
   const series = judgeSeries(baselineSeries(standing, hours), { watchDrop, actDrop });
-  const struckPoints = entries.flatMap((entry) =>
-    entry.kind === "check" && struck.has(entry.id)
-      ? (struckPoint(entry, standing, series) ?? [])
-      : [],
+  const struckChecks = entries.filter(
+    (entry): entry is LogEntryOf<"check"> => entry.kind === "check" && struck.has(entry.id),
   );
+  const points = [...series.flatMap(pointsOf), ...struckPoints(struckChecks, standing, series)];
   return {
     series: series.map(describeSeries),
-    points: [...series.flatMap(pointsOf), ...struckPoints].sort(byHours),
+    points: points.sort(byHours),
     lastSession: lastSessionOf(series.at(-1)),
     watchLimit: 1 - watchDrop,
     actLimit: 1 - actDrop,

@@ -51,19 +51,15 @@ describe("logLines", () => {
   });
 
   it("heeds no strike that the server refused for good", () => {
-    const log = newestFirst(book.entries).map((one) =>
-      one.entry.kind === "strike"
-        ? ({ ...one, state: "refused", reason: "invalid" })
-        : one,
+    const log = book.entries.map((entry) =>
+      kept(entry, entry.kind === "strike" ? { state: "refused", reason: "invalid" } : {}),
     );
     expect(logLines(record(), log).every(({ struckBy }) => struckBy === null)).toBe(true);
   });
 
   it("rules through a refused entry that was written anew", () => {
-    const log = newestFirst(book.entries).map((one) =>
-      one.entry.id === struckId
-        ? ({ ...one, state: "refused", reason: "id-taken" })
-        : one,
+    const log = book.entries.map((entry) =>
+      kept(entry, entry.id === struckId ? { state: "refused", reason: "id-taken" } : {}),
     );
     const refused = logLines(record(), log).find((one) => one.kept.entry.id === struckId);
     expect(refused).toMatchObject({ struckBy: { kind: "strike" }, canStrike: false });

@@ -14,12 +14,12 @@ import { whySentence } from "./why-sentence.ts";
 interface Props {
   record: BikeRecord;
   history: DeliveryHistory;
-  /** Nothing is said of riding while the engine must not be started. */
-  hoseMaybeOff: boolean;
+  /** Nothing is said of riding while the engine must not be started, or a *stop* was advised. */
+  mayRide: boolean;
 }
 
 /** What to do now, why, how sure that is, and when to look again. */
-export function WhatToDo({ record, history, hoseMaybeOff }: Props) {
+export function WhatToDo({ record, history, mayRide }: Props) {
   const { summary } = record;
   const judged = judgedSession(summary, history.lastSession);
   const certainty = judged && certaintySentence(judged);
@@ -29,7 +29,7 @@ export function WhatToDo({ record, history, hoseMaybeOff }: Props) {
         What to do now
       </h2>
       <div className="flex min-w-0 flex-[1_1_20rem] flex-col gap-5">
-        {judged && !hoseMaybeOff && <ActionLine action={judged.action} large />}
+        {judged && mayRide && <ActionLine action={judged.action} large />}
         <HoursLeft record={record} />
         <div className="flex flex-col items-start gap-2">
           <VerdictMark verdict={summary.verdict} />
