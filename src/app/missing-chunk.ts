@@ -12,13 +12,11 @@ const BUILD = import.meta.url;
 /** Loading anew with neither network nor service worker would leave the browser's own error page. */
 const canReload = () => Boolean(navigator.serviceWorker?.controller) || navigator.onLine;
 
-function onMissingChunk(event: Event): void {
-  if (updatesHeld() || !canReload() || sessionStorage.getItem(RELOADED) === BUILD) return;
-  event.preventDefault();
-  sessionStorage.setItem(RELOADED, BUILD);
-  window.location.reload();
-}
-
-export function reloadOnMissingChunk(): void {
-  window.addEventListener("vite:preloadError", onMissingChunk);
+export function reloadOnMissingChunk(reload = () => window.location.reload()): void {
+  window.addEventListener("vite:preloadError", (event) => {
+    if (updatesHeld() || !canReload() || sessionStorage.getItem(RELOADED) === BUILD) return;
+    event.preventDefault();
+    sessionStorage.setItem(RELOADED, BUILD);
+    reload();
+  });
 }
