@@ -25,6 +25,7 @@ export async function startServer(config: Config, log: Logger) {
 
   /** Takes no more requests, finishes those under way, and leaves one whole database file. */
   async function stop(): Promise<void> {
+    if (!server.listening) return;
     const outOfPatience = setTimeout(PATIENCE_MS, undefined, { ref: false });
     void outOfPatience.then(() => server.closeAllConnections());
     const closed = once(server, "close");
@@ -37,5 +38,5 @@ export async function startServer(config: Config, log: Logger) {
   }
 
   const { port } = server.address() as AddressInfo;
-  return { port, services, stop };
+  return { port, services, store, stop };
 }

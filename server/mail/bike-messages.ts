@@ -14,11 +14,12 @@ const day = (date: string) => format(parseISO(date.slice(0, 10)), "d MMMM yyyy")
 const hours = (value: number) => `${Math.abs(value).toFixed(1)} engine hours`;
 
 /** What is known of when: hours by the last reading, and the likely date where there is one. */
-function whenDue({ inHours, onDate }: Due, readAt: string | null): string {
-  const byHours = inHours < 0 ? `${hours(inHours)} over` : `${hours(inHours)} left`;
+function whenDue({ inHours, onDate }: Due, readAt: string | null, overdue: boolean): string {
+  const byHours = inHours < 0 ? `It is ${hours(inHours)} over` : `${hours(inHours)} are left`;
   const read = readAt ? `, by the reading of ${day(readAt)}` : "";
-  const byDate = onDate ? ` As the bike is ridden, that is about ${day(onDate)}.` : "";
-  return `There are ${byHours}${read}.${byDate}`;
+  const falls = overdue ? "fell" : "falls";
+  const byDate = onDate ? ` As the bike is ridden, it ${falls} due about ${day(onDate)}.` : "";
+  return `${byHours}${read}.${byDate}`;
 }
 
 export const dueMessage = ({
@@ -32,7 +33,7 @@ export const dueMessage = ({
     ...about,
     subject: `${bikeName}: delivery check ${overdue ? "overdue" : "due soon"}`,
     opening: [
-      `The next delivery check of ${bikeName} ${overdue ? "is overdue" : "is due soon"}. ${whenDue(due, readAt)}`,
+      `The next delivery check of ${bikeName} ${overdue ? "is overdue" : "is due soon"}. ${whenDue(due, readAt, overdue)}`,
       due.reason,
     ],
     linkText: `Open ${bikeName}`,

@@ -8,9 +8,8 @@ import type { MailParts } from "./mail-parts.ts";
 
 /** A check whose likely date is this close is due soon. */
 const SOON_DAYS = 7;
-/** About one bike nothing more is sent for so long. */
+/** About one bike nothing more is sent for so long; a mail that cannot be sent is tried as long. */
 const QUIET_DAYS = 7;
-const GOOD_DAYS = 3;
 
 const dateOf = (time: Date) => formatISO(time, { representation: "date" });
 
@@ -22,7 +21,7 @@ function mailDue(parts: MailParts, { due, readAt, ...bike }: DueBike, now: Date)
   if (parts.store.mails.isKnown(userId, "due", occasion)) return;
   parts.mailer.queue({
     ...{ topic: "due", userId, bikeId, to: email, occasion },
-    goodUntil: addDays(now, GOOD_DAYS).getTime(),
+    goodUntil: addDays(now, QUIET_DAYS).getTime(),
     message: dueMessage({
       ...aboutBike(parts, { bikeId, bikeName, userId }, "dueMails"),
       ...{ due, readAt, overdue },

@@ -6,9 +6,8 @@ import { stopMessage } from "../mail/bike-messages.ts";
 import { aboutBike } from "./about-bike.ts";
 import type { MailParts } from "./mail-parts.ts";
 
-/** A check copied from an old book is no news; and nobody is told days late to stop now. */
+/** A check copied from an old book is no news; nor is a mail that could not be sent for so long. */
 const NEWS_DAYS = 7;
-const GOOD_DAYS = 3;
 
 /** Owner and mechanics who want such mails, but for the author of the entry that caused this one. */
 function readersOf(store: Store, bikeId: string, authorId: string) {
@@ -40,7 +39,7 @@ export function mailStop(parts: MailParts, summary: Summary, authorId: string): 
   for (const { id: userId, email } of readersOf(store, bikeId, authorId)) {
     mailer.queue({
       ...{ topic: "stop", userId, bikeId, to: email, occasion: first.entryId },
-      goodUntil: addDays(now, GOOD_DAYS).getTime(),
+      goodUntil: addDays(now, NEWS_DAYS).getTime(),
       message: stopMessage({
         ...aboutBike(parts, { bikeId, bikeName: summary.name, userId }, "stopMails"),
         ownerName: userId === ownerId ? null : ownerName,

@@ -141,8 +141,8 @@ describe("an invitation", () => {
     expect(letter!.html).toContain("Moor &amp; &lt;Fen&gt; Riders");
     const token = new URLSearchParams(linkIn(letter!, mailedPages.join).split("?")[1]).get("token");
     const friend = await signUpRider(server, "Finn");
-    const { body } = await friend.phone.post(`/api/invites/${token}/accept`).expect(200);
-    expect(body).toMatchObject({ club: { id: club.id } });
+    const joined = await friend.phone.post(`/api/invites/${token}/accept`).expect(200);
+    expect(joined.body).toMatchObject({ club: { id: club.id } });
   });
 
   it("revoked before it was sent is not sent", async () => {

@@ -13,6 +13,8 @@ export interface ReceivedLetter {
   /** The plain text, and the page. */
   text: string;
   html: string;
+  /** The plain text in one line. */
+  words: string;
 }
 
 const decoded = (part: string) => {
@@ -39,7 +41,9 @@ function readLetter(to: string[], raw: string): ReceivedLetter {
   const parts = boundary ? raw.split(`--${boundary}`) : [];
   const partOf = (type: string) =>
     decoded(parts.find((part) => part.includes(`Content-Type: ${type}`)) ?? "");
-  return { to, raw, headers, text: partOf("text/plain"), html: partOf("text/html") };
+  const plain = partOf("text/plain");
+  const words = plain.replace(/\s+/g, " ");
+  return { to, raw, headers, text: plain, html: partOf("text/html"), words };
 }
 
 /** A real mail server on loopback, and what it is sent. While it is `busy` it takes nothing. */

@@ -1,0 +1,109 @@
+import { subDays } from "date-fns";
+import { describe, expect, it } from "vitest";
+import { clubOfFour, giveRoles, share, withdraw } from "../helpers/club.ts";
+import { linkIn, startMailServer } from "../helpers/mail-server.ts";
+import { checkEntry, hoursEntry, newId, bikeEntry, noteEntry } from "../helpers/make-entry.ts";
+import { PASSWORD, type Rider } from "../helpers/rider.ts";
+import { startTestServer } from "../helpers/start-test-server.ts";
+
+const daysAgo = (days: number) => subDays(new Date(), days).toISOString();
+
+/** A club whose addresses are confirmed, and a shared bike of Ann's whose delivery held at 12.0 h. */
+async function clubThatIsMailed() {
+  const mail = await startMailServer();
+  const server = await startTestServer({ smtpUrl: mail.smtpUrl });
+  const four = await clubOfFour(server);
+  const { owner, mechanic, organiser, member, club } = four;
+  for (const { user } of [owner, mechanic, organiser, member])
+    server.store.users.markVerified(user.id);
+  const bikeId = newId();
+  await owner.sync([bikeEntry(bikeId, { name: "Fern" }), checkEntry(bikeId, 12, 3, daysAgo(40))]);
+  await share(owner, bikeId, club.id);
+  /** Who was mailed that Fern's delivery is low, since the server started. */
+  const told = async () => {
+    await server.mailer.sendDue();
+    return mail.about("Fern: delivery low").flatMap(({ to }) => to).sort(); // prettier-ignore
+  };
+  const findLow = (who: Rider, days = 0) => who.sync([checkEntry(bikeId, 32, 2.4, daysAgo(days))]);
+  return { ...four, server, mail, bikeId, told, findLow };
+}
+
+const emails = (...riders: Rider[]) => riders.map(({ user }) => user.email).sort();
+
+describe("a delivery judged low", () => {
+  it("by the mechanic's check is told to the owner, by the owner's to the mechanic", async () => {
+    const byMechanic = await clubThatIsMailed();
+    await byMechanic.findLow(byMechanic.mechanic);
+    expect(await byMechanic.told()).toEqual(emails(byMechanic.owner));
+    const byOwner = await clubThatIsMailed();
+    await byOwner.findLow(byOwner.owner);
+    expect(await byOwner.told()).toEqual(emails(byOwner.mechanic));
+  });
+
+  it("is told with who found it, whose bike it is, and the way to it", async () => {
+    const { organiser, member, club, mechanic, mail, bikeId, findLow, told } =
+      await clubThatIsMailed();
+    await giveRoles(organiser, club.id, member, { mechanic: true }).expect(200);
+    await findLow(mechanic);
+    await told();
+    const letters = mail.about("Fern: delivery low");
+    expect(letters).toHaveLength(2);
+    const toOwner = letters.find(({ words }) => !words.includes("the bike of"))!;
+    const toMechanic = letters.find((letter) => letter !== toOwner)!;
+    expect(toMechanic.words).toContain("Fern, the bike of Ann, is judged low");
+    for (const letter of letters) {
+      expect(letter.words).toMatch(
+        /an entry by Mick.* at 80 % of its baseline\. Stop, find the cause\./,
+      );
+      expect(linkIn(letter, "/bikes/")).toBe(`/bikes/${bikeId}`);
+      expect(letter.headers["list-unsubscribe-post"]).toBe("List-Unsubscribe=One-Click");
+      expect(letter.text).not.toContain("@");
+    }
+  });
+
+  it("is told once a session, whatever else is written, and again of the next session", async () => {
+    const { owner, mechanic, bikeId, told, findLow } = await clubThatIsMailed();
+    await findLow(owner);
+    await owner.sync([noteEntry(bikeId), checkEntry(bikeId, 32.5, 2.4, daysAgo(0))]);
+    await owner.sync([hoursEntry(bikeId, 32.8, daysAgo(0))]);
+    expect(await told()).toEqual(emails(mechanic));
+    await owner.sync([checkEntry(bikeId, 35, 2.4, daysAgo(0))]);
+    expect(await told()).toEqual(emails(mechanic, mechanic));
+  });
+
+  it("is told to nobody who does not want it, has not confirmed, or may not see the bike", async () => {
+    const { server, owner, mechanic, organiser, member, club, bikeId, told, findLow } =
+      await clubThatIsMailed();
+    await giveRoles(organiser, club.id, member, { mechanic: true }).expect(200);
+    server.database.$client
+      .prepare("UPDATE users SET verified = 0 WHERE id = ?")
+      .run(member.user.id);
+    const wanted = { dueMails: true, stopMails: false };
+    await mechanic.phone.put("/api/account/reminders").send(wanted).expect(200);
+    await findLow(owner);
+    expect(await told()).toEqual([]);
+    await mechanic.phone
+      .put("/api/account/reminders")
+      .send({ ...wanted, stopMails: true })
+      .expect(200);
+    await withdraw(owner, bikeId, club.id);
+    await owner.sync([checkEntry(bikeId, 35, 2.4, daysAgo(0))]);
+    expect(await told()).toEqual([]);
+  });
+
+  it("in a check copied from an old book is no news", async () => {
+    const { owner, told, findLow } = await clubThatIsMailed();
+    await findLow(owner, 20);
+    expect(await told()).toEqual([]);
+  });
+
+  it("leaves no mail behind when its bike or its reader's account is erased", async () => {
+    const { server, owner, mechanic, bikeId, findLow } = await clubThatIsMailed();
+    await findLow(owner);
+    await findLow(mechanic);
+    await owner.phone.delete(`/api/bikes/${bikeId}`).expect(204);
+    await mechanic.phone.delete("/api/account").send({ password: PASSWORD }).expect(204);
+    const left = server.database.$client.prepare("SELECT count(*) FROM mails WHERE topic = 'stop'");
+    expect(left.pluck().get()).toBe(0);
+  });
+});
