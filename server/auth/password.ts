@@ -10,6 +10,10 @@ export interface HashCost {
 /** Argon2id (the library's default) at the cost that OWASP's password storage sheet asks for. */
 export const usualHashCost: HashCost = { memoryCost: 19_456, timeCost: 2, parallelism: 1 };
 
+/** How a hash made at this cost begins. */
+const preambleOf = ({ memoryCost, timeCost, parallelism }: HashCost) =>
+  `$argon2id$v=19$m=${memoryCost},t=${timeCost},p=${parallelism}$`;
+
 /** Hashes passwords and checks them, at one cost. */
 export function createPasswords(cost: HashCost) {
   const hashPassword = (password: string) => hash(password, cost);
@@ -20,7 +24,11 @@ export function createPasswords(cost: HashCost) {
     const matches = await verify(stored ?? (await nobodysHash), password);
     return stored !== null && matches;
   }
-  return { hashPassword, passwordMatches };
+
+  /** Whether it was made at another cost: to be made anew when its password is next known. */
+  const isOutdated = (stored: string) => !stored.startsWith(preambleOf(cost));
+
+  return { hashPassword, passwordMatches, isOutdated };
 }
 
 export type Passwords = ReturnType<typeof createPasswords>;

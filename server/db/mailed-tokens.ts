@@ -1,30 +1,26 @@
-import { and, count, eq, gt, lte } from "drizzle-orm";
+import { and, count, eq, gt, inArray, lte } from "drizzle-orm";
 import type { Database } from "./open-database.ts";
-import { mailedTokens, type tokenPurposes } from "./schema.ts";
+import { mailedTokens, tokenPurposes } from "./schema.ts";
 
 export type TokenPurpose = (typeof tokenPurposes)[number];
-type TokenRow = typeof mailedTokens.$inferSelect;
+export type TokenRow = typeof mailedTokens.$inferSelect;
 
 export function createMailedTokens(db: Database) {
-  const of = (userId: string, purpose: TokenPurpose) =>
-    and(eq(mailedTokens.userId, userId), eq(mailedTokens.purpose, purpose));
+  const of = (userId: string, purposes: readonly TokenPurpose[]) =>
+    and(eq(mailedTokens.userId, userId), inArray(mailedTokens.purpose, [...purposes]));
 
   return {
     add: (token: TokenRow) => db.insert(mailedTokens).values(token).run(),
-    find: (hash: string, purpose: TokenPurpose): TokenRow | undefined =>
-      db
-        .select()
-        .from(mailedTokens)
-        .where(and(eq(mailedTokens.hash, hash), eq(mailedTokens.purpose, purpose)))
-        .get(),
+    find: (hash: string): TokenRow | undefined =>
+      db.select().from(mailedTokens).where(eq(mailedTokens.hash, hash)).get(),
     countLive: (userId: string, purpose: TokenPurpose, now: number): number =>
       db
         .select({ live: count() })
         .from(mailedTokens)
-        .where(and(of(userId, purpose), gt(mailedTokens.expiresAt, now)))
+        .where(and(of(userId, [purpose]), gt(mailedTokens.expiresAt, now)))
         .get()?.live ?? 0,
-    removeOf: (userId: string, purpose: TokenPurpose) =>
-      db.delete(mailedTokens).where(of(userId, purpose)).run(),
+    removeOf: (userId: string, purposes: readonly TokenPurpose[] = tokenPurposes) =>
+      db.delete(mailedTokens).where(of(userId, purposes)).run(),
     removeExpired: (now: number) =>
       db.delete(mailedTokens).where(lte(mailedTokens.expiresAt, now)).run(),
   };

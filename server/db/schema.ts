@@ -39,11 +39,16 @@ export const sessions = sqliteTable(
       .references(() => users.id),
     /** Seconds since 1970. */
     expiresAt: integer().notNull(),
+    signedInAt: text().notNull().default(""),
+    /** To the hour. */
+    seenAt: text().notNull().default(""),
+    /** Which browser on which system, and nothing finer; never an address. */
+    device: text().notNull().default(""),
   },
   (table) => [index("sessions_user").on(table.userId)],
 );
 
-export const tokenPurposes = ["verify-email", "reset-password"] as const;
+export const tokenPurposes = ["verify-email", "change-email", "reset-password"] as const;
 
 /** Tokens sent by mail, each good for one use. */
 export const mailedTokens = sqliteTable(
@@ -54,6 +59,8 @@ export const mailedTokens = sqliteTable(
       .notNull()
       .references(() => users.id),
     purpose: text({ enum: tokenPurposes }).notNull(),
+    /** The address it was sent to, where that is not the account's yet. */
+    email: text(),
     /** Milliseconds since 1970. */
     expiresAt: integer().notNull(),
   },
@@ -198,7 +205,15 @@ export const reminders = sqliteTable("reminders", {
   stopMails: integer({ mode: "boolean" }).notNull(),
 });
 
-export const mailTopics = ["verify-email", "reset-password", "invitation", "due", "stop"] as const;
+export const mailTopics = [
+  "verify-email",
+  "change-email",
+  "reset-password",
+  "account-news",
+  "invitation",
+  "due",
+  "stop",
+] as const;
 
 /**
  * Every mail, written in the transaction that causes it, and kept after it was sent, without its

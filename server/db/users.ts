@@ -23,6 +23,8 @@ export function createUsers(db: Database) {
       db.insert(users).values(user).onConflictDoNothing().run().changes === 1,
     markVerified: (id: string) =>
       db.update(users).set({ verified: true }).where(eq(users.id, id)).run(),
+    setEmail: (id: string, email: string) =>
+      db.update(users).set({ email }).where(eq(users.id, id)).run(),
     setPasswordHash: (id: string, passwordHash: string) =>
       db.update(users).set({ passwordHash }).where(eq(users.id, id)).run(),
     /** The account with its sessions and the links mailed to it. */

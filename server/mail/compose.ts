@@ -86,3 +86,10 @@ export const compose = (words: Words): Message => ({
 /** A page of the client that takes the token from its address. */
 export const linkTo = (publicOrigin: string, page: string, token: string) =>
   `${publicOrigin}${page}?token=${token}`;
+
+/**
+ * The same for a token that lets somebody into an account: it stands behind the `#`, which browsers
+ * keep to themselves, so that no server on the way has it in its log.
+ */
+export const keyLinkTo = (publicOrigin: string, page: string, token: string) =>
+  `${publicOrigin}${page}#token=${token}`;

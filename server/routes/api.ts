@@ -2,9 +2,10 @@ import { Router } from "express";
 import type { Sessions } from "../auth/session.ts";
 import { notFound } from "../problems.ts";
 import type { Services } from "../services/services.ts";
+import { createAccountRoutes } from "./account-routes.ts";
 import { createAuthRoutes } from "./auth-routes.ts";
 import { createClubRoutes } from "./club-routes.ts";
-import { keepOutOfCaches, requireJson, requireOwnOrigin } from "./guard-requests.ts";
+import { guardAnswers, requireJson, requireOwnOrigin } from "./guard-requests.ts";
 import { createInviteRoutes } from "./invite-routes.ts";
 import { createLogbookRoutes } from "./logbook-routes.ts";
 import { createOwnDataRoutes } from "./own-data-routes.ts";
@@ -21,7 +22,7 @@ export interface ApiParts {
 
 export function createApi(parts: ApiParts): Router {
   const router = Router();
-  router.use(keepOutOfCaches, createUnsubscribeRoutes(parts));
+  router.use(guardAnswers, createUnsubscribeRoutes(parts));
   router.use(requireOwnOrigin(parts.publicOrigin), requireJson);
   router.get("/health", (_request, response) => {
     parts.services.assertHealthy();
@@ -30,6 +31,7 @@ export function createApi(parts: ApiParts): Router {
   router.use(createAuthRoutes(parts));
   router.use(createLogbookRoutes(parts));
   router.use(createOwnDataRoutes(parts));
+  router.use(createAccountRoutes(parts));
   router.use(createReminderRoutes(parts));
   router.use(createClubRoutes(parts));
   router.use(createInviteRoutes(parts));

@@ -9,31 +9,33 @@ import {
 } from "../../shared/schemas/auth.ts";
 import type { ApiParts } from "./api.ts";
 import { readJson } from "./guard-requests.ts";
+import { logEvent } from "./log-event.ts";
 import { parseBody } from "./parse-body.ts";
 import { accountIdOf, requireSession } from "./require-session.ts";
 
 export function createAuthRoutes({ services: { accounts }, sessions, limits }: ApiParts): Router {
   const router = Router();
 
-  /** Signing in never goes on with a session that was there before. */
   async function answerSignedIn(request: Request, response: Response, status: number, user: User) {
-    await sessions.end(request.headers.cookie);
-    response.append("Set-Cookie", await sessions.begin(user.id));
+    response.append("Set-Cookie", await sessions.begin(user.id, request.headers));
     response.status(status).json({ user });
   }
 
   router.post("/auth/sign-up", readJson, limits.signUp, async (request, response) => {
     const user = await accounts.signUp(parseBody(signUpSchema, request));
+    logEvent(request, "signed-up", user.id);
     await answerSignedIn(request, response, 201, user);
   });
 
   router.post("/auth/sign-in", readJson, ...limits.signIn, async (request, response) => {
     const user = await accounts.signIn(parseBody(signInSchema, request));
+    logEvent(request, "signed-in", user.id);
     await answerSignedIn(request, response, 200, user);
   });
 
   router.post("/auth/sign-out", async (request, response) => {
     response.append("Set-Cookie", await sessions.end(request.headers.cookie));
+    logEvent(request, "signed-out");
     response.status(204).end();
   });
 
@@ -42,11 +44,14 @@ export function createAuthRoutes({ services: { accounts }, sessions, limits }: A
   });
 
   router.post("/auth/verify-email", readJson, limits.mailedLinks, (request, response) => {
-    response.json({ user: accounts.verifyEmail(parseBody(tokenSchema, request).token) });
+    const user = accounts.verifyEmail(parseBody(tokenSchema, request).token);
+    logEvent(request, "email-confirmed", user.id);
+    response.json({ user });
   });
 
   router.post("/auth/request-password-reset", readJson, limits.mailedLinks, (request, response) => {
     const { email } = parseBody(requestPasswordResetSchema, request);
+    logEvent(request, "password-reset-asked");
     response.status(204).end();
     // Behind the answer, so that its time does not tell whether there is such an account.
     setImmediate(() => {
@@ -60,7 +65,7 @@ export function createAuthRoutes({ services: { accounts }, sessions, limits }: A
 
   router.post("/auth/reset-password", readJson, limits.mailedLinks, async (request, response) => {
     const { token, password } = parseBody(resetPasswordSchema, request);
-    await accounts.resetPassword(token, password);
+    logEvent(request, "password-reset", await accounts.resetPassword(token, password));
     response.status(204).end();
   });
 

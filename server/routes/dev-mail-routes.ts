@@ -4,7 +4,6 @@ import { escaped } from "../mail/compose.ts";
 import { mailFolder } from "../mail/mailer.ts";
 import { notFound } from "../problems.ts";
 import { readKeptLetters, type KeptLetter } from "../services/kept-letters.ts";
-import { keepOutOfCaches } from "./guard-requests.ts";
 
 const line = ({ name, to, message }: KeptLetter) =>
   `<li><a href="/dev/mail/${name}">${escaped(message.subject)}</a> to ${escaped(to)}</li>`;
@@ -41,11 +40,21 @@ const requireThisMachine =
     next();
   };
 
+/** Mails bring their style along, as pages of ours may not; they may do nothing else. */
+const allowMailStyle: RequestHandler = (_request, response, next) => {
+  response.set({
+    "Cache-Control": "no-store",
+    "Content-Security-Policy":
+      "default-src 'none'; style-src 'unsafe-inline'; frame-ancestors 'none'",
+  });
+  next();
+};
+
 /** What would have been sent, for whoever develops. */
 export function createDevMailRoutes(config: Config): Router {
   const folder = mailFolder(config.dataDir);
   const router = Router();
-  router.use("/dev", requireThisMachine(config), keepOutOfCaches);
+  router.use("/dev", requireThisMachine(config), allowMailStyle);
   router.get("/dev/mail", (_request, response) => {
     response.type("html").send(page(readKeptLetters(folder)));
   });

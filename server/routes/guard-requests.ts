@@ -6,9 +6,12 @@ const changesNothing = ({ method }: Request) => ["GET", "HEAD", "OPTIONS"].inclu
 const hasBody = ({ headers }: Request) =>
   headers["transfer-encoding"] !== undefined || Number(headers["content-length"] ?? 0) > 0;
 
-/** Answers of the API are for the one who asked, now. */
-export const keepOutOfCaches: RequestHandler = (_request, response, next) => {
-  response.set("Cache-Control", "no-store");
+/** Answers of the API are for the one who asked, now; opened in a browser, they may do nothing. */
+export const guardAnswers: RequestHandler = (_request, response, next) => {
+  response.set({
+    "Cache-Control": "no-store",
+    "Content-Security-Policy": "default-src 'none'; frame-ancestors 'none'; sandbox",
+  });
   next();
 };
 

@@ -34,6 +34,7 @@ export const handleProblem: ErrorRequestHandler = (error, request, response, nex
   if (response.headersSent) return next(error);
   const { problem, retryAfterSeconds } = toProblem(error);
   if (problem.status >= 500) request.log.error({ err: error as unknown }, "request failed");
+  else request.log.info({ problem: problem.type }, "refused");
   if (retryAfterSeconds !== undefined) response.set("Retry-After", String(retryAfterSeconds));
   response.status(problem.status).type("application/problem+json").send(JSON.stringify(problem));
 };

@@ -44,7 +44,11 @@ export const createRateLimits = () => ({
   ],
   /** Asking for a link, and following one. How many mails an account gets is limited where they are sent. */
   mailedLinks: limited({ times: 60, minutes: 60, by: address }),
-  password: limited({ times: 10, minutes: 15, by: account, failuresOnly: true }),
+  password: [
+    limited({ times: 10, minutes: 15, by: account, failuresOnly: true }),
+    limited({ times: 30, minutes: 60, by: account }),
+  ],
+  exports: limited({ times: 30, minutes: 60, by: account }),
   newClubs: limited({ times: 30, minutes: 60, by: account }),
   /** Each may send a mail to an address that somebody typed. */
   newInvites: limited({ times: 120, minutes: 60, by: account }),

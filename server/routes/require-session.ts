@@ -10,8 +10,10 @@ export const requireSession =
     if (!session) throw notSignedIn();
     if (session.renewedCookie) response.append("Set-Cookie", session.renewedCookie);
     response.locals.accountId = session.userId;
+    response.locals.sessionId = session.id;
     next();
   };
 
 /** Of a response behind `requireSession`. */
 export const accountIdOf = (response: Response) => response.locals.accountId as string;
+export const sessionIdOf = (response: Response) => response.locals.sessionId as string;

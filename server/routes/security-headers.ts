@@ -3,14 +3,13 @@ import helmet from "helmet";
 
 const own = "'self'";
 
-/** What our pages may do: nothing from elsewhere, no inline script, in nobody's frame. */
+/** What our pages may do: nothing from elsewhere, nothing inline, in nobody's frame. */
 const contentSecurityPolicy = (secure: boolean) => ({
   useDefaults: false,
   directives: {
     defaultSrc: [own],
     scriptSrc: [own],
-    // The dialogs' library writes a style element to hold the page still behind them.
-    styleSrc: [own, "'unsafe-inline'"],
+    styleSrc: [own],
     imgSrc: [own, "data:", "blob:"],
     mediaSrc: [own, "blob:"],
     workerSrc: [own],
@@ -22,8 +21,15 @@ const contentSecurityPolicy = (secure: boolean) => ({
   },
 });
 
-const PERMISSIONS =
-  "camera=(self), microphone=(self), screen-wake-lock=(self), geolocation=(), payment=(), usb=()";
+/** Of what browsers ask people for: what the delivery check and the bike tags use, and nothing else. */
+const PERMISSIONS = [
+  "camera=(self)",
+  "microphone=(self)",
+  "screen-wake-lock=(self)",
+  ...["bluetooth", "display-capture", "geolocation", "hid", "midi", "payment", "serial", "usb"].map(
+    (feature) => `${feature}=()`,
+  ),
+].join(", ");
 
 /** Over plain http (a laptop in the shed, a test) browsers must not be told to use https. */
 export function securityHeaders(publicOrigin: string): RequestHandler[] {

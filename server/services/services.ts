@@ -1,5 +1,6 @@
 import type { SyncRequest } from "../../shared/schemas/sync.ts";
-import { createAccounts, type AccountParts } from "./accounts.ts";
+import type { AccountParts } from "./account-parts.ts";
+import { createAccounts } from "./accounts.ts";
 import { createBikeShareService } from "./bike-shares.ts";
 import { createClubInviteService } from "./club-invites.ts";
 import { createClubMemberService } from "./club-members.ts";
@@ -7,6 +8,7 @@ import { createClubService } from "./clubs.ts";
 import { mailAllDue } from "./due-mails.ts";
 import { eraseBike } from "./erase.ts";
 import { exportAccount } from "./export-account.ts";
+import { checksCsv } from "./export-checks.ts";
 import { createLineUp } from "./line-up.ts";
 import { bikeSummaryJson, ownSummariesJson } from "./read-bikes.ts";
 import { createReminderService } from "./reminders.ts";
@@ -31,6 +33,7 @@ export function createServices(parts: AccountParts) {
     ownSummariesJson: (accountId: string) => ownSummariesJson(store, accountId),
     eraseBike: (accountId: string, bikeId: string) => eraseBike(store, accountId, bikeId),
     exportAccount: (accountId: string) => exportAccount(store, accounts.find(accountId)),
+    checksCsv: (accountId: string) => checksCsv(store, accountId),
     mailAllDue: (now?: Date) => mailAllDue(parts, now),
     completeSummaries: () => completeSummaries(store),
     assertHealthy: () => store.ping(),

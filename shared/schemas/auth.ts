@@ -4,13 +4,13 @@ import { z } from "zod";
 export const MIN_PASSWORD_LENGTH = 10;
 export const MAX_PASSWORD_LENGTH = 128;
 
-const emailSchema = z
+export const emailSchema = z
   .string("Type your e-mail address.")
   .max(254, "This address is too long.")
   .pipe(z.email("This does not look like an e-mail address."));
 
 /** Length only: no composition rules. */
-const newPasswordSchema = z
+export const newPasswordSchema = z
   .string("Choose a password.")
   .min(MIN_PASSWORD_LENGTH, `At least ${MIN_PASSWORD_LENGTH} characters.`)
   .max(MAX_PASSWORD_LENGTH, `At most ${MAX_PASSWORD_LENGTH} characters.`);
@@ -24,13 +24,12 @@ export const signUpSchema = z.strictObject({
     .regex(/\S/, "Say what others should call you."),
 });
 
-const knownPasswordSchema = z
+export const knownPasswordSchema = z
   .string("Type your password.")
   .min(1, "Type your password.")
   .max(1_000, "This is not a password of ours.");
 
 export const signInSchema = z.strictObject({ email: emailSchema, password: knownPasswordSchema });
-export const deleteAccountSchema = z.strictObject({ password: knownPasswordSchema });
 
 export const requestPasswordResetSchema = z.strictObject({ email: emailSchema });
 export const tokenSchema = z.strictObject({ token: z.string().min(1).max(200) });

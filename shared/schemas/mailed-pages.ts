@@ -1,4 +1,7 @@
-/** The pages that links in mails and invites lead to, each with `?token=`. */
+/**
+ * The pages that links in mails and invites lead to, each with `?token=`; those that concern the
+ * account itself with `#token=`.
+ */
 export const mailedPages = {
   verify: "/verify",
   reset: "/reset",

@@ -1,5 +1,6 @@
 import supertest from "supertest";
 import { expect, it } from "vitest";
+import { devicesResponseSchema } from "../../shared/schemas/account.ts";
 import { clubOfFour, giveRoles, makeClub, withdraw, type ClubOfFour } from "../helpers/club.ts";
 import { listRoutes } from "../helpers/list-routes.ts";
 import { newId } from "../helpers/make-entry.ts";
@@ -14,7 +15,7 @@ type State = (typeof states)[number];
 /**
  * Who is answered what by every route of the server, in the order of `who`; after the bar, once the
  * bike is no longer shared. The outsider is organiser and mechanic of another club; `:userId` is
- * the member. Bodies that change nothing are left wrong on purpose (422).
+ * the member, `:deviceId` the owner's phone. Bodies that change nothing are left wrong on purpose (422).
  */
 const table: Record<string, { expected: string; body?: object }> = {
   "GET /health": { expected: "200 200 200 200 200 200" },
@@ -31,7 +32,20 @@ const table: Record<string, { expected: string; body?: object }> = {
   "POST /auth/reset-password": { expected: "422 422 422 422 422 422" },
 
   "GET /export": { expected: "200 200 200 200 200 401" },
+  "GET /export/checks.csv": { expected: "200 200 200 200 200 401" },
   "DELETE /account": { expected: "204 204 204 204 204 401", body: { password: PASSWORD } },
+  "POST /account/verification": { expected: "204 204 204 204 204 401" },
+  "POST /account/email": {
+    expected: "204 204 204 204 204 401",
+    body: { email: "elsewhere@club.example", password: PASSWORD },
+  },
+  "POST /account/password": {
+    expected: "204 204 204 204 204 401",
+    body: { password: PASSWORD, newPassword: "another pump altogether" },
+  },
+  "GET /account/devices": { expected: "200 200 200 200 200 401" },
+  "DELETE /account/devices": { expected: "204 204 204 204 204 401" },
+  "DELETE /account/devices/:deviceId": { expected: "204 404 404 404 404 401" },
   "GET /account/reminders": { expected: "200 200 200 200 200 401" },
   "PUT /account/reminders": {
     expected: "200 200 200 200 200 401",
@@ -66,6 +80,7 @@ const table: Record<string, { expected: string; body?: object }> = {
 
 interface World extends ClubOfFour {
   server: TestServer;
+  deviceId: string;
   /** What each sends to be known by; nobody sends nothing. */
   cookies: Record<Who, string>;
 }
@@ -80,16 +95,25 @@ async function makeWorld(state: State): Promise<World> {
   const { owner, mechanic, organiser, member } = four;
   const riders = Object.entries({ owner, mechanic, organiser, member, outsider });
   const cookies = Object.fromEntries(riders.map(([name, { cookie }]) => [name, cookie]));
-  return { ...four, server, cookies: { ...cookies, nobody: "" } as World["cookies"] };
+  const { devices } = devicesResponseSchema.parse(
+    (await owner.phone.get("/api/account/devices")).body,
+  );
+  const deviceId = devices[0]!.id;
+  return { ...four, server, deviceId, cookies: { ...cookies, nobody: "" } as World["cookies"] };
 }
 
 /** The route's path with the world's ids, or with ids of nothing at all. */
-function pathOf(route: string, { bikeId, club, member, invited }: World, nothing = false): string {
+function pathOf(
+  route: string,
+  { bikeId, club, member, invited, deviceId }: World,
+  nothing = false,
+): string {
   const ids: Record<string, string> = {
     bikeId,
     clubId: club.id,
     userId: member.user.id,
     inviteId: invited.invite.id,
+    deviceId,
     token: invited.token,
   };
   const path = route

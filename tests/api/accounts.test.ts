@@ -1,5 +1,6 @@
 import { addMinutes } from "date-fns";
 import { afterEach, describe, expect, it, vi } from "vitest";
+import { mailedToken } from "../helpers/mailed-token.ts";
 import { cookieOf, createPhone, PASSWORD, signInRider, signUpRider } from "../helpers/rider.ts";
 import { startTestServer, type TestServer } from "../helpers/start-test-server.ts";
 
@@ -9,13 +10,6 @@ const NEW_PASSWORD = "another pump altogether";
 afterEach(() => {
   vi.useRealTimers();
 });
-
-/** The token in the newest mail. */
-async function mailedToken(server: TestServer, subject: string): Promise<string> {
-  await vi.waitFor(() => expect(server.mails().join()).toContain(`Subject: ${subject}`));
-  const mail = server.mails().findLast((text) => text.includes(`Subject: ${subject}`));
-  return /token=([\w-]+)/.exec(mail ?? "")![1]!;
-}
 
 async function askForReset(server: TestServer, email: string): Promise<string> {
   await createPhone(server).post("/api/auth/request-password-reset").send({ email }).expect(204);

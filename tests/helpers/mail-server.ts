@@ -76,6 +76,6 @@ export async function startMailServer() {
 export function linkIn({ text }: ReceivedLetter, page: string): string {
   const link = text.split(/\s+/).find((word) => word.includes(page));
   if (!link) throw new Error(`There is no link to ${page} in:\n${text}`);
-  const { pathname, search } = new URL(link);
-  return pathname + search;
+  const { pathname, search, hash } = new URL(link);
+  return pathname + search + hash;
 }

@@ -1,10 +1,11 @@
 import { useState } from "react";
-import { useNavigate, useSearchParams } from "react-router-dom";
+import { useNavigate } from "react-router-dom";
 import { MIN_PASSWORD_LENGTH } from "../../../shared/schemas/auth.ts";
 import { Button } from "../../ui/button.tsx";
 import { Form } from "../../ui/form.tsx";
 import { Page } from "../../ui/page.tsx";
 import { patterns } from "../../ui/paths.ts";
+import { useLinkToken } from "../../ui/use-link-token.ts";
 import { useSubmit } from "../../ui/use-submit.ts";
 import { resetPassword } from "./auth-calls.ts";
 import { PasswordField } from "./password-field.tsx";
@@ -12,7 +13,7 @@ import { PasswordField } from "./password-field.tsx";
 /** Where the mailed link leads: the token is in its address. */
 export default function ResetPage() {
   const navigate = useNavigate();
-  const token = useSearchParams()[0].get("token") ?? "";
+  const token = useLinkToken();
   const [password, setPassword] = useState("");
   const { submit, busy, errors, problem } = useSubmit(async () => {
     await resetPassword(token, password);

@@ -1,4 +1,3 @@
-import { useSearchParams } from "react-router-dom";
 import { useState } from "react";
 import { Button } from "../../ui/button.tsx";
 import { ButtonLink } from "../../ui/button-link.tsx";
@@ -6,12 +5,13 @@ import { Form } from "../../ui/form.tsx";
 import { Notice } from "../../ui/notice.tsx";
 import { Page } from "../../ui/page.tsx";
 import { patterns } from "../../ui/paths.ts";
+import { useLinkToken } from "../../ui/use-link-token.ts";
 import { useSubmit } from "../../ui/use-submit.ts";
 import { verifyEmail } from "./auth-calls.ts";
 
 /** A press confirms, not the visit: mail scanners visit links too, and the link works once. */
 export default function VerifyPage() {
-  const token = useSearchParams()[0].get("token") ?? "";
+  const token = useLinkToken();
   const [confirmed, setConfirmed] = useState(false);
   const { submit, busy, errors, problem } = useSubmit(async () => {
     await verifyEmail(token);

@@ -1,0 +1,35 @@
+import { and, desc, eq, gt, ne } from "drizzle-orm";
+import type { Database } from "./open-database.ts";
+import { sessions } from "./schema.ts";
+
+/** What is kept of a session for its account to see; the session itself is Lucia's. */
+export function createSessionRows(db: Database) {
+  const { id, signedInAt, seenAt, device: name } = sessions;
+  const mine = (userId: string) => eq(sessions.userId, userId);
+
+  return {
+    /** Those that have not run out; the last one seen comes first. */
+    of: (userId: string, nowSeconds: number) =>
+      db
+        .select({ id, name, signedInAt, seenAt })
+        .from(sessions)
+        .where(and(mine(userId), gt(sessions.expiresAt, nowSeconds)))
+        .orderBy(desc(seenAt), id)
+        .all(),
+    markSeen: (sessionId: string, at: string) =>
+      db.update(sessions).set({ seenAt: at }).where(eq(id, sessionId)).run(),
+    /** False where the account has no such session. */
+    remove: (userId: string, sessionId: string): boolean =>
+      db
+        .delete(sessions)
+        .where(and(mine(userId), eq(id, sessionId)))
+        .run().changes === 1,
+    removeOthers: (userId: string, keptId: string) =>
+      db
+        .delete(sessions)
+        .where(and(mine(userId), ne(id, keptId)))
+        .run(),
+    removeOf: (userId: string) => db.delete(sessions).where(mine(userId)).run(),
+    removeAll: () => db.delete(sessions).run(),
+  };
+}
