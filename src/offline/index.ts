@@ -8,6 +8,7 @@ export { forgetAccount, rememberAccount, rememberedAccount, useAccount } from ".
 export { apiRequest } from "./api-client.ts";
 export { dropDraft, keepDraft, useDraft, useDrafts } from "./drafts.ts";
 export { exportUnsent } from "./export-unsent.ts";
+export { fetchBikes } from "./fetch-bikes.ts";
 export {
   holdUpdates,
   onUpdatesHeldChange,

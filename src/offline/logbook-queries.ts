@@ -15,7 +15,7 @@ async function readBikes(database: LogbookDatabase, phone: Phone): Promise<BikeR
 /** The bikes this account may see, oldest first, each with the summary stored with its log. */
 export const useBikes = (): UseQueryResult<BikeRecord[]> => useLogbookQuery(["bikes"], readBikes);
 
-/** A bike with its log; null where this phone has no such bike. */
+/** A bike with its log; null where this phone has no such bike, or not yet. */
 export const useBike = (bikeId: string): UseQueryResult<BikeWithLog | null> =>
   useLogbookQuery(["bike", bikeId], async (_, phone) => {
     const { readBike } = await import("./logbook/read-bike.ts");

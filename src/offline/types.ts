@@ -1,4 +1,6 @@
 import type { BikeDetails } from "../../shared/logbook/bike-details.ts";
+import type { AdviceNote } from "../../shared/logbook/standing-advice.ts";
+import type { LineUpFacts } from "../../shared/schemas/club.ts";
 import type {
   Entry,
   EntryEnvelope,
@@ -44,8 +46,14 @@ export interface BikeRecord {
   access: BikeAccess;
   /** Whose strikes always count. */
   ownerId: string;
+  /** Asked for, while nothing of its log has reached this phone. */
+  awaited: boolean;
   details: BikeDetails;
   summary: Summary;
+  /** What a club's Line-up shows of it. */
+  lineUp: LineUpFacts;
+  /** The advice that stands; null where nobody advised anything. */
+  advice: AdviceNote | null;
   /** Entries of this bike not yet sent, refused ones included. */
   unsent: number;
 }

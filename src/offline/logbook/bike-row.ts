@@ -1,5 +1,7 @@
 /** Makes the record that the Shed reads, from a bike's log. */
 import { bikeDetails } from "../../../shared/logbook/bike-details.ts";
+import { lineUpFacts } from "../../../shared/logbook/line-up-facts.ts";
+import { standingAdvice } from "../../../shared/logbook/standing-advice.ts";
 import { standingEntries } from "../../../shared/logbook/standing-entries.ts";
 import { summariseLogbook } from "../../../shared/logbook/summarise-logbook.ts";
 import type { LogEntry } from "../../../shared/schemas/entry.ts";
@@ -48,12 +50,17 @@ export function summariseRows(ownerId: string, rows: EntryRow[], account: Accoun
 
 export function makeBikeRow(standing: BikeStanding, rows: EntryRow[], account: Account): BikeRow {
   const ownerId = ownerOf(rows, standing.access, account);
-  const entries = readable(counted(rows), account);
+  const logbook = { ownerId, entries: readable(counted(rows), account) };
+  const { standing: heeded } = standingEntries(ownerId, logbook.entries);
+  const summary = summariseLogbook(logbook);
   return {
     ...standing,
     ownerId,
-    details: bikeDetails(standingEntries(ownerId, entries).standing),
-    summary: summariseLogbook({ ownerId, entries }),
+    awaited: !rows.some(isRegistration),
+    details: bikeDetails(heeded),
+    summary,
+    lineUp: lineUpFacts(logbook, summary),
+    advice: standingAdvice(heeded),
     unsent: rows.filter((row) => row.unsentSince !== undefined).length,
     format: BIKE_ROW_FORMAT,
     builtWith: BUILD,

@@ -9,7 +9,7 @@ import type { BikeRecord, Draft, ForeignEntry } from "../types.ts";
 
 const DATABASE_VERSION = 1;
 /** The shape of the stored summaries. Raise it when an older one could not be shown any more. */
-export const BIKE_ROW_FORMAT = 1;
+export const BIKE_ROW_FORMAT = 2;
 
 /** A line of the log. It stays for ever after it was sent: the log is the outbox with a mark. */
 export interface EntryRow {

@@ -14,7 +14,7 @@ export async function readBike(phone: Phone, bikeId: string): Promise<BikeWithLo
     database.get("bikes", bikeId),
     database.getAllFromIndex("entries", "bike", bikeId),
   ]);
-  if (!record) return null;
+  if (!record || record.awaited) return null;
   return { record, log: rows.map((row) => asKeptEntry(row, phone.account)).sort(newestFirst) };
 }
 
