@@ -25,6 +25,19 @@ export const keepDraft = (bikeId: string, form: string, content: unknown): Promi
 export const dropDraft = (bikeId: string, form: string): Promise<void> =>
   change((database) => database.delete("drafts", [bikeId, form]));
 
+/** Changes a draft as it stands in the store, in one step: two changes at once are both kept. */
+export const changeDraft = (
+  bikeId: string,
+  form: string,
+  edit: (content: unknown) => unknown,
+): Promise<void> =>
+  change(async (database, phone) => {
+    const { store, done } = database.transaction("drafts", "readwrite", { durability: "strict" });
+    const content = edit((await store.get([bikeId, form]))?.content);
+    await store.put({ bikeId, form, content, savedAt: phone.now().toISOString() });
+    await done;
+  });
+
 /** The draft of one form on one bike; null where there is none. */
 export const useDraft = (bikeId: string, form: string): UseQueryResult<Draft | null> =>
   useLogbookQuery(
