@@ -12,6 +12,8 @@ export interface ApiRequest<T> {
   /** Left out where the answer has no body. */
   schema?: AnswerSchema<T>;
   timeoutMs?: number;
+  /** The browser may keep the answer, and asks each time whether it still holds. */
+  revalidates?: boolean;
   fetch?: typeof fetch;
 }
 
@@ -21,7 +23,7 @@ const TIMEOUT_MS = 30_000;
 const requestInit = (request: ApiRequest<unknown>): RequestInit => ({
   method: request.method ?? "GET",
   redirect: "error",
-  cache: "no-store",
+  cache: request.revalidates ? "no-cache" : "no-store",
   signal: AbortSignal.timeout(request.timeoutMs ?? TIMEOUT_MS),
   headers: {
     accept: "application/json",

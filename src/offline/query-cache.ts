@@ -6,7 +6,8 @@ import { createSyncStoragePersister } from "@tanstack/query-sync-storage-persist
 import { QueryClient } from "@tanstack/react-query";
 import type { PersistQueryClientOptions } from "@tanstack/react-query-persist-client";
 
-const DAY_MS = 24 * 60 * 60 * 1000;
+/** A Line-up looked at before leaving must still be there after a week without a network. */
+const KEPT_MS = 14 * 24 * 60 * 60 * 1000;
 /** Raise it when a cached answer's shape changes. */
 const CACHE_VERSION = "1";
 
@@ -37,13 +38,13 @@ function storage(): Storage | null {
  */
 export function createReadCache(accountId: string | null): ReadCache {
   return {
-    client: new QueryClient({ defaultOptions: { queries: { gcTime: DAY_MS, retry: 1 } } }),
+    client: new QueryClient({ defaultOptions: { queries: { gcTime: KEPT_MS, retry: 1 } } }),
     persistOptions: {
       persister: createSyncStoragePersister({
         storage: storage(),
         key: `sumpless-read-${accountId ?? "nobody"}`,
       }),
-      maxAge: DAY_MS,
+      maxAge: KEPT_MS,
       buster: CACHE_VERSION,
       dehydrateOptions: {
         shouldDehydrateMutation: () => false,
