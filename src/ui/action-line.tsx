@@ -1,11 +1,5 @@
 import type { Action } from "../../shared/schemas/entry.ts";
-import { actionWords } from "./words.ts";
-
-const inks: Record<Action, string> = {
-  ride: "text-holding",
-  repeat: "text-dropping",
-  stop: "text-low",
-};
+import { actionInks, actionWords } from "./words.ts";
 
 interface Props {
   action: Action;
@@ -17,5 +11,5 @@ interface Props {
 /** What to do, the first thing a rider reads of a verdict. */
 export function ActionLine({ action, large = false, huge = false }: Props) {
   const size = huge ? "text-[min(15vw,3.75rem)]" : large ? "text-4xl" : "text-2xl";
-  return <p className={`leading-tight font-bold ${size} ${inks[action]}`}>{actionWords[action]}</p>;
+  return <p className={`leading-tight font-bold ${size} ${actionInks[action]}`}>{actionWords[action]}</p>;
 }

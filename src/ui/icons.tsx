@@ -42,4 +42,7 @@ export const ErrorIcon = icon(`${CIRCLE}m-3.5 5.5 7 7m0-7-7 7`);
 export const AccountIcon = icon(
   `${CIRCLE}m0 3.5a3.2 3.2 0 1 1 0 6.4a3.2 3.2 0 1 1 0-6.4M6 18.5c2-4.5 10-4.5 12 0`,
 );
+export const ClubIcon = icon(
+  "M9 5a3 3 0 1 1 0 6a3 3 0 1 1 0-6M2.5 19c.5-6.5 12.5-6.5 13 0M16 5.2a3 3 0 0 1 0 5.6m2 2.7c2.2 1 3.3 3 3.5 5.5",
+);
 export const ExchangeIcon = icon("M4 9.5h15l-4.5-5M20 14.5H5l4.5 5");

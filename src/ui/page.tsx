@@ -4,7 +4,7 @@ import { BackIcon } from "./icons.tsx";
 
 interface Props {
   title: string;
-  back?: { to: string; label: string };
+  back?: { to: string; label: string; state?: unknown };
   /** The main action: on a phone full width at the bottom, always in reach; otherwise at the end. */
   action?: ReactNode;
   /** Room for two columns from 900 px up; otherwise one column of reading width. */
@@ -28,6 +28,7 @@ export function Page({ title, back, action, wide = false, children }: Props) {
           {back && (
             <Link
               to={back.to}
+              state={back.state}
               className="-ml-1 inline-flex min-h-target items-center gap-1 font-bold text-oil"
             >
               <BackIcon className="shrink-0" />

@@ -7,13 +7,16 @@ export const patterns = {
   newBike: "/bikes/new",
   bike: "/bikes/:bikeId/*",
   check: "/bikes/:bikeId/check/*",
+  share: "/bikes/:bikeId/share",
+  clubs: "/clubs",
+  club: "/clubs/:clubId/*",
+  testDayBike: "/clubs/:clubId/test-day/:bikeId",
   account: "/account",
   syringes: "/syringes",
   signIn: "/sign-in",
   signUp: "/sign-up",
   forgot: "/forgot",
-  reset: mailedPages.reset,
-  verify: mailedPages.verify,
+  ...mailedPages,
 } as const;
 
 export const bikePath = (bikeId: string) => `/bikes/${bikeId}`;
@@ -26,4 +29,12 @@ export const logEntryPath = (bikeId: string, kind: EntryKind) => `${bikePath(bik
 /** The form of a kind, filled in from an entry that the server did not accept. */
 export const mendEntryPath = (bikeId: string, kind: EntryKind, entryId: string) =>
   `${logEntryPath(bikeId, kind)}?mends=${entryId}`;
+/** With which clubs the bike is shared, and who may see it. */
+export const sharePath = (bikeId: string) => `${bikePath(bikeId)}/share`;
+/** A club: for its mechanics the Line-up. */
+export const clubPath = (clubId: string) => `${patterns.clubs}/${clubId}`;
+export const membersPath = (clubId: string) => `${clubPath(clubId)}/members`;
+export const testDayPath = (clubId: string) => `${clubPath(clubId)}/test-day`;
+export const testDayBikePath = (clubId: string, bikeId: string) =>
+  `${testDayPath(clubId)}/${bikeId}`;
 export const bikeDetailsPath = (bikeId: string) => `${bikePath(bikeId)}/details`;

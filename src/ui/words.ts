@@ -16,6 +16,13 @@ export const actionWords: Record<Action, string> = {
   stop: "Stop, find the cause",
 };
 
+/** Beside the words, never in their place. */
+export const actionInks: Record<Action, string> = {
+  ride: "text-holding",
+  repeat: "text-dropping",
+  stop: "text-low",
+};
+
 export const kindWords: Record<EntryKind, string> = {
   bike: "Bike details",
   hours: "Hours",

@@ -14,13 +14,14 @@ import { VerdictMark } from "../../ui/verdict-mark.tsx";
 import { HoursLeft } from "./hours-left.tsx";
 import type { ShedBike } from "./shed-bikes.ts";
 
+const StopAdvised = lazy(() => import("./stop-advised.tsx"));
 const DoubtfulReadings = lazy(() => import("./doubtful-readings.tsx"));
 const LogHoursSheet = lazy(() => import("./log-hours-sheet.tsx"));
 
 /** One bike at arm's length: hours to its next check, what to do, how its delivery stands. */
 export function BikeCard({ bike }: { bike: ShedBike }) {
   const [logging, setLogging] = useState(false);
-  const { bikeId, details, summary, unsent, hoseMaybeOff, checkOpen } = bike;
+  const { bikeId, details, summary, lineUp, unsent, hoseMaybeOff, checkOpen } = bike;
   const checkFirst = summary.due.inHours <= 0;
   return (
     <Card aria-labelledby={`bike-${bikeId}`} className="flex flex-col gap-3">
@@ -40,11 +41,18 @@ export function BikeCard({ bike }: { bike: ShedBike }) {
           </ButtonLink>
         </Notice>
       )}
+      {lineUp.stopAdvised && (
+        <Suspense>
+          <StopAdvised bike={bike} />
+        </Suspense>
+      )}
       <div className="flex flex-wrap justify-between gap-3">
         <div className="flex min-w-0 flex-[1_1_10rem] flex-col gap-3">
           <HoursLeft bike={bike} />
           <div className="flex flex-col gap-1">
-            {summary.action && !hoseMaybeOff && <ActionLine action={summary.action} />}
+            {summary.action && !hoseMaybeOff && !lineUp.stopAdvised && (
+              <ActionLine action={summary.action} />
+            )}
             <VerdictMark verdict={summary.verdict} />
           </div>
         </div>

@@ -9,9 +9,9 @@ export interface ShedBike extends BikeRecord {
 }
 
 /** A hose that may be off is worse than any verdict. */
-function rank({ summary, hoseMaybeOff }: ShedBike): number {
+function rank({ summary, lineUp, hoseMaybeOff }: ShedBike): number {
   if (hoseMaybeOff) return 0;
-  if (summary.action === "stop") return 1;
+  if (summary.action === "stop" || lineUp.stopAdvised) return 1;
   return summary.action === "repeat" ? 2 : 3;
 }
 

@@ -1,6 +1,6 @@
-import { ChevronLeft, ChevronRight } from "lucide-react";
 import { useState, type KeyboardEvent, type PointerEvent } from "react";
 import type { BikeRecord } from "../../../offline/index.ts";
+import { BackIcon, OnwardIcon } from "../../../ui/icons.tsx";
 import type { DeliveryHistory } from "../history/delivery-history.ts";
 import { ChartBreaks } from "./chart-breaks.tsx";
 import { chartFrame, type ChartFrame } from "./chart-frame.ts";
@@ -42,7 +42,7 @@ function Chart({ record, model }: { record: BikeRecord; model: ChartModel }) {
       <Plot model={model} index={index} onChoose={choose} />
       <div className="flex items-center gap-2">
         <StepButton name="Earlier check" spent={index === 0} onStep={() => choose(index - 1)}>
-          <ChevronLeft aria-hidden />
+          <BackIcon />
         </StepButton>
         <output className="min-w-0 flex-1">
           <span className="text-soft">
@@ -55,7 +55,7 @@ function Chart({ record, model }: { record: BikeRecord; model: ChartModel }) {
           spent={index === points.length - 1}
           onStep={() => choose(index + 1)}
         >
-          <ChevronRight aria-hidden />
+          <OnwardIcon />
         </StepButton>
       </div>
       <ChartKey model={model} />

@@ -42,18 +42,18 @@ export function DeleteBikeSheet({ bike, onClose }: Props) {
           </Notice>
         )}
         {sure ? (
-          <>
-            <p className="font-bold text-low">This cannot be undone.</p>
-            <Button look="danger" disabled={busy} onClick={() => void submit()}>
-              Yes, delete it for good
-            </Button>
-          </>
+          <p className="font-bold text-low">This cannot be undone.</p>
         ) : (
           <Button look="danger" onClick={() => setSure(true)}>
             Delete it
           </Button>
         )}
         <Button onClick={onClose}>Keep the bike</Button>
+        {sure && (
+          <Button look="danger" disabled={busy} onClick={() => void submit()}>
+            Yes, delete it for good
+          </Button>
+        )}
       </div>
     </Sheet>
   );

@@ -1,5 +1,5 @@
 import { useState, type ReactNode } from "react";
-import { useNavigate } from "react-router-dom";
+import { useLocation, useNavigate } from "react-router-dom";
 import type { LogEntry } from "../../../../shared/schemas/entry.ts";
 import {
   saveEntry,
@@ -43,12 +43,13 @@ export function EntryForm(props: Props) {
   const { title, record, mends, makeEntry, hoursLabel = "Engine hours", hoursHint } = props;
   const { bikeId, details, summary } = record;
   const navigate = useNavigate();
+  const back = useBack(record);
   const [at, setAt] = useState(() => mends?.at ?? new Date().toISOString());
   const [hours, setHours] = useState(() => proposedHours(record, mends));
   const { submit, busy, errors, problem } = useSubmit(async () => {
     await saveEntry(makeEntry({ bikeId, at, hours: typedHours(hours) }));
     if (mends) await strikeMended(mends);
-    await navigate(bikePath(bikeId), { replace: true, state: { saved: true } });
+    await navigate(back.to, { replace: true, state: { saved: true } });
   });
   const hoursField = (
     <HoursField
@@ -65,7 +66,7 @@ export function EntryForm(props: Props) {
   return (
     <Page
       title={title}
-      back={{ to: bikePath(bikeId), label: details.name }}
+      back={back}
       action={
         <Button type="submit" form="entry" look="primary" wide disabled={busy}>
           Save
@@ -80,6 +81,12 @@ export function EntryForm(props: Props) {
       </Form>
     </Page>
   );
+}
+
+/** To the bike, or to where the form was opened from. */
+function useBack({ bikeId, details }: BikeRecord): { to: string; label: string } {
+  const state = useLocation().state as { back?: { to: string; label: string } } | null;
+  return state?.back ?? { to: bikePath(bikeId), label: details.name };
 }
 
 /** As the meter showed at the last reading; an entry written anew starts from its own. */

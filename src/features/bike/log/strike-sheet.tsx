@@ -2,6 +2,7 @@ import { useState } from "react";
 import { saveEntry, useHoldUpdates, type KeptEntry } from "../../../offline/index.ts";
 import { Button } from "../../../ui/button.tsx";
 import { Form } from "../../../ui/form.tsx";
+import { formatWhen } from "../../../ui/format-when.ts";
 import { Sheet } from "../../../ui/sheet.tsx";
 import { TextArea } from "../../../ui/text-area.tsx";
 import { useSubmit } from "../../../ui/use-submit.ts";
@@ -27,10 +28,14 @@ export function StrikeSheet({ kept, onClose }: Props) {
     });
     onClose();
   });
-  const what = kept.understood ? kindWords[kept.entry.kind].toLowerCase() : "entry";
   return (
-    <Sheet title={`Strike this ${what}?`} onClose={onClose}>
+    <Sheet title="Strike this entry?" onClose={onClose}>
       <Form onSubmit={submit} problem={problem}>
+        {kept.understood && (
+          <p className="font-bold">
+            {kindWords[kept.entry.kind]}, {formatWhen(entry.at)}
+          </p>
+        )}
         <p>
           It no longer counts, and stays in the log, ruled through. It cannot be brought back: write
           it down anew if it was right after all.

@@ -1,5 +1,5 @@
-import { CircleAlert } from "lucide-react";
 import { flagSentences, type FlagCode } from "../../../../shared/delivery/flags.ts";
+import { CautionIcon } from "../../../ui/icons.tsx";
 
 /** Said elsewhere on the page, with what to do about it. */
 const saidElsewhere: readonly string[] = [
@@ -19,7 +19,7 @@ export function FlagList({ flags }: { flags: readonly string[] }) {
     <ul className="flex flex-col gap-1">
       {shown.map((flag) => (
         <li key={flag} className="flex gap-2">
-          <CircleAlert aria-hidden className="mt-0.5 size-5 shrink-0 text-dropping" />
+          <CautionIcon className="mt-0.5 size-5 shrink-0 text-dropping" />
           {flagSentences[flag]}
         </li>
       ))}

@@ -14,7 +14,7 @@ import { whySentence } from "./why-sentence.ts";
 interface Props {
   record: BikeRecord;
   history: DeliveryHistory;
-  /** Nothing is said of riding while the engine must not be started, or a *stop* was advised. */
+  /** *Ride on* is not said while the engine must not be started, or a *stop* was advised. */
   mayRide: boolean;
 }
 
@@ -23,13 +23,14 @@ export function WhatToDo({ record, history, mayRide }: Props) {
   const { summary } = record;
   const judged = judgedSession(summary, history.lastSession);
   const certainty = judged && certaintySentence(judged);
+  const saysAction = mayRide || judged?.action !== "ride";
   return (
     <section aria-labelledby="now" className="flex flex-wrap gap-x-8 gap-y-6">
       <h2 id="now" className="sr-only">
         What to do now
       </h2>
       <div className="flex min-w-0 flex-[1_1_20rem] flex-col gap-5">
-        {judged && mayRide && <ActionLine action={judged.action} large />}
+        {judged && saysAction && <ActionLine action={judged.action} large />}
         <HoursLeft record={record} />
         <div className="flex flex-col items-start gap-2">
           <VerdictMark verdict={summary.verdict} />

@@ -7,7 +7,9 @@ import { EntryStateMark } from "../../../ui/entry-state-mark.tsx";
 import { formatWhen } from "../../../ui/format-when.ts";
 import { Notice } from "../../../ui/notice.tsx";
 import { Page } from "../../../ui/page.tsx";
+import { backToLineUp } from "../../../ui/last-line-up.ts";
 import { bikePath, patterns } from "../../../ui/paths.ts";
+import { isStop, StopAdvised } from "../../../ui/stop-advised.tsx";
 import { stepPaths } from "../check-paths.ts";
 import { useOpenDraft } from "../draft/use-open-draft.ts";
 import { CheckFlags } from "./check-flags.tsx";
@@ -29,11 +31,12 @@ interface Props {
 /** What a saved check says, and what to do now. */
 export function ResultPage({ bike: { record, log }, reading }: Props) {
   const { entryId } = useParams();
-  const { bikeId, details, summary } = record;
+  const { bikeId, access, details, summary, advice } = record;
   const { hoseMaybeOff } = useOpenDraft(record);
   const line = log.filter(isCheck).find(({ entry }) => entry.id === entryId);
   const check = summary.checks.find((one) => one.entryId === entryId);
   const back = { to: bikePath(bikeId), label: details.name };
+  const home = access === "owner" ? { to: patterns.shed, label: "Shed" } : backToLineUp();
   if (!line && reading) return <main className="flex-1" aria-busy />;
   if (!line)
     return (
@@ -55,8 +58,8 @@ export function ResultPage({ bike: { record, log }, reading }: Props) {
               Repeat the check
             </ButtonLink>
           )}
-          <ButtonLink look={repeats ? "quiet" : "primary"} wide to={patterns.shed}>
-            To the Shed
+          <ButtonLink look={repeats ? "quiet" : "primary"} wide to={home.to}>
+            To the {home.label}
           </ButtonLink>
         </>
       }
@@ -65,6 +68,7 @@ export function ResultPage({ bike: { record, log }, reading }: Props) {
         <span>{formatWhen(entry.at)}</span>
         <EntryStateMark state={line.state} />
       </p>
+      {isStop(advice) && <StopAdvised advice={advice} />}
       {hoseMaybeOff && (
         <Notice tone="error" title="Hose may be off: do not start">
           <ButtonLink look="danger" to={stepPaths(bikeId).closeOut}>
@@ -80,7 +84,7 @@ export function ResultPage({ bike: { record, log }, reading }: Props) {
           check={check}
           flags={isLast ? [...check.flags, ...summary.flags] : check.flags}
           body={entry.body}
-          hoseMaybeOff={hoseMaybeOff}
+          hoseMaybeOff={hoseMaybeOff || isStop(advice)}
         />
       ) : (
         <NotCounted body={entry.body} sequence={details.sequence} />
