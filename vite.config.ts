@@ -18,7 +18,7 @@ export default defineConfig({
           groups: [
             {
               name: "libraries",
-              test: /node_modules\/(react|react-dom|react-router|react-router-dom|scheduler|@tanstack|idb)\//,
+              test: /node_modules\/(react|react-dom|react-router|react-router-dom|scheduler|@tanstack\/[^/]*query[^/]*|idb)\//,
             },
           ],
         },

@@ -11,6 +11,11 @@ import { RequireAccount } from "./require-account.tsx";
 const NewBikePage = lazy(() => import("../features/shed/new-bike-page.tsx"));
 const BikeRoutes = lazy(() => import("../features/bike/index.tsx"));
 const CheckPage = lazy(() => import("../features/check/index.tsx"));
+const StationPage = lazy(() => import("../features/check/station/station-page.tsx"));
+const ClubsPage = lazy(() => import("../features/club/clubs-page.tsx"));
+const ClubRoutes = lazy(() => import("../features/club/index.tsx"));
+const SharePage = lazy(() => import("../features/club/share/share-page.tsx"));
+const JoinPage = lazy(() => import("../features/club/join-page.tsx"));
 const SyringesPage = lazy(() => import("../features/syringes/index.tsx"));
 const AccountPage = lazy(() => import("../features/account/account-page.tsx"));
 const SignInPage = lazy(() => import("../features/account/sign-in-page.tsx"));
@@ -18,6 +23,7 @@ const SignUpPage = lazy(() => import("../features/account/sign-up-page.tsx"));
 const ForgotPage = lazy(() => import("../features/account/forgot-page.tsx"));
 const ResetPage = lazy(() => import("../features/account/reset-page.tsx"));
 const VerifyPage = lazy(() => import("../features/account/verify-page.tsx"));
+const UnsubscribePage = lazy(() => import("../features/account/unsubscribe-page.tsx"));
 
 export function AppRoutes() {
   return (
@@ -28,6 +34,10 @@ export function AppRoutes() {
           <Route path={patterns.newBike} element={<NewBikePage />} />
           <Route path={patterns.check} element={<CheckPage />} />
           <Route path={patterns.bike} element={<BikeRoutes />} />
+          <Route path={patterns.share} element={<SharePage />} />
+          <Route path={patterns.clubs} element={<ClubsPage />} />
+          <Route path={patterns.testDayBike} element={<StationPage />} />
+          <Route path={patterns.club} element={<ClubRoutes />} />
           <Route path={patterns.syringes} element={<SyringesPage />} />
           <Route path={patterns.account} element={<AccountPage />} />
         </Route>
@@ -36,6 +46,8 @@ export function AppRoutes() {
         <Route path={patterns.forgot} element={<ForgotPage />} />
         <Route path={patterns.reset} element={<ResetPage />} />
         <Route path={patterns.verify} element={<VerifyPage />} />
+        <Route path={patterns.unsubscribe} element={<UnsubscribePage />} />
+        <Route path={patterns.join} element={<JoinPage />} />
         <Route path="*" element={<NotFoundPage />} />
       </Route>
     </Routes>

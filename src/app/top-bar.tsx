@@ -1,5 +1,5 @@
 import { Link } from "react-router-dom";
-import { AccountIcon, ExchangeIcon } from "../ui/icons.tsx";
+import { AccountIcon, ClubIcon, ExchangeIcon } from "../ui/icons.tsx";
 import { syncNow, useAccount, useSyncStatus } from "../offline/index.ts";
 import { patterns } from "../ui/paths.ts";
 import { statusWords } from "./status-words.ts";
@@ -20,9 +20,14 @@ export function TopBar() {
         </div>
         {account && <SyncButton />}
         {account && (
-          <Link to={patterns.account} aria-label="Account" className={iconClass}>
-            <AccountIcon />
-          </Link>
+          <>
+            <Link to={patterns.clubs} aria-label="Clubs" className={iconClass}>
+              <ClubIcon />
+            </Link>
+            <Link to={patterns.account} aria-label="Account" className={iconClass}>
+              <AccountIcon />
+            </Link>
+          </>
         )}
       </div>
     </header>

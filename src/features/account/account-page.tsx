@@ -5,6 +5,7 @@ import { Choice } from "../../ui/choice.tsx";
 import { Page } from "../../ui/page.tsx";
 import { patterns } from "../../ui/paths.ts";
 import { chooseTheme, chosenTheme } from "../../ui/theme-choice.ts";
+import { ReminderChoice } from "./reminder-choice.tsx";
 import { OnThisPhone } from "./on-this-phone.tsx";
 import { SignOut } from "./sign-out.tsx";
 
@@ -23,6 +24,7 @@ export default function AccountPage() {
         <p>What you measure with; a check names one, so that its marks are known.</p>
         <ButtonLink to={patterns.syringes}>My syringes</ButtonLink>
       </section>
+      <ReminderChoice />
       <OnThisPhone />
       <SignOut />
     </Page>

@@ -58,7 +58,7 @@ function UnsentLine({ kept }: { kept: KeptEntry }) {
   return (
     <li className="py-2">
       <p className="font-bold">
-        {bike ? `${bike.details.name}: ` : ""}
+        {bike?.details.name ? `${bike.details.name}: ` : ""}
         {kind}
       </p>
       <p className="flex flex-wrap gap-x-3 text-soft">

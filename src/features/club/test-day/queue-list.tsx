@@ -1,0 +1,114 @@
+import { useEffect, useState } from "react";
+import { Link } from "react-router-dom";
+import { fetchBikes, useBikes } from "../../../offline/index.ts";
+import { changeTestDay, type QueuedBike } from "../../../offline/test-day.ts";
+import { Button } from "../../../ui/button.tsx";
+import { CautionIcon, CloseIcon, PhoneIcon } from "../../../ui/icons.tsx";
+import { Notice } from "../../../ui/notice.tsx";
+import { testDayBikePath } from "../../../ui/paths.ts";
+import { readinessOf, takeOut, type Readiness } from "./queue.ts";
+
+interface Props {
+  clubId: string;
+  /** Those that wait, the next one first. */
+  bikes: QueuedBike[];
+}
+
+/** Who waits, and whether their logs are on this phone. */
+export function QueueList({ clubId, bikes }: Props) {
+  const here = useBikes().data ?? [];
+  const missing = bikes.filter((bike) => readinessOf(bike, here) !== "ready").length;
+  return (
+    <section aria-labelledby="queue" className="flex flex-col gap-3">
+      <h2 id="queue" className="text-2xl">
+        Queue: {bikes.length}
+      </h2>
+      {bikes.length === 0 ? (
+        <p>Nobody waits. Add the bikes while there is a network: their logs are fetched then.</p>
+      ) : (
+        <Logs bikeIds={bikes.map(({ bikeId }) => bikeId)} missing={missing} />
+      )}
+      <ol className="divide-y divide-rule border-y border-rule empty:hidden">
+        {bikes.map((bike) => (
+          <QueueLine
+            key={bike.bikeId}
+            clubId={clubId}
+            bike={bike}
+            readiness={readinessOf(bike, here)}
+          />
+        ))}
+      </ol>
+    </section>
+  );
+}
+
+/** Asked for once on coming here, for bikes that were added with no network. */
+function Logs({ bikeIds, missing }: { bikeIds: string[]; missing: number }) {
+  const [busy, setBusy] = useState(false);
+  const [first] = useState(bikeIds);
+  useEffect(() => void fetchBikes(first).catch(() => undefined), [first]);
+  const fetchNow = async () => {
+    setBusy(true);
+    await fetchBikes(bikeIds).catch(() => undefined);
+    setBusy(false);
+  };
+  if (missing === 0)
+    return <p role="status">All their logs are on this phone: no network is needed.</p>;
+  return (
+    <Notice
+      tone="caution"
+      title={`${missing} of ${bikeIds.length} ${missing === 1 ? "log is" : "logs are"} not on this phone`}
+    >
+      <p>A bike can be checked here once its log is. That needs the network.</p>
+      <Button disabled={busy} onClick={() => void fetchNow()}>
+        Fetch them now
+      </Button>
+    </Notice>
+  );
+}
+
+const readinessWords: Record<Readiness, string> = {
+  ready: "Ready",
+  awaited: "Not on this phone yet",
+  gone: "No longer shared",
+};
+
+interface LineProps {
+  clubId: string;
+  bike: QueuedBike;
+  readiness: Readiness;
+}
+
+function QueueLine({ clubId, bike, readiness }: LineProps) {
+  const { bikeId, name, owner, tag } = bike;
+  const Icon = readiness === "ready" ? PhoneIcon : CautionIcon;
+  return (
+    <li className="flex items-center">
+      <Link
+        to={testDayBikePath(clubId, bikeId)}
+        className="flex min-h-target min-w-0 flex-1 flex-wrap items-center gap-x-4 py-2 leading-snug"
+      >
+        <span className="min-w-0 flex-[1_1_10rem] wrap-anywhere">
+          <strong className="block text-lg">{name}</strong>
+          <span className="text-soft">
+            {owner} · {tag}
+          </span>
+        </span>
+        <span
+          className={`inline-flex items-center gap-1 ${readiness === "ready" ? "text-soft" : "text-dropping"}`}
+        >
+          <Icon className="size-4 shrink-0" />
+          {readinessWords[readiness]}
+        </span>
+      </Link>
+      <button
+        type="button"
+        aria-label={`Take ${name} out of the queue`}
+        onClick={() => void changeTestDay(clubId, (now) => takeOut(now, bikeId))}
+        className="flex min-h-target min-w-target shrink-0 items-center justify-center rounded-card"
+      >
+        <CloseIcon className="size-5" />
+      </button>
+    </li>
+  );
+}
