@@ -137,7 +137,7 @@ test("A rider can strike an entry with no network; it stays, ruled through, and 
   await server.stop();
   const line = logLines(page).filter({ hasText: "32.0" });
   await line.getByRole("button", { name: "Strike" }).click();
-  const sheet = page.getByRole("dialog", { name: "Strike this delivery check?" });
+  const sheet = page.getByRole("dialog", { name: "Strike this entry?" });
   await sheet.getByRole("button", { name: "Strike it", exact: true }).click();
   await expect(sheet.getByLabel("What was wrong with it?")).toHaveAccessibleDescription(/empty/);
   await sheet.getByLabel("What was wrong with it?").fill("The hose hung in the oil");
