@@ -121,7 +121,7 @@ async function live(steps: Step[]): Promise<void> {
   await world.server.stop();
 }
 
-it("keeps every promise about saving and sending", { timeout: 600_000 }, async () => {
+it("keeps every promise about saving and sending", { timeout: 7_200_000 }, async () => {
   await fc.assert(fc.asyncProperty(fc.array(anyStep, { minLength: 10, maxLength: 40 }), live), {
     numRuns: Number(process.env.MODEL_RUNS ?? 15),
     seed: Number(process.env.MODEL_SEED ?? 1),
