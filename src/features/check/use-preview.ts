@@ -4,7 +4,7 @@ import { previewSummary, type BikeRecord } from "../../offline/index.ts";
 import type { CheckEntry } from "./draft/check-entry.ts";
 
 /** A bike's summary as it would be with a check that is not saved yet. */
-export interface Preview {
+interface Preview {
   summary: Summary;
   /** Null where that check could not be counted. */
   check: CheckSummary | null;

@@ -41,7 +41,7 @@ export function beginCheck(beginning: Beginning): CheckDraft {
 /** A run as recorded, or one that is still to come. */
 export const runAt = (draft: CheckDraft, n: number): RunDraft => draft.runs[n - 1] ?? untouchedRun;
 
-export const isRead = (run: RunDraft) => !run.voided && parseDecimal(run.endText) !== null;
+const isRead = (run: RunDraft) => !run.voided && parseDecimal(run.endText) !== null;
 export const isOver = (run: RunDraft) => run.voided !== null || isRead(run);
 
 /** The run to do next: the first that is neither read nor void. */

@@ -1,6 +1,6 @@
 import type { WorkItem } from "../../../../shared/schemas/entry.ts";
 
-export interface Cause {
+interface Cause {
   id: string;
   line: string;
   /** What it counts as in the log. */

@@ -18,7 +18,7 @@ export function RunLength() {
   );
 }
 
-export function SecondsField() {
+function SecondsField() {
   const { n, run, change, sequence } = useRun();
   const [text, setText] = useState(() => String(run.seconds ?? sequence?.seconds ?? ""));
   const type = (typed: string) => {
