@@ -7,7 +7,7 @@ import { build as buildClient } from "vite";
 const root = path.resolve(import.meta.dirname, "..");
 process.chdir(root);
 
-const programs = ["index", "rebuild", "backup", "restore", "demo"]
+const programs = ["index", "rebuild", "backup", "restore", "admin", "demo"]
   .map((name) => `server/${name}.ts`)
   .filter((file) => existsSync(file));
 

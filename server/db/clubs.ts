@@ -1,4 +1,4 @@
-import { eq, inArray, sql } from "drizzle-orm";
+import { asc, eq, inArray, sql } from "drizzle-orm";
 import type { Database } from "./open-database.ts";
 import { bikeShares, clubInvites, clubMembers, clubs } from "./schema.ts";
 
@@ -14,6 +14,7 @@ export function createClubs(db: Database) {
 
   return {
     add: (club: Omit<ClubRow, "revision">) => db.insert(clubs).values(club).run(),
+    all: (): ClubRow[] => db.select().from(clubs).orderBy(asc(clubs.name), asc(clubs.id)).all(),
     find: (id: string): ClubRow | undefined =>
       db.select().from(clubs).where(eq(clubs.id, id)).get(),
     /** To be called in the transaction that changes what the club's Line-up shows. */

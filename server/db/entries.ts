@@ -1,7 +1,7 @@
-import { and, asc, count, eq, gt, sql } from "drizzle-orm";
+import { and, asc, count, eq, gt, ne, sql } from "drizzle-orm";
 import type { StoredEntry } from "../../shared/schemas/entry.ts";
 import type { Database } from "./open-database.ts";
-import { entries, users } from "./schema.ts";
+import { bikes, entries, users } from "./schema.ts";
 
 export type EntryRow = typeof entries.$inferSelect;
 
@@ -73,6 +73,17 @@ export function createEntries(db: Database) {
     /** Ascending by `rev`. */
     ofBike: (bikeId: string, afterRev = 0, limit = -1): StoredEntry[] =>
       ofBikeAfter.all({ bikeId, afterRev, limit }).map(sent),
+    /** What an account wrote in the logs of other people's bikes. Reads every entry there is. */
+    writtenElsewhere: (authorId: string): StoredEntry[] =>
+      db
+        .select(sentColumns)
+        .from(entries)
+        .innerJoin(bikes, eq(bikes.id, entries.bikeId))
+        .leftJoin(users, eq(users.id, entries.authorId))
+        .where(and(eq(entries.authorId, authorId), ne(bikes.ownerId, authorId)))
+        .orderBy(asc(entries.rev))
+        .all()
+        .map(sent),
     removeOf: (bikeId: string) => db.delete(entries).where(eq(entries.bikeId, bikeId)).run(),
   };
 }

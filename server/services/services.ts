@@ -32,7 +32,7 @@ export function createServices(parts: AccountParts) {
       bikeSummaryJson(store, accountId, bikeId),
     ownSummariesJson: (accountId: string) => ownSummariesJson(store, accountId),
     eraseBike: (accountId: string, bikeId: string) => eraseBike(store, accountId, bikeId),
-    exportAccount: (accountId: string) => exportAccount(store, accounts.find(accountId)),
+    exportAccount: (accountId: string) => exportAccount(parts, accounts.find(accountId)),
     checksCsv: (accountId: string) => checksCsv(store, accountId),
     mailAllDue: (now?: Date) => mailAllDue(parts, now),
     completeSummaries: () => completeSummaries(store),
