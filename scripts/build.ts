@@ -3,6 +3,7 @@ import { build as bundle } from "esbuild";
 import { existsSync, rmSync } from "node:fs";
 import path from "node:path";
 import { build as buildClient } from "vite";
+import { earlierChunks } from "./earlier-chunks.ts";
 
 const root = path.resolve(import.meta.dirname, "..");
 process.chdir(root);
@@ -26,5 +27,8 @@ async function buildServer(): Promise<void> {
   });
 }
 
+const { setAside, bringBack } = earlierChunks("dist");
 await buildServer();
+setAside();
 await buildClient({ logLevel: "warn" });
+bringBack();
