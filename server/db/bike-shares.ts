@@ -1,6 +1,6 @@
 import { and, asc, eq, inArray, sql } from "drizzle-orm";
 import type { Database } from "./open-database.ts";
-import { bikes, bikeShares, bikeSummaries, clubMembers, clubs, users } from "./schema.ts";
+import { bikes, bikeShares, lineUpFacts, clubMembers, clubs, users } from "./schema.ts";
 
 /** Where a bike stands on its boards. */
 export interface BoardPlace {
@@ -32,11 +32,11 @@ export function createBikeShares(db: Database) {
       rank: bikeShares.rank,
       dueInHours: bikeShares.dueInHours,
       bikeId: bikeShares.bikeId,
-      json: sql<string>`json_insert(${bikeSummaries.lineUp}, '$.owner',
+      json: sql<string>`json_insert(${lineUpFacts.facts}, '$.owner',
         json_object('id', ${users.id}, 'name', ${users.name}))`,
     })
     .from(bikeShares)
-    .innerJoin(bikeSummaries, eq(bikeSummaries.bikeId, bikeShares.bikeId))
+    .innerJoin(lineUpFacts, eq(lineUpFacts.bikeId, bikeShares.bikeId))
     .innerJoin(bikes, eq(bikes.id, bikeShares.bikeId))
     .innerJoin(users, eq(users.id, bikes.ownerId))
     .where(

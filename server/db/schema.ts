@@ -100,32 +100,42 @@ export const entries = sqliteTable(
   (table) => [index("entries_bike_rev").on(table.bikeId, table.rev)],
 );
 
-/** What `summariseLogbook` says of each bike, and the columns that are searched and sorted by. */
-export const bikeSummaries = sqliteTable(
-  "bike_summaries",
+/** What `summariseLogbook` says of each bike, and the columns that lists sort and filter by. */
+export const bikeSummaries = sqliteTable("bike_summaries", {
+  bikeId: text()
+    .primaryKey()
+    .references(() => bikes.id),
+  name: text().notNull(),
+  retired: integer({ mode: "boolean" }).notNull(),
+  verdict: text().$type<Verdict>().notNull(),
+  action: text().$type<Action>(),
+  pLow: real(),
+  hoursNow: real(),
+  dueInHours: real(),
+  lastCheckAt: text(),
+  summary: text({ mode: "json" }).$type<Summary>().notNull(),
+});
+
+/**
+ * What a Line-up shows of each bike and reminders go by: apart from the summary, which grows with
+ * the log and would have to be read past.
+ */
+export const lineUpFacts = sqliteTable(
+  "line_up_facts",
   {
     bikeId: text()
       .primaryKey()
       .references(() => bikes.id),
-    name: text().notNull(),
-    retired: integer({ mode: "boolean" }).notNull(),
-    verdict: text().$type<Verdict>().notNull(),
-    action: text().$type<Action>(),
-    pLow: real(),
-    hoursNow: real(),
-    dueInHours: real(),
+    /** The index of its place in `lineUpOrder`. */
+    rank: integer().notNull(),
+    dueInHours: real().notNull(),
     /** YYYY-MM-DD; null where the hours a week are not known. */
     dueOn: text(),
-    lastCheckAt: text(),
-    /** The bike's place on a Line-up: its index in `lineUpOrder`. */
-    rank: integer().notNull().default(0),
-    /** What a Line-up shows of the bike. Null only until the server's first start after the migration. */
-    lineUp: text({ mode: "json" }).$type<LineUpFacts>(),
-    summary: text({ mode: "json" }).$type<Summary>().notNull(),
+    facts: text({ mode: "json" }).$type<LineUpFacts>().notNull(),
   },
   (table) => [
-    index("bike_summaries_due_hours").on(table.dueInHours),
-    index("bike_summaries_due_on").on(table.dueOn),
+    index("line_up_facts_due_hours").on(table.dueInHours),
+    index("line_up_facts_due_on").on(table.dueOn),
   ],
 );
 
@@ -176,8 +186,8 @@ export const clubInvites = sqliteTable(
 );
 
 /**
- * The bikes on each club's Line-up. Rank and hours are copies of the summary's, kept in step with
- * it, so that a page of the board is read off one index, worst first.
+ * The bikes on each club's Line-up. Rank and hours are copies of the bike's facts, kept in step with
+ * them, so that a page of the board is read off one index, worst first.
  */
 export const bikeShares = sqliteTable(
   "bike_shares",

@@ -9,6 +9,7 @@ import { createEntries } from "./entries.ts";
 import { createEpoch } from "./epoch.ts";
 import { createErasedIds } from "./erased-ids.ts";
 import { createErasureRecord } from "./erasure-record.ts";
+import { createLineUpFacts } from "./line-up-facts.ts";
 import { createMailedTokens } from "./mailed-tokens.ts";
 import { createMails } from "./mails.ts";
 import type { Database } from "./open-database.ts";
@@ -24,6 +25,7 @@ export function createStore(db: Database, dataDir: string) {
     bikes: createBikes(db),
     entries: createEntries(db),
     bikeSummaries: createBikeSummaries(db),
+    lineUpFacts: createLineUpFacts(db),
     dueBikes: createDueBikes(db),
     clubs: createClubs(db),
     clubMembers: createClubMembers(db),

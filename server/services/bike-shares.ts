@@ -24,9 +24,11 @@ export function createBikeShareService(store: Store) {
       store.write(() => {
         assertOwner(store, accountId, bikeId);
         membershipAs(store, accountId, clubId, "member");
-        const place = store.bikeSummaries.placeOf(bikeId);
-        if (!place) throw notFound();
-        store.bikeShares.add({ bikeId, clubId, sharedAt: new Date().toISOString(), ...place });
+        const facts = store.lineUpFacts.find(bikeId);
+        if (!facts) throw notFound();
+        const { rank, dueInHours } = facts;
+        const sharedAt = new Date().toISOString();
+        store.bikeShares.add({ bikeId, clubId, sharedAt, rank, dueInHours });
         store.clubs.touch(clubId);
       });
     },

@@ -1,10 +1,12 @@
 import { addDays, formatISO, subDays } from "date-fns";
 import { setImmediate } from "node:timers/promises";
 import { DUE_SOON_HOURS } from "../../shared/schemas/club.ts";
+import { summarySchema } from "../../shared/schemas/summary.ts";
 import type { DueBike } from "../db/due-bikes.ts";
 import { dueMessage } from "../mail/bike-messages.ts";
 import { aboutBike } from "./about-bike.ts";
 import type { MailParts } from "./mail-parts.ts";
+import { bikeSummaryJson } from "./read-bikes.ts";
 
 /** A check whose likely date is this close is due soon. */
 const SOON_DAYS = 7;
@@ -14,17 +16,21 @@ const QUIET_DAYS = 7;
 const dateOf = (time: Date) => formatISO(time, { representation: "date" });
 
 /** Once when it is due soon and once when it is overdue; another check begins anew. */
-function mailDue(parts: MailParts, { due, readAt, ...bike }: DueBike, now: Date): void {
-  const { bikeId, name: bikeName, userId, email } = bike;
-  const overdue = due.overdue || (due.onDate !== null && due.onDate < dateOf(now));
-  const occasion = `${bikeId} ${overdue ? "overdue" : "soon"} ${due.atHours.toFixed(1)}`;
+function mailDue(parts: MailParts, { facts, userId, email }: DueBike, now: Date): void {
+  const { bikeId, name: bikeName, hoursNow, dueInHours, onDate } = facts;
+  const overdue = dueInHours < 0 || (onDate !== null && onDate < dateOf(now));
+  const atHours = ((hoursNow ?? 0) + dueInHours).toFixed(1);
+  const occasion = `${bikeId} ${overdue ? "overdue" : "soon"} ${atHours}`;
   if (parts.store.mails.isKnown(userId, "due", occasion)) return;
+  const { due, hours } = summarySchema.parse(
+    JSON.parse(bikeSummaryJson(parts.store, userId, bikeId)),
+  );
   parts.mailer.queue({
     ...{ topic: "due", userId, bikeId, to: email, occasion },
     goodUntil: addDays(now, QUIET_DAYS).getTime(),
     message: dueMessage({
       ...aboutBike(parts, { bikeId, bikeName, userId }, "dueMails"),
-      ...{ due, readAt, overdue },
+      ...{ due, readAt: hours.readAt, overdue },
     }),
   });
 }

@@ -9,6 +9,7 @@ function eraseRows(store: Store, { bikeIds, entryIds, accountId }: Erasure): voi
     store.clubs.touchAllOf(bikeId);
     store.bikeShares.removeAllOf(bikeId);
     store.mails.removeAbout(bikeId);
+    store.lineUpFacts.remove(bikeId);
     store.bikeSummaries.remove(bikeId);
     store.entries.removeOf(bikeId);
     store.bikes.remove(bikeId);

@@ -17,9 +17,8 @@ export function summariseBike(store: Store, bikeId: string): Summary | null {
   const summary = summariseLogbook({ ownerId, entries });
   const lineUp = lineUpFacts({ ownerId, entries }, summary);
   const place = { rank: lineUpOrder.indexOf(lineUp.place), dueInHours: lineUp.dueInHours };
-  const moves = store.bikeSummaries.lineUpJsonOf(bikeId) !== JSON.stringify(lineUp);
+  const moves = store.lineUpFacts.find(bikeId)?.json !== JSON.stringify(lineUp);
   store.bikeSummaries.put({
-    ...place,
     bikeId,
     name: summary.name,
     retired: lineUp.place === "retired",
@@ -27,12 +26,12 @@ export function summariseBike(store: Store, bikeId: string): Summary | null {
     action: summary.action,
     pLow: summary.pLow,
     hoursNow: summary.hours.now,
-    dueOn: summary.due.onDate,
+    dueInHours: summary.due.inHours,
     lastCheckAt: lineUp.lastCheckAt,
-    lineUp,
     summary,
   });
   if (moves) {
+    store.lineUpFacts.put({ bikeId, ...place, dueOn: lineUp.onDate, facts: lineUp });
     store.bikeShares.place(bikeId, place);
     store.clubs.touchAllOf(bikeId);
   }
@@ -50,4 +49,4 @@ export const rebuildSummaries = (store: Store) => summariseEach(store, store.bik
 
 /** Makes anew those that an older server made, which knew of no Line-up. */
 export const completeSummaries = (store: Store) =>
-  summariseEach(store, store.bikeSummaries.withoutLineUp());
+  summariseEach(store, store.lineUpFacts.missing());
