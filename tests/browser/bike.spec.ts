@@ -66,7 +66,12 @@ test("A rider is told not to start while the hose may be off, and can close the 
   await expect(page.getByRole("alert")).toContainText("Hose may be off: do not start");
   await expect(page.getByText("Ride on")).toBeHidden();
   await page.getByRole("link", { name: "Close it out" }).click();
-  await expect(page).toHaveURL(/\/check\/close-out$/);
+  await expect(page.getByRole("checkbox")).toHaveCount(5);
+  for (const tick of await page.getByRole("checkbox").all()) await tick.check();
+  await page.getByRole("button", { name: "Save the close-out" }).click();
+  await expect(page.getByText("Ride on")).toBeVisible();
+  await expect(page.getByText("Hose may be off: do not start")).toBeHidden();
+  await expect(logLines(page).first()).toContainText("Oil line bled");
 });
 
 test("A rider can step through the delivery chart by keyboard, button and tap", async ({
