@@ -11,7 +11,7 @@ import { EntryStateMark } from "../../ui/entry-state-mark.tsx";
 import { Fold } from "../../ui/fold.tsx";
 import { formatWhen } from "../../ui/format-when.ts";
 import { kindWords, refusalWords } from "../../ui/words.ts";
-import { saveFile } from "./save-file.ts";
+import { saveFile } from "../../ui/save-file.ts";
 
 const healthWords: Record<StorageHealth, string> = {
   unasked:
