@@ -7,6 +7,7 @@ import { openDatabase } from "./database.ts";
 import { keepEntry } from "./keep-entry.ts";
 import { previewSummary } from "./preview-summary.ts";
 import { readBike } from "./read-bike.ts";
+import { rebuildBikes } from "./rebuild-bikes.ts";
 
 const bikeId = "0193a000-0000-7000-8000-000000000001";
 const at = "2026-03-01T09:00:00.000Z";
@@ -45,7 +46,22 @@ describe("keeping an entry", () => {
     expect(kept.entry.id).toMatch(/^[0-9a-f]{8}-[0-9a-f]{4}-7/);
   });
 
-  it("makes the bike's record in the same transaction", async () => {
+  it("is judged at the next start where the app was closed right after saving", async () => {
+    const phone = testPhone();
+    await keep(phone, newBike);
+    // Two openings write the entry and read it back; the third would judge it.
+    let openings = 0;
+    const open = () => ((openings += 1) > 2 ? Promise.reject(new Error("closed")) : phone.open());
+    await keep({ ...phone, open }, hours(12));
+    const before = await readBike(phone, bikeId);
+    expect(before?.record).toMatchObject({ unsent: 2, summary: { hours: { now: null } } });
+    expect(await rebuildBikes(phone)).toBe(true);
+    expect(await rebuildBikes(phone)).toBe(false);
+    const after = await readBike(phone, bikeId);
+    expect(after?.record).toMatchObject({ unsent: 2, summary: { hours: { now: 12 } } });
+  });
+
+  it("makes the bike's record anew", async () => {
     const phone = testPhone();
     await keep(phone, newBike);
     await keep(phone, check);

@@ -9,6 +9,7 @@ import type { EntryRow, LogbookChange } from "./database.ts";
 import { asKeptEntry } from "./kept-entry.ts";
 import { checkRegistered, parseNewEntry } from "./parse-new-entry.ts";
 import type { Phone } from "./phone.ts";
+import { rebuildBikes } from "./rebuild-bikes.ts";
 import { refreshBike } from "./refresh-bike.ts";
 import { rememberSyringe } from "./remember-syringe.ts";
 
@@ -28,22 +29,30 @@ function contentKey(phone: Phone, entry: NewEntry): string {
   return hashKey([phone.databaseName, { ...entry, at: undefined }]);
 }
 
+/**
+ * A bike's first entry makes its record. A later one only marks it as not yet judged: a long log
+ * takes its time, and saving must not wait for that. `rebuildBikes` judges it, next or, should the
+ * app be closed in between, at the next start.
+ */
+async function markUnjudged(change: LogbookChange, entry: Entry, phone: Phone): Promise<void> {
+  const { bikeId } = entry;
+  const bikes = change.objectStore("bikes");
+  const bike = await bikes.get(bikeId);
+  checkRegistered(entry, bike);
+  if (bike) await bikes.put({ ...bike, unsent: bike.unsent + 1, builtWith: "" });
+  else await refreshBike(change, { bikeId, access: "owner", rev: 0 }, phone.account);
+}
+
 async function writeAll(
   change: LogbookChange,
   row: EntryRow,
   phone: Phone,
   draft: KeepOptions["draft"],
 ): Promise<void> {
-  const entry = row.entry as Entry;
-  const bike = await change.objectStore("bikes").get(entry.bikeId);
-  checkRegistered(entry, bike);
   const entries = change.objectStore("entries");
-  if (!(await entries.get(entry.id))) await entries.add(row);
-  await refreshBike(
-    change,
-    bike ?? { bikeId: entry.bikeId, access: "owner", rev: 0 },
-    phone.account,
-  );
+  if (await entries.get(row.entry.id)) return;
+  await entries.add(row);
+  await markUnjudged(change, row.entry as Entry, phone);
   await rememberSyringe(change, row, phone.account);
   if (draft) await change.objectStore("drafts").delete([draft.bikeId, draft.form]);
 }
@@ -78,6 +87,8 @@ export async function keepEntry(
     const work = write({ entry, savedAt, unsentSince: savedAt }, phone, options);
     const row = await orAborted(work, options.signal);
     givenUp.delete(key);
+    // The entry is saved, whatever becomes of this.
+    await rebuildBikes(phone).catch(() => undefined);
     return asKeptEntry(row, phone.account);
   } catch (error) {
     if (isTyped(error)) throw error;

@@ -6,7 +6,10 @@ import { refreshBike } from "./refresh-bike.ts";
 
 const isCurrent = (bike: BikeRow) => bike.format === BIKE_ROW_FORMAT && bike.builtWith === BUILD;
 
-/** Judges anew what another version of the app judged. True where there was any. */
+/**
+ * Judges anew what another version of the app judged, and what has had an entry since. True where
+ * there was any.
+ */
 export function rebuildBikes(phone: Phone): Promise<boolean> {
   return changeLogbook(phone, async (change) => {
     const bikes = await change.objectStore("bikes").getAll();
