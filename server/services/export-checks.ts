@@ -18,18 +18,22 @@ const runInWords = (run: Run) =>
   ("endMl" in run ? `${run.startMl} to ${run.endMl}` : `${run.deliveredMl}`) +
   (run.void ? " (void)" : "");
 
+/** To four decimals: finer than anything that was read. */
+const rounded = (value: number | null | undefined) =>
+  typeof value === "number" ? Number(value.toFixed(4)) : null;
+
 const columns: Record<string, (row: Row) => string | number | null | undefined> = {
   Bike: ({ bike }) => bike,
   "Checked at": ({ check }) => check.at,
   "Meter, h": ({ check }) => check.hours,
-  "Engine hours": ({ judged }) => judged?.atHours,
-  "Delivery, mL a run": ({ judged }) => judged?.perRunMl,
-  "Standard uncertainty, mL": ({ judged }) => judged?.uMl,
-  "Part of baseline": ({ judged }) => judged?.ratio,
-  "Standard uncertainty of part": ({ judged }) => judged?.uRatio,
+  "Engine hours": ({ judged }) => rounded(judged?.atHours),
+  "Delivery, mL a run": ({ judged }) => rounded(judged?.perRunMl),
+  "Standard uncertainty, mL": ({ judged }) => rounded(judged?.uMl),
+  "Part of baseline": ({ judged }) => rounded(judged?.ratio),
+  "Standard uncertainty of part": ({ judged }) => rounded(judged?.uRatio),
   Delivery: ({ judged }) => judged?.verdict,
   Action: ({ judged }) => judged?.action,
-  "Probability of low": ({ judged }) => judged?.pLow,
+  "Probability of low": ({ judged }) => rounded(judged?.pLow),
   Counts: ({ judged, struck }) => (struck ? "struck" : judged ? "yes" : "no"),
   "Runs, mL": ({ check }) => check.body.runs.map(runInWords).join("; "),
   Syringe: ({ check }) => check.body.syringe?.label,

@@ -1,7 +1,16 @@
 import { readFileSync } from "node:fs";
 import path from "node:path";
 import { describe, expect, it } from "vitest";
-import { bikeEntry, hoursEntry, newId, noteEntry, smallLog } from "../helpers/make-entry.ts";
+import { clubOfFour } from "../helpers/club.ts";
+import {
+  bikeEntry,
+  checkEntry,
+  hoursEntry,
+  newId,
+  noteEntry,
+  smallLog,
+  strikeEntry,
+} from "../helpers/make-entry.ts";
 import { createPhone, PASSWORD, signInRider, signUpRider } from "../helpers/rider.ts";
 import { startTestServer } from "../helpers/start-test-server.ts";
 
@@ -63,6 +72,43 @@ describe("one's own data", () => {
     });
   });
 
+  it("names the devices, and what was written of other people's bikes", async () => {
+    const server = await startTestServer();
+    const { mechanic, bikeId } = await clubOfFour(server);
+    const note = noteEntry(bikeId);
+    await mechanic.sync([note]);
+    const response = await mechanic.phone.get("/api/export").expect(200);
+    expect(response.body).toMatchObject({
+      user: mechanic.user,
+      devices: [{ name: "Unknown browser" }],
+      clubs: [{ name: "Moor Riders", mechanic: true }],
+      bikes: [],
+      writtenElsewhere: [{ id: note.id, bikeId }],
+    });
+  });
+
+  it("holds every check as a line for a spreadsheet, which runs none of it", async () => {
+    const rider = await signUpRider(await startTestServer());
+    const bikeId = newId();
+    const [registered, ...log] = smallLog(bikeId);
+    const formula = '=HYPERLINK("http://elsewhere.example")';
+    const named = { ...registered!, body: { name: "-Moss, the first" } };
+    const cold = checkEntry(bikeId, 34, 3, "2026-05-01T09:00:00.000Z");
+    const noted = { ...cold, body: { ...cold.body, oilTempC: -5, note: formula } };
+    await rider.sync([named, ...log, noted, strikeEntry(bikeId, noted.id)]);
+    const response = await rider.phone.get("/api/export/checks.csv").expect(200);
+    expect(response.headers["content-type"]).toBe("text/csv; charset=utf-8");
+    expect(response.headers["content-disposition"]).toContain("attachment");
+    const [header, ...lines] = response.text.replace("\uFEFF", "").trim().split("\r\n");
+    expect(header).toContain('Bike,Checked at,"Meter, h",Engine hours,"Delivery, mL a run"');
+    const name = '"\'-Moss, the first"';
+    expect(lines).toHaveLength(3);
+    expect(lines[0]).toMatch(new RegExp(`^${name},2026-03-02T09:00:00.000Z,12,12,2.9892,0.1017,`));
+    expect(lines[1]).toContain(",low,stop,");
+    expect(lines[2]).toContain(",struck,0 to 3,5 mL,0.2,-5,,yes,Ann,");
+    expect(lines[2]).toContain(`"'=HYPERLINK(""http://elsewhere.example"")"`);
+  });
+
   it("is erased with the account, for whoever knows its password", async () => {
     const server = await startTestServer();
     const rider = await signUpRider(server);
@@ -85,5 +131,21 @@ describe("one's own data", () => {
     expect(kept).toEqual([1, 0, 0, 0, 1, 1]);
     const { results } = await bystander.sync(log);
     expect(new Set(results.map(({ reason }) => reason))).toEqual(new Set(["erased"]));
+  });
+
+  it("leaves what was written of other people's bikes, without the name", async () => {
+    const server = await startTestServer();
+    const { mechanic, owner, bikeId } = await clubOfFour(server);
+    const note = noteEntry(bikeId);
+    await mechanic.sync([note]);
+    await mechanic.phone.delete("/api/account").send({ password: PASSWORD }).expect(204);
+    const { bikes } = await owner.sync([]);
+    const kept = bikes[0]!.entries.find(({ id }) => id === note.id)!;
+    expect(kept.author.name).toBe("Former member");
+    const everything = JSON.stringify(
+      server.database.$client.prepare("SELECT * FROM users, mails").all(),
+    );
+    expect(everything).not.toContain(mechanic.user.email);
+    expect(everything).not.toContain("Mick");
   });
 });

@@ -63,6 +63,25 @@ describe("rate limits", () => {
     await ask().expect(429);
   });
 
+  it("let a signed-in phone guess ten times at its own account's password", async () => {
+    const { phone } = await signUpRider(await startTestServer());
+    const tries = [
+      () => phone.delete("/api/account").send({ password: "not the password" }),
+      () =>
+        phone
+          .post("/api/account/email")
+          .send({ email: "new@club.example", password: "not the password" }),
+      () =>
+        phone
+          .post("/api/account/password")
+          .send({ password: "not the password", newPassword: "another pump altogether" }),
+    ];
+    let next = 0;
+    const ask = () => tries[next++ % tries.length]!();
+    expect(await statuses(10, ask)).toEqual(repeated(10, 422));
+    expect(await statuses(3, ask)).toEqual(repeated(3, 429));
+  });
+
   it("let an account sync 240 times a minute, whatever others do", async () => {
     const server = await startTestServer();
     const [{ phone }, other] = [await signUpRider(server), await signUpRider(server, "Bob")];

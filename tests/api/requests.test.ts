@@ -138,10 +138,14 @@ describe("security headers", () => {
     const headers = await headersOf("http://localhost:3000");
     const policy = headers["content-security-policy"]!.split(";");
     expect(policy).toContain("script-src 'self'");
+    expect(policy).toContain("style-src 'self'");
+    expect(policy).toContain("object-src 'none'");
+    expect(policy).toContain("base-uri 'none'");
     expect(policy).toContain("frame-ancestors 'none'");
     expect(headers["x-content-type-options"]).toBe("nosniff");
     expect(headers["referrer-policy"]).toBe("no-referrer");
     expect(headers["permissions-policy"]).toContain("camera=(self), microphone=(self)");
+    expect(headers["permissions-policy"]).toContain("geolocation=()");
     expect(headers).not.toHaveProperty("x-powered-by");
   });
 
@@ -150,7 +154,7 @@ describe("security headers", () => {
     expect(plain).not.toHaveProperty("strict-transport-security");
     expect(plain["content-security-policy"]).not.toContain("upgrade-insecure-requests");
     const secure = await headersOf("https://logbook.example");
-    expect(secure["strict-transport-security"]).toContain("max-age=");
+    expect(secure["strict-transport-security"]).toBe("max-age=31536000; includeSubDomains");
     expect(secure["content-security-policy"]).toContain("upgrade-insecure-requests");
   });
 });

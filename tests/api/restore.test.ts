@@ -5,6 +5,7 @@ import { assertIntegrity, backUpDatabase, backupsDir } from "../../server/db/bac
 import { databaseFile } from "../../server/db/open-database.ts";
 import { restoreDatabase } from "../../server/services/restore-database.ts";
 import { rebuildSummaries } from "../../server/services/summarise-bike.ts";
+import { clubOfFour } from "../helpers/club.ts";
 import { bikeEntry, hoursEntry, newId, noteEntry, smallLog } from "../helpers/make-entry.ts";
 import { PASSWORD, signInRider, signUpRider } from "../helpers/rider.ts";
 import { startTestServer, temporaryDir, type TestServer } from "../helpers/start-test-server.ts";
@@ -70,6 +71,18 @@ describe("a restored server", () => {
     const { results } = await restored.sync([...log, late]);
     expect(new Set(results.map(({ reason }) => reason))).toEqual(new Set(["erased"]));
     expect(restoredServer.store.users.findByEmail(leaver.user.email)).toBeUndefined();
+  });
+
+  it("leaves without a name what an account wrote that was erased since the backup", async () => {
+    const server = await startTestServer();
+    const { mechanic, owner, bikeId } = await clubOfFour(server);
+    const note = noteEntry(bikeId);
+    await mechanic.sync([note]);
+    const backup = await backUp(server);
+    await mechanic.phone.delete("/api/account").send({ password: PASSWORD }).expect(204);
+    const restored = await signInRider(await restoreAndStart(server, backup), owner.user.email);
+    const { bikes } = await restored.sync([]);
+    expect(bikes[0]!.entries.find(({ id }) => id === note.id)?.author.name).toBe("Former member");
   });
 
   it("heeds every erasure that was confirmed, also after one that was cut short", async () => {
