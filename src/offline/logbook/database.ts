@@ -24,7 +24,7 @@ export interface BikeRow extends BikeRecord {
   /** The highest `rev` this phone was sent; 0 where the server has sent none. */
   rev: number;
   format: number;
-  /** The build whose code made the summary. */
+  /** The build whose code made the summary; empty where an entry is not in it yet. */
   builtWith: string;
 }
 
