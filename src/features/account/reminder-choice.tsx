@@ -26,7 +26,7 @@ export function ReminderChoice() {
   return (
     <section className="flex flex-col gap-1 border-t border-rule pt-4">
       <h2 className="text-xl">Reminders by e-mail</h2>
-      <p>Sent only to an address that you have confirmed, and never more than one a week a bike.</p>
+      <p>Sent only to an address that you have confirmed.</p>
       {data && <Ticks reminders={data} />}
       {!data && error && <p className="text-soft">{error.message}</p>}
     </section>
@@ -39,7 +39,7 @@ function Ticks({ reminders }: { reminders: Reminders }) {
     <>
       <ReminderTick change={{ ...reminders, dueMails: !dueMails }} checked={dueMails}>
         <strong className="block">A check falls due</strong>
-        Before it is due, and while it is overdue.
+        Before it is due, and while it is overdue; at most one a week for each bike.
       </ReminderTick>
       <ReminderTick change={{ ...reminders, stopMails: !stopMails }} checked={stopMails}>
         <strong className="block">A pump is found low</strong>

@@ -54,6 +54,7 @@ function Filled({
   const edit = (change: (draft: QuickDraft) => QuickDraft) => live.change(change, untouched);
   const patch = (typed: Partial<QuickDraft>) => edit((now) => ({ ...now, ...typed }));
 
+  const plan = planStation(record, syringe);
   const done = withoutUntouched(draft);
   const entry = quickEntry(done, { bikeId, sequence: details.sequence });
   const found = quickErrors(done);
@@ -91,7 +92,10 @@ function Filled({
       {isStop(advice) && <StopAdvised advice={advice} />}
       <UnkeptNotice unkept={live.unkept} />
       <HoursPart record={record} value={draft} onChange={patch} errors={shown} />
-      <p>{planSentence(planStation(record, syringe), syringe)}</p>
+      <p>
+        {plan.runs !== null && <strong>{runsWords(plan.runs)} </strong>}
+        {planSentence(plan, syringe)}
+      </p>
       <StationRuns draft={draft} edit={edit} errors={shown} />
       <Tick
         checked={isClosedOut(draft.closeOut)}
@@ -122,3 +126,5 @@ function Filled({
     </Page>
   );
 }
+
+const runsWords = (runs: number) => (runs === 1 ? "1 run." : `${runs} runs.`);

@@ -1,3 +1,4 @@
+import { useState } from "react";
 import { MAX_RUNS } from "../../../../shared/schemas/entry.ts";
 import { Button } from "../../../ui/button.tsx";
 import { NumberField } from "../../../ui/number-field.tsx";
@@ -15,38 +16,60 @@ interface Props {
 
 /** One level a run: where it started is asked for only where the barrel was emptied before it. */
 export function StationRuns({ draft, edit, errors }: Props) {
+  const [allStarts, setAllStarts] = useState(false);
+  const addClass = "flex-1 px-2! text-base!";
   return (
-    <div className="flex flex-col gap-4">
+    <div className="flex flex-col gap-3">
       {draft.runs.map((run, index) => (
-        <StationRun key={index} n={index + 1} run={run} draft={draft} edit={edit} errors={errors} />
+        <StationRun
+          key={index}
+          n={index + 1}
+          run={run}
+          {...{ draft, edit, errors }}
+          asksStart={allStarts || run.startText !== null}
+        />
       ))}
-      <div className="flex flex-wrap gap-2">
-        {draft.runs.length < MAX_RUNS && (
-          <>
-            <Button className="flex-auto" onClick={() => edit((now) => addRun(now, false))}>
-              One more on top
-            </Button>
-            <Button className="flex-auto" onClick={() => edit((now) => addRun(now, true))}>
-              One more, emptied
-            </Button>
-          </>
-        )}
-      </div>
+      {draft.runs.length < MAX_RUNS && (
+        <div className="flex gap-2 border-t border-rule pt-3">
+          <Button className={addClass} onClick={() => edit((now) => addRun(now, false))}>
+            One more on top
+          </Button>
+          <Button className={addClass} onClick={() => edit((now) => addRun(now, true))}>
+            One more, emptied
+          </Button>
+        </div>
+      )}
+      {!allStarts && (
+        <button
+          type="button"
+          onClick={() => setAllStarts(true)}
+          className="flex min-h-target items-center self-start font-bold text-oil"
+        >
+          A run started at another level
+        </button>
+      )}
     </div>
   );
 }
 
-function StationRun({ n, run, draft, edit, errors }: Props & { n: number; run: RunDraft }) {
+interface RunProps extends Props {
+  n: number;
+  run: RunDraft;
+  asksStart: boolean;
+}
+
+function StationRun({ n, run, asksStart, draft, edit, errors }: RunProps) {
   const startText = startTextOf(draft, n, null);
   const startError = errors[`runs.${n - 1}.start`] ?? errors[`body.runs.${n - 1}.startMl`];
   const step = draft.syringe ? draft.syringe.graduationMl / 2 : USUAL_STEP_ML;
   const type = (typed: Partial<RunDraft>) =>
     edit((now) => ({ ...now, ...changeRun(now, n, typed) }));
-  const follows = run.startText === null && !startError;
+  const from = startText ? `From ${startText}\u00a0mL.` : `From where run ${n - 1} ended.`;
+  const asks = asksStart || startError !== undefined;
   return (
-    <fieldset className="flex flex-wrap items-end gap-3 border-t border-rule pt-3">
+    <fieldset className="flex flex-wrap gap-3 border-t border-rule pt-3">
       <legend className="sr-only">Run {n}</legend>
-      {!follows && (
+      {asks && (
         <div className="flex-[1_1_14rem]">
           <NumberField
             label={`Run ${n}: level before`}
@@ -62,7 +85,7 @@ function StationRun({ n, run, draft, edit, errors }: Props & { n: number; run: R
       <div className="flex-[1_1_14rem]">
         <NumberField
           label={`Run ${n}: level after`}
-          hint={follows ? `It started at ${startText || "the level before"} mL.` : undefined}
+          hint={asks ? undefined : from}
           error={errors[`runs.${n - 1}.end`] ?? errors[`body.runs.${n - 1}.endMl`]}
           value={run.endText}
           onChange={(endText) => type({ endText })}
@@ -71,7 +94,6 @@ function StationRun({ n, run, draft, edit, errors }: Props & { n: number; run: R
           unit="mL"
         />
       </div>
-      {follows && <Button onClick={() => type({ startText })}>Another start</Button>}
     </fieldset>
   );
 }

@@ -10,7 +10,7 @@ export function BikeCell({ row }: { row: BoardRow }) {
     <>
       <Link
         to={bikePath(row.bikeId)}
-        className="inline-flex min-h-target min-w-target items-center text-lg leading-tight font-bold text-oil wrap-anywhere"
+        className="-mt-3 inline-flex min-h-target min-w-target items-center text-lg leading-tight font-bold text-oil wrap-anywhere"
       >
         {row.name}
       </Link>

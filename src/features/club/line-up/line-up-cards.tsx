@@ -36,10 +36,7 @@ function BikeLine({ row }: { row: BoardRow }) {
       <span className="flex flex-wrap items-center gap-x-4">
         <VerdictMark verdict={row.verdict} />
         {row.ratio !== null && (
-          <span className="tabular-nums">
-            {ratioWords(row.ratio)}
-            {row.trendPerHour !== null && `, ${trendWords(row.trendPerHour)}`}
-          </span>
+          <span className="tabular-nums">{ratioWords(row.ratio)} of baseline</span>
         )}
       </span>
       <Remarks row={row} />
@@ -49,11 +46,12 @@ function BikeLine({ row }: { row: BoardRow }) {
   );
 }
 
-/** `Wren · 7KMX4P · checked 1 Dec 2026 · pump in use 120.0 h` */
-function smallPrint({ owner, tag, lastCheckAt, pumpHours }: BoardRow): string {
+/** `Wren · 7KMX4P · −2.1 % in 10 h · checked 1 Dec 2026 · pump in use 120.0 h` */
+function smallPrint({ owner, tag, trendPerHour, lastCheckAt, pumpHours }: BoardRow): string {
   return [
     owner.name,
     tag,
+    trendPerHour !== null && trendWords(trendPerHour),
     lastCheckAt ? `checked ${formatDay(lastCheckAt)}` : "never checked",
     pumpHours !== null && `pump in use ${pumpHoursWords(pumpHours)}`,
   ]

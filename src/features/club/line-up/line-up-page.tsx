@@ -1,6 +1,6 @@
 import { useState } from "react";
 import { Link } from "react-router-dom";
-import { lineUpOrder, type Club } from "../../../../shared/schemas/club.ts";
+import type { Club } from "../../../../shared/schemas/club.ts";
 import { Button } from "../../../ui/button.tsx";
 import { ButtonLink } from "../../../ui/button-link.tsx";
 import { formatSince } from "../../../ui/format-when.ts";
@@ -9,7 +9,7 @@ import { membersPath, patterns, testDayPath } from "../../../ui/paths.ts";
 import { AnswerNotice } from "../answer-notice.tsx";
 import { LineUpCards } from "./line-up-cards.tsx";
 import { LineUpTable } from "./line-up-table.tsx";
-import { placeWords } from "./line-up-words.ts";
+import { ORDER_SENTENCE } from "./line-up-words.ts";
 import { useBoard } from "./use-board.ts";
 import { useBoardTable } from "./use-board-table.ts";
 import { useView } from "./use-view.ts";
@@ -55,7 +55,8 @@ export function LineUpPage({ club }: { club: Club }) {
           <ViewFields view={view} onView={setView} wide={wide} />
           <p className="text-soft">
             <span role="status">{countWords(found.length, rows.length)}</span>, as of{" "}
-            {formatSince(new Date(answer.dataUpdatedAt).toISOString())}. {orderSentence(view.order)}
+            {formatSince(new Date(answer.dataUpdatedAt).toISOString())}.{" "}
+            {wide && view.order === "worst" && ORDER_SENTENCE}
           </p>
           {wide ? <LineUpTable table={table} rows={page} /> : <LineUpCards rows={page} />}
         </>
@@ -71,12 +72,6 @@ export function LineUpPage({ club }: { club: Club }) {
 
 const countWords = (found: number, all: number) =>
   found === all ? `${all} ${all === 1 ? "bike" : "bikes"}` : `${found} of ${all} bikes`;
-
-function orderSentence(order: string): string {
-  if (order !== "worst") return "";
-  const places = lineUpOrder.map((place) => placeWords[place]).join(", ");
-  return `Worst first: ${places}; within each, the fewest hours left.`;
-}
 
 function NothingShared() {
   return (

@@ -33,7 +33,7 @@ export function LineUpTable({ table, rows }: Props) {
                 <Cell
                   key={cell.id}
                   scope={Cell === "th" ? "row" : undefined}
-                  className="py-2 pr-4 align-top font-normal tabular-nums"
+                  className={`py-2 pr-4 align-top font-normal tabular-nums ${mayWrap(cell.column.id)}`}
                 >
                   <FlexRender cell={cell} />
                 </Cell>
@@ -45,6 +45,10 @@ export function LineUpTable({ table, rows }: Props) {
     </table>
   );
 }
+
+/** Names and words may break; figures and dates are read in one line. */
+const mayWrap = (columnId: string) =>
+  ["bike", "owner", "worst"].includes(columnId) ? "" : "whitespace-nowrap";
 
 function HeaderCell({ header }: { header: Header<Features, BoardRow> }) {
   const sorted = header.column.getIsSorted();

@@ -33,5 +33,6 @@ export function isFoundBy(row: { name: string; tag: string; owner: string }, typ
   const words = typed.trim().toLowerCase();
   if (words === "") return true;
   const named = `${row.name}\n${row.owner}`.toLowerCase().includes(words);
-  return named || row.tag.startsWith(readBikeTag(typed));
+  const tag = readBikeTag(typed);
+  return named || (tag !== "" && row.tag.startsWith(tag));
 }

@@ -1,6 +1,9 @@
-import type { LineUpFacts, LineUpPlace } from "../../../../shared/schemas/club.ts";
+import {
+  lineUpOrder,
+  type LineUpFacts,
+  type LineUpPlace,
+} from "../../../../shared/schemas/club.ts";
 import { formatHours } from "../../../ui/format-hours.ts";
-import { formatPercent } from "../../../ui/format-quantity.ts";
 
 /** As the order of the board is told, worst first. */
 export const placeWords: Record<LineUpPlace, string> = {
@@ -14,6 +17,8 @@ export const placeWords: Record<LineUpPlace, string> = {
   retired: "retired",
 };
 
+export const ORDER_SENTENCE = `Worst first: ${lineUpOrder.map((place) => placeWords[place]).join(", ")}; within each, the fewest hours left.`;
+
 /** Engine hours to the next check: `12.4 h left`, `3.2 h over`, `due now`. */
 export function hoursLeftWords(dueInHours: number): string {
   const shown = formatHours(Math.abs(dueInHours));
@@ -21,7 +26,8 @@ export function hoursLeftWords(dueInHours: number): string {
   return `${shown}\u00a0h ${dueInHours > 0 ? "left" : "over"}`;
 }
 
-export const ratioWords = (ratio: number | null) => (ratio === null ? "–" : formatPercent(ratio));
+export const ratioWords = (ratio: number | null) =>
+  ratio === null ? "–" : `${Math.round(100 * ratio)}\u00a0%`;
 
 /** Engine hours over which a trend is told: in one it would hardly show. */
 const TREND_HOURS = 10;

@@ -46,7 +46,7 @@ function InviteLine({ clubId, invite }: { clubId: string; invite: Invite }) {
   return (
     <li className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1 py-2">
       <p className="min-w-0 flex-[1_1_12rem] leading-snug">
-        <strong className="block text-lg wrap-anywhere">{what}</strong>
+        <strong className="block wrap-anywhere">{what}</strong>
         <span className="text-soft">
           {usesLeft === 1 ? "One may join" : `${usesLeft} may join`}, until {formatDay(expiresAt)}
         </span>

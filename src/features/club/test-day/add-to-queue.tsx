@@ -54,7 +54,7 @@ export function AddToQueue({ club, testDay }: { club: Club; testDay: TestDay }) 
           onChange={(event) => setFind(event.target.value)}
         />
       </form>
-      <ul className="divide-y divide-rule border-y border-rule">
+      <ul className="divide-y divide-rule border-y border-rule empty:hidden">
         {offered.slice(0, MOST_OFFERED).map((row) => (
           <li key={row.bikeId}>
             <Offer row={row} onAdd={() => add([row])} />

@@ -1,9 +1,14 @@
+import { useState } from "react";
 import { Link } from "react-router-dom";
 import { useBikes, useUnsent, type KeptEntry } from "../../../offline/index.ts";
 import type { QueuedBike } from "../../../offline/test-day.ts";
+import { Button } from "../../../ui/button.tsx";
 import { EntryStateMark } from "../../../ui/entry-state-mark.tsx";
 import { testDayBikePath } from "../../../ui/paths.ts";
 import { actionInks, actionWords } from "../../../ui/words.ts";
+
+/** The last few, to be looked at once more. */
+const LAST = 5;
 
 interface Props {
   clubId: string;
@@ -13,6 +18,8 @@ interface Props {
 /** Who is done, the last one first, with what came out and where the entry is. */
 export function DoneList({ clubId, bikes }: Props) {
   const unsent = useUnsent().data ?? [];
+  const [whole, setWhole] = useState(false);
+  const shown = whole ? bikes : bikes.slice(-LAST);
   if (bikes.length === 0) return null;
   return (
     <section aria-labelledby="done" className="flex flex-col gap-3">
@@ -20,7 +27,7 @@ export function DoneList({ clubId, bikes }: Props) {
         Done: {bikes.length}
       </h2>
       <ol className="divide-y divide-rule border-y border-rule">
-        {bikes.toReversed().map((bike) => (
+        {shown.toReversed().map((bike) => (
           <li key={bike.bikeId}>
             <Link
               to={testDayBikePath(clubId, bike.bikeId)}
@@ -35,6 +42,9 @@ export function DoneList({ clubId, bikes }: Props) {
           </li>
         ))}
       </ol>
+      {shown.length < bikes.length && (
+        <Button onClick={() => setWhole(true)}>Show all {bikes.length}</Button>
+      )}
     </section>
   );
 }

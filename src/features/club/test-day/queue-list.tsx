@@ -8,6 +8,9 @@ import { Notice } from "../../../ui/notice.tsx";
 import { testDayBikePath } from "../../../ui/paths.ts";
 import { readinessOf, takeOut, type Readiness } from "./queue.ts";
 
+/** The next few are what matters at the station. */
+const FIRST = 5;
+
 interface Props {
   clubId: string;
   /** Those that wait, the next one first. */
@@ -17,6 +20,8 @@ interface Props {
 /** Who waits, and whether their logs are on this phone. */
 export function QueueList({ clubId, bikes }: Props) {
   const here = useBikes().data ?? [];
+  const [whole, setWhole] = useState(false);
+  const shown = whole ? bikes : bikes.slice(0, FIRST);
   const missing = bikes.filter((bike) => readinessOf(bike, here) !== "ready").length;
   return (
     <section aria-labelledby="queue" className="flex flex-col gap-3">
@@ -29,7 +34,7 @@ export function QueueList({ clubId, bikes }: Props) {
         <Logs bikeIds={bikes.map(({ bikeId }) => bikeId)} missing={missing} />
       )}
       <ol className="divide-y divide-rule border-y border-rule empty:hidden">
-        {bikes.map((bike) => (
+        {shown.map((bike) => (
           <QueueLine
             key={bike.bikeId}
             clubId={clubId}
@@ -38,6 +43,9 @@ export function QueueList({ clubId, bikes }: Props) {
           />
         ))}
       </ol>
+      {shown.length < bikes.length && (
+        <Button onClick={() => setWhole(true)}>Show all {bikes.length}</Button>
+      )}
     </section>
   );
 }

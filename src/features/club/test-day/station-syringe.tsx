@@ -17,32 +17,29 @@ interface Props {
 export function StationSyringe({ value, onChange }: Props) {
   const { data: syringes = [] } = useSyringes();
   const [adding, setAdding] = useState(false);
-  const kept = value && !syringes.some(({ id }) => id === value.id) ? [value] : [];
-  const options = [...kept, ...syringes];
+  const retired = value && !syringes.some(({ id }) => id === value.id) ? [value] : [];
+  const options = [...retired, ...syringes];
   return (
-    <section aria-labelledby="station" className="flex flex-col gap-3">
-      <h2 id="station" className="text-2xl">
-        This station
-      </h2>
-      <SelectField
-        label="Syringe"
-        hint="Every bike of the day is measured with it."
-        options={[
-          ...(value ? [] : [{ value: NONE, label: "Choose one" }]),
-          ...options.map(({ id, label, graduationMl }) => ({
-            value: id,
-            label: `${label}, ${graduationMl} mL marks`,
-          })),
-        ]}
-        value={value?.id ?? NONE}
-        onChange={(id) => {
-          const syringe = options.find((one) => one.id === id);
-          if (syringe) onChange(syringe);
-        }}
-      />
-      <Button className="self-start" onClick={() => setAdding(true)}>
+    <div className="flex items-end gap-2">
+      <div className="min-w-0 flex-1">
+        <SelectField
+          label="This station’s syringe"
+          options={[
+            ...(value ? [] : [{ value: NONE, label: "Choose one" }]),
+            ...options.map(({ id, label, graduationMl }) => ({
+              value: id,
+              label: `${label}, ${graduationMl} mL marks`,
+            })),
+          ]}
+          value={value?.id ?? NONE}
+          onChange={(id) => {
+            const syringe = options.find((one) => one.id === id);
+            if (syringe) onChange(syringe);
+          }}
+        />
+      </div>
+      <Button aria-label="Add a syringe" onClick={() => setAdding(true)}>
         <PlusIcon />
-        Add a syringe
       </Button>
       {adding && (
         <Sheet title="Add a syringe" onClose={() => setAdding(false)}>
@@ -55,6 +52,6 @@ export function StationSyringe({ value, onChange }: Props) {
           />
         </Sheet>
       )}
-    </section>
+    </div>
   );
 }

@@ -40,11 +40,11 @@ function TestDayAsItStands({ club, testDay }: { club: Club; testDay: TestDay }) 
       <div className="grid items-start gap-8 min-[900px]:grid-cols-2">
         <div className="flex min-w-0 flex-col gap-8">
           <StationSyringe value={testDay.syringe} onChange={setSyringe} />
-          <AddToQueue club={club} testDay={testDay} />
-        </div>
-        <div className="flex min-w-0 flex-col gap-8">
           <QueueList clubId={club.id} bikes={waiting} />
           <DoneList clubId={club.id} bikes={done} />
+        </div>
+        <div className="flex min-w-0 flex-col gap-8">
+          <AddToQueue club={club} testDay={testDay} />
           {testDay.bikes.length > 0 && <EndTestDay clubId={club.id} waiting={waiting.length} />}
         </div>
       </div>
