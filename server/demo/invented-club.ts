@@ -9,17 +9,22 @@ export type Told = {
     body: EntryBody<K>;
     /** Says that this entry is struck, and why. */
     struck?: string;
+    /** Written by the club's mechanic on a member's bike. */
+    byMechanic?: true;
   };
 }[EntryKind];
 
 export interface DemoBike {
   patch: BikePatch & { name: string };
+  /** Bikes are shared with the club, but for these. */
+  unshared?: true;
   log: Told[];
 }
 
 export interface DemoRider {
   name: string;
   email: string;
+  role: "rider" | "organiser" | "mechanic";
   bikes: DemoBike[];
 }
 
@@ -79,6 +84,7 @@ export const demoRiders: DemoRider[] = [
   {
     name: "Wren",
     email: "wren@heronmoor.example",
+    role: "rider",
     bikes: [
       {
         patch: { name: "Bramble", year: 2021, hasScreen: true, sequence: twoRate },
@@ -124,6 +130,7 @@ export const demoRiders: DemoRider[] = [
   {
     name: "Tam",
     email: "tam@heronmoor.example",
+    role: "rider",
     bikes: [
       {
         patch: { name: "Nettle", year: 2024, hasScreen: true, sequence: twoRate },
@@ -144,6 +151,16 @@ export const demoRiders: DemoRider[] = [
           check(110, 88.0, wide, [3.0]),
           hours(70, 97.3),
           check(5, 107.5, wide, [2.7], { note: "One run only, it was getting dark." }),
+          {
+            daysAgo: 4,
+            kind: "note",
+            hours: null,
+            body: {
+              text: "One run settles nothing. Four runs with the fine syringe before the next ride, please.",
+              advice: "repeat",
+            },
+            byMechanic: true,
+          },
         ],
       },
     ],
@@ -151,9 +168,11 @@ export const demoRiders: DemoRider[] = [
   {
     name: "Iris",
     email: "iris@heronmoor.example",
+    role: "organiser",
     bikes: [
       {
         patch: { name: "Pebble", year: 2025, sequence: null },
+        unshared: true,
         log: [hours(14, 0.4), hours(1, 4.6)],
       },
       {
@@ -194,6 +213,7 @@ export const demoRiders: DemoRider[] = [
   {
     name: "Odo",
     email: "odo@heronmoor.example",
+    role: "mechanic",
     bikes: [
       {
         patch: { name: "Rook", year: 2021, hasScreen: false, sequence: twoRate },
@@ -223,6 +243,7 @@ export const demoRiders: DemoRider[] = [
       },
       {
         patch: { name: "Moth", year: 1999, meter: "estimated", sequence: null, retired: true },
+        unshared: true,
         log: [
           check(700, 80, null, [], {
             runs: [{ deliveredMl: 1.9 }],
