@@ -5,8 +5,8 @@ export function ChartBreaks({ frame }: { frame: ChartFrame }) {
   const { breakLabels, plot, fontPx } = frame;
   return (
     <g fontSize={fontPx} fill="var(--ink)">
-      {breakLabels.map((label) => (
-        <g key={`${label.lineX} ${label.text}`}>
+      {breakLabels.map((label, index) => (
+        <g key={index}>
           <path
             d={`M${label.lineX} ${label.y + 0.35 * fontPx}V${plot.bottom}`}
             stroke="var(--ink)"

@@ -11,9 +11,9 @@ import { seriesCause } from "./series-cause.ts";
 import { struckPoints } from "./struck-points.ts";
 
 export interface HistorySeries {
-  /** What began it, in a few words. */
+  /** The entry that began it, and what that was in a few words. */
+  entryId: string;
   cause: string;
-  at: string;
   /** Lifetime hours; null where the entry that began it carried none. */
   atHours: number | null;
   /** What its checks are held to: its own baseline, or an earlier one that it could not replace. */
@@ -65,8 +65,8 @@ const byHours = (a: HistoryPoint, b: HistoryPoint) =>
 
 function describeSeries({ series, baseline, reference }: JudgedSeries): HistorySeries {
   return {
+    entryId: series.entryId,
     cause: seriesCause(series),
-    at: new Date(series.timeMs).toISOString(),
     atHours: series.atHours,
     baseline: reference,
     holdsToEarlier: reference !== baseline,
