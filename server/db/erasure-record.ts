@@ -7,6 +7,10 @@ const erasureSchema = z.strictObject({
   accountId: z.string().optional(),
   bikeIds: z.array(z.string()),
   entryIds: z.array(z.string()),
+  /** What was taken back rather than erased; it may have been given again since. */
+  clubIds: z.array(z.string()).optional(),
+  members: z.array(z.strictObject({ clubId: z.string(), userId: z.string() })).optional(),
+  shares: z.array(z.strictObject({ clubId: z.string(), bikeId: z.string() })).optional(),
 });
 export type Erasure = z.infer<typeof erasureSchema>;
 
@@ -20,8 +24,9 @@ function parseLine(line: string): Erasure | null {
 }
 
 /**
- * What was erased, one line each, in a file that backups do not hold and a restore does not touch:
- * a backup older than an erasure must not bring back what someone asked to have erased.
+ * What was erased or taken back, one line each, in a file that backups do not hold and a restore does
+ * not touch: an older backup must not bring back what someone asked to have erased, nor share again
+ * what is shared no more.
  */
 export function createErasureRecord(dataDir: string) {
   const file = path.join(dataDir, "erased.jsonl");

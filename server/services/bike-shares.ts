@@ -2,6 +2,7 @@ import type { Share } from "../../shared/schemas/club.ts";
 import type { Store } from "../db/store.ts";
 import { notFound } from "../problems.ts";
 import { assertOwner, membershipAs } from "./permissions.ts";
+import { recordTakenBack } from "./take-back.ts";
 
 /** With which clubs the owner of a bike shares it. */
 export function createBikeShareService(store: Store) {
@@ -39,6 +40,7 @@ export function createBikeShareService(store: Store) {
         assertOwner(store, accountId, bikeId);
         store.bikeShares.remove(bikeId, clubId);
         store.clubs.touch(clubId);
+        recordTakenBack(store, { shares: [{ clubId, bikeId }] });
       });
     },
   };

@@ -3,6 +3,7 @@ import type { Store } from "../db/store.ts";
 import { lastOrganiser, notFound } from "../problems.ts";
 import { endMembership } from "./end-membership.ts";
 import { assertMayRemove, maySeeMember, membershipAs } from "./permissions.ts";
+import { recordTakenBack } from "./take-back.ts";
 
 /** The members of clubs, each for the account that asks. */
 export function createClubMemberService(store: Store) {
@@ -41,6 +42,7 @@ export function createClubMemberService(store: Store) {
         assertMayRemove(store, accountId, clubId, userId);
         if (find(clubId, userId).organiser) assertOrganiserLeft(clubId, userId);
         endMembership(store, clubId, userId);
+        recordTakenBack(store, { members: [{ clubId, userId }] });
       });
     },
   };

@@ -4,6 +4,7 @@ import type { Membership } from "../db/club-members.ts";
 import type { Store } from "../db/store.ts";
 import { endClub } from "./end-membership.ts";
 import { membershipAs } from "./permissions.ts";
+import { recordTakenBack } from "./take-back.ts";
 
 export const shownClub = ({ id, name, organiser, mechanic }: Membership): Club => ({
   ...{ id, name, organiser, mechanic },
@@ -32,6 +33,7 @@ export function createClubService(store: Store) {
       store.write(() => {
         membershipAs(store, accountId, clubId, "organiser");
         endClub(store, clubId);
+        recordTakenBack(store, { clubIds: [clubId] });
       });
     },
   };

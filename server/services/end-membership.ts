@@ -14,20 +14,14 @@ export function endClub(store: Store, clubId: string): void {
 }
 
 /**
- * Before an account is erased: it leaves its clubs. Nobody else can hinder an erasure, so that a
- * club whose last organiser goes is passed on: to the mechanic who has been in it longest, else to
- * the member. One with nobody left ends.
+ * Takes out a member whom nobody can hold back. A club whose last organiser goes is passed on: to
+ * the mechanic who has been in it longest, else to the member. One with nobody left ends.
  */
-export function leaveAllClubs(store: Store, userId: string): void {
-  for (const { id: clubId } of store.clubMembers.clubsOf(userId)) {
-    const others = store.clubMembers.membersOf(clubId).filter(({ id }) => id !== userId);
-    const heir = others.find(({ mechanic }) => mechanic) ?? others[0];
-    if (!heir) {
-      endClub(store, clubId);
-      continue;
-    }
-    if (!others.some(({ organiser }) => organiser))
-      store.clubMembers.setRoles(clubId, heir.id, { organiser: true });
-    endMembership(store, clubId, userId);
-  }
+export function leaveClub(store: Store, clubId: string, userId: string): void {
+  const others = store.clubMembers.membersOf(clubId).filter(({ id }) => id !== userId);
+  const heir = others.find(({ mechanic }) => mechanic) ?? others[0];
+  if (!heir) return endClub(store, clubId);
+  if (!others.some(({ organiser }) => organiser))
+    store.clubMembers.setRoles(clubId, heir.id, { organiser: true });
+  endMembership(store, clubId, userId);
 }

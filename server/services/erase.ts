@@ -1,7 +1,8 @@
 import type { Erasure } from "../db/erasure-record.ts";
 import type { Store } from "../db/store.ts";
-import { leaveAllClubs } from "./end-membership.ts";
+import { leaveClub } from "./end-membership.ts";
 import { assertOwner } from "./permissions.ts";
+import { takeBackAgain } from "./take-back.ts";
 
 /** Takes out the rows; keeps the ids, so that no phone brings them back. */
 function eraseRows(store: Store, { bikeIds, entryIds, accountId }: Erasure): void {
@@ -15,7 +16,7 @@ function eraseRows(store: Store, { bikeIds, entryIds, accountId }: Erasure): voi
     store.bikes.remove(bikeId);
   }
   if (accountId !== undefined) {
-    leaveAllClubs(store, accountId);
+    for (const { id } of store.clubMembers.clubsOf(accountId)) leaveClub(store, id, accountId);
     store.mails.removeTo(accountId);
     store.reminders.removeOf(accountId);
     store.users.remove(accountId);
@@ -49,9 +50,14 @@ export function eraseAccount(store: Store, accountId: string): void {
   store.write(() => erase(store, store.bikes.idsOf(accountId), accountId));
 }
 
-/** After a restore: what was erased since the backup was made is erased again. */
+/** After a restore: what was erased or taken back since the backup was made is so again. */
 export function replayErasures(store: Store): number {
   const erasures = store.erasureRecord.readAll();
-  store.write(() => erasures.forEach((erasure) => eraseRows(store, erasure)));
+  store.write(() => {
+    for (const erasure of erasures) {
+      eraseRows(store, erasure);
+      takeBackAgain(store, erasure);
+    }
+  });
   return erasures.length;
 }

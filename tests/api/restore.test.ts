@@ -5,7 +5,7 @@ import { assertIntegrity, backUpDatabase, backupsDir } from "../../server/db/bac
 import { databaseFile } from "../../server/db/open-database.ts";
 import { restoreDatabase } from "../../server/services/restore-database.ts";
 import { rebuildSummaries } from "../../server/services/summarise-bike.ts";
-import { clubOfFour } from "../helpers/club.ts";
+import { clubOfFour, giveRoles, lineUp, share, withdraw } from "../helpers/club.ts";
 import { bikeEntry, hoursEntry, newId, noteEntry, smallLog } from "../helpers/make-entry.ts";
 import { PASSWORD, signInRider, signUpRider } from "../helpers/rider.ts";
 import { startTestServer, temporaryDir, type TestServer } from "../helpers/start-test-server.ts";
@@ -95,6 +95,50 @@ describe("a restored server", () => {
     await rider.phone.delete(`/api/bikes/${bikeId}`).expect(204);
     const restored = await signInRider(await restoreAndStart(server, backup), rider.user.email);
     expect((await restored.sync([])).bikes).toEqual([]);
+  });
+});
+
+describe("a restored club", () => {
+  it("does not share again what was withdrawn, nor let in again who left, since the backup", async () => {
+    const server = await startTestServer();
+    const { organiser, mechanic, owner, member, club, bikeId } = await clubOfFour(server);
+    const again = newId();
+    await owner.sync(smallLog(again));
+    await share(owner, again, club.id);
+    await giveRoles(organiser, club.id, member, { mechanic: true }).expect(200);
+    const backup = await backUp(server);
+    await withdraw(owner, bikeId, club.id);
+    const path = `/api/clubs/${club.id}/members/${member.user.id}`;
+    await organiser.phone.delete(path).expect(204);
+
+    const restored = await restoreAndStart(server, backup);
+    const [mick, bob] = [
+      await signInRider(restored, mechanic.user.email),
+      await signInRider(restored, member.user.email),
+    ];
+    const { bikes } = await lineUp(mick, club.id);
+    expect(bikes.map((bike) => bike.bikeId)).toEqual([again]);
+    await bob.phone.get(`/api/clubs/${club.id}`).expect(404);
+  });
+
+  it("keeps what was shared again before the backup was made", async () => {
+    const server = await startTestServer();
+    const { mechanic, owner, club, bikeId } = await clubOfFour(server);
+    await withdraw(owner, bikeId, club.id);
+    await share(owner, bikeId, club.id);
+    const restored = await restoreAndStart(server, await backUp(server));
+    const mick = await signInRider(restored, mechanic.user.email);
+    expect((await lineUp(mick, club.id)).bikes).toHaveLength(1);
+  });
+
+  it("that was closed since the backup is closed", async () => {
+    const server = await startTestServer();
+    const { organiser, owner, club } = await clubOfFour(server);
+    const backup = await backUp(server);
+    await organiser.phone.delete(`/api/clubs/${club.id}`).expect(204);
+    const restored = await restoreAndStart(server, backup);
+    const ann = await signInRider(restored, owner.user.email);
+    await ann.phone.get("/api/clubs").expect(200, { clubs: [] });
   });
 });
 

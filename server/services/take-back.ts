@@ -1,0 +1,29 @@
+import type { Erasure } from "../db/erasure-record.ts";
+import type { Store } from "../db/store.ts";
+import { endClub, leaveClub } from "./end-membership.ts";
+
+type TakenBack = Pick<Erasure, "clubIds" | "members" | "shares">;
+
+/** To be called last in the transaction: what cannot be written down is not taken back. */
+export function recordTakenBack(store: Store, taken: TakenBack): void {
+  store.erasureRecord.append({
+    ...{ erasedAt: new Date().toISOString(), bikeIds: [], entryIds: [] },
+    ...taken,
+  });
+}
+
+/** After a restore: what was given before that moment, and is there again, is taken back again. */
+export function takeBackAgain(store: Store, erasure: Erasure): void {
+  const { erasedAt, clubIds = [], members = [], shares = [] } = erasure;
+  for (const { bikeId, clubId } of shares) {
+    const share = store.bikeShares.clubsOf(bikeId).find(({ id }) => id === clubId);
+    if (!share || share.since > erasedAt) continue;
+    store.bikeShares.remove(bikeId, clubId);
+    store.clubs.touch(clubId);
+  }
+  for (const { clubId, userId } of members) {
+    const member = store.clubMembers.membersOf(clubId).find(({ id }) => id === userId);
+    if (member && member.joinedAt <= erasedAt) leaveClub(store, clubId, userId);
+  }
+  for (const clubId of clubIds) if (store.clubs.find(clubId)) endClub(store, clubId);
+}
