@@ -12,12 +12,15 @@ function settle(next: StorageHealth): StorageHealth {
   return health;
 }
 
-/** What the browser promises at the moment. */
+async function look(): Promise<StorageHealth> {
+  if (typeof indexedDB === "undefined" || !navigator.storage?.persisted) return "unavailable";
+  if (await navigator.storage.persisted()) return "persisted";
+  return localStorage.getItem(ASKED) === null ? "unasked" : "refused";
+}
+
+/** What the browser promises at the moment. A browser that forbids storage throws on touch. */
 export async function storageHealth(): Promise<StorageHealth> {
-  if (typeof indexedDB === "undefined" || !navigator.storage?.persisted)
-    return settle("unavailable");
-  if (await navigator.storage.persisted()) return settle("persisted");
-  return settle(localStorage.getItem(ASKED) === null ? "unasked" : "refused");
+  return settle(await look().catch(() => "unavailable" as const));
 }
 
 /** After the first save: asks the browser, once, to keep what this phone holds. */
