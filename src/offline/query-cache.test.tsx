@@ -21,6 +21,18 @@ function Answer({ name, persist, answer }: Question) {
   return <p>{`${name}: ${data ?? "nothing"}`}</p>;
 }
 
+/** What the server said before, now that it says nothing. */
+function FailingClubs() {
+  const { data, error } = useQuery({
+    queryKey: ["clubs"],
+    queryFn: () => Promise.reject(new Error("No network just now.")),
+    retry: false,
+    networkMode: "always",
+    meta: { persist: true },
+  });
+  return <p>{error ? `failed: ${String(data)}` : "asking"}</p>;
+}
+
 /** Opens the app as `accountId`, asking the questions. */
 function open(accountId: string, ...questions: Question[]) {
   const cache = createReadCache(accountId);
@@ -57,6 +69,23 @@ describe("the read cache", () => {
     await openAndClose("b", { ...clubs, answer: "three" });
     open("c", clubs);
     await screen.findByText("clubs: nothing");
+  });
+
+  it("keeps an answer that could not be had anew", async () => {
+    await openAndClose("e", { ...clubs, answer: "five" });
+    const cache = createReadCache("e");
+    render(
+      <PersistQueryClientProvider {...cache}>
+        <FailingClubs />
+      </PersistQueryClientProvider>,
+    );
+    await screen.findByText("failed: five");
+    const key = "sumpless-read-e";
+    localStorage.removeItem(key);
+    await waitFor(() => expect(localStorage.getItem(key)).toContain("five"), { timeout: 3_000 });
+    cleanup();
+    open("e", clubs);
+    await screen.findByText("clubs: five");
   });
 
   it("may be damaged, with no loss but its own", async () => {

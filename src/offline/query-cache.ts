@@ -4,7 +4,10 @@
  */
 import { createSyncStoragePersister } from "@tanstack/query-sync-storage-persister";
 import { QueryClient } from "@tanstack/react-query";
-import type { PersistQueryClientOptions } from "@tanstack/react-query-persist-client";
+import type {
+  PersistedClient,
+  PersistQueryClientOptions,
+} from "@tanstack/react-query-persist-client";
 
 /** A Line-up looked at before leaving must still be there after a week without a network. */
 const KEPT_MS = 14 * 24 * 60 * 60 * 1000;
@@ -32,6 +35,15 @@ function storage(): Storage | null {
   }
 }
 
+/** What was answered stays an answer, also where asking again has failed since. */
+function serialize({ clientState, ...client }: PersistedClient): string {
+  const queries = clientState.queries.map(({ state, ...query }) => ({
+    ...query,
+    state: { ...state, status: "success", error: null, fetchFailureReason: null },
+  }));
+  return JSON.stringify({ ...client, clientState: { ...clientState, queries } });
+}
+
 /**
  * A cache of its own for each account, in memory too, so that the next person on this phone sees
  * nothing of the last one's.
@@ -43,13 +55,14 @@ export function createReadCache(accountId: string | null): ReadCache {
       persister: createSyncStoragePersister({
         storage: storage(),
         key: `sumpless-read-${accountId ?? "nobody"}`,
+        serialize,
       }),
       maxAge: KEPT_MS,
       buster: CACHE_VERSION,
       dehydrateOptions: {
         shouldDehydrateMutation: () => false,
         shouldDehydrateQuery: (query) =>
-          query.meta?.persist === true && query.state.status === "success",
+          query.meta?.persist === true && query.state.data !== undefined,
       },
     },
   };
