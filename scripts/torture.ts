@@ -7,6 +7,7 @@ import { spawnSync } from "node:child_process";
 const tortures: Record<string, { file: string; env: Record<string, string> }> = {
   model: { file: "tests/api/phone-model.test.ts", env: { MODEL_RUNS: "10000" } },
   kills: { file: "tests/api/killed-server.test.ts", env: { KILLS: "200" } },
+  fuzz: { file: "tests/api/fuzz.test.ts", env: { REQUESTS: "50000" } },
   faults: { file: "tests/api/phone-faulty-network.test.ts", env: { EXCHANGES: "1000" } },
 };
 

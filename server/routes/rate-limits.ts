@@ -37,10 +37,11 @@ const emailFromAddress = (request: Request) => `${address(request)} ${email(requ
 /** Made anew for each app, with counters of its own. */
 export const createRateLimits = () => ({
   signUp: limited({ times: 60, minutes: 60, by: address }),
+  /** The address first: past it, a flood of made-up e-mails would be a flood of counters. */
   signIn: [
+    limited({ times: 100, minutes: 15, by: address, failuresOnly: true }),
     limited({ times: 10, minutes: 15, by: emailFromAddress, failuresOnly: true }),
     limited({ times: 50, minutes: 15, by: email, failuresOnly: true }),
-    limited({ times: 100, minutes: 15, by: address, failuresOnly: true }),
   ],
   /** Asking for a link, and following one. How many mails an account gets is limited where they are sent. */
   mailedLinks: limited({ times: 60, minutes: 60, by: address }),

@@ -19,7 +19,7 @@ async function statuses(times: number, ask: () => PromiseLike<{ status: number }
 
 const repeated = (times: number, status: number) => Array.from({ length: times }, () => status);
 
-describe("rate limits", () => {
+describe("rate limits", { timeout: 30_000 }, () => {
   it("let 60 people sign up from one address in an hour", async () => {
     const phone = createPhone(await startTestServer());
     expect(await statuses(60, () => signUp(phone))).toEqual(repeated(60, 201));
