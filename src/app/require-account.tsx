@@ -1,11 +1,14 @@
+import { use } from "react";
 import { Navigate, Outlet, useLocation } from "react-router-dom";
-import { useAccount } from "../offline/index.ts";
+import { settleAccount, useAccount } from "../offline/index.ts";
 import { patterns } from "../ui/paths.ts";
 
 /** A phone that knows its account opens offline and with an expired session; one without signs in. */
 export function RequireAccount() {
   const account = useAccount();
   const { pathname } = useLocation();
+  // The lasting copy, which takes a moment to read, may still know one.
+  if (!account) use(settleAccount());
   if (!account) return <Navigate to={patterns.signIn} replace state={{ from: pathname }} />;
   return <Outlet />;
 }

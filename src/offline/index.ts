@@ -4,7 +4,13 @@
  */
 export type * from "./types.ts";
 export * from "./errors.ts";
-export { forgetAccount, rememberAccount, rememberedAccount, useAccount } from "./account.ts";
+export {
+  forgetAccount,
+  rememberAccount,
+  rememberedAccount,
+  settleAccount,
+  useAccount,
+} from "./account.ts";
 export { apiRequest } from "./api-client.ts";
 export { dropDraft, keepDraft, useDraft, useDrafts } from "./drafts.ts";
 export { exportUnsent } from "./export-unsent.ts";

@@ -59,7 +59,8 @@ async function check(page: Page, bike: string, hours: string, levelMl: string): 
 /** What the phone stored with the bike's log, and shows. */
 const summaryOnPhone = (page: Page, bikeId: string): Promise<Summary> =>
   page.evaluate(async (id) => {
-    const [info] = await indexedDB.databases();
+    const databases = await indexedDB.databases();
+    const info = databases.find(({ name }) => name?.startsWith("sumpless-logbook-"));
     const database = await new Promise<IDBDatabase>((resolve) => {
       const opening = indexedDB.open(info!.name!);
       opening.onsuccess = () => resolve(opening.result);

@@ -31,7 +31,8 @@ export const logLines = (page: Page) =>
 /** Puts a row into the phone's own store, as an older or newer app may have left it there. */
 export const putInStore = (page: Page, entry: object) =>
   page.evaluate(async (entry) => {
-    const [info] = await indexedDB.databases();
+    const databases = await indexedDB.databases();
+    const info = databases.find(({ name }) => name?.startsWith("sumpless-logbook-"));
     const database = await new Promise<IDBDatabase>((resolve) => {
       const opening = indexedDB.open(info!.name!);
       opening.onsuccess = () => resolve(opening.result);
