@@ -18,6 +18,8 @@ export function useBoardTable(
     columns,
     data: rows,
     getRowId: ({ bikeId }) => bikeId,
+    sortDescFirst: false,
+    enableMultiSort: false,
     state: { sorting, globalFilter: { find, show } },
     onSortingChange: (update) => {
       const [first] = typeof update === "function" ? update(sorting) : update;
