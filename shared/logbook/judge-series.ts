@@ -16,7 +16,7 @@ const TEMP_DIFFERENCE_K = 10;
 
 type Judged = Pick<
   CheckSummary,
-  "ratio" | "uRatio" | "verdict" | "action" | "pLow" | "pDropping" | "runsToSettle"
+  "ratio" | "uRatio" | "baselineMl" | "verdict" | "action" | "pLow" | "pDropping" | "runsToSettle"
 > & { flags: FlagCode[] };
 
 export interface JudgedSession {
@@ -99,6 +99,7 @@ function judgeFirst(session: Session, pooled: Volume): Judged {
   return {
     ratio: null,
     uRatio: null,
+    baselineMl: null,
     verdict: "settling",
     action: belowUsual ? "repeat" : "ride",
     pLow: null,
@@ -112,6 +113,7 @@ function judgeFirst(session: Session, pooled: Volume): Judged {
 const nothingDelivered = (): Judged => ({
   ratio: 0,
   uRatio: 0,
+  baselineMl: null,
   verdict: "low",
   action: "stop",
   pLow: 1,
@@ -149,7 +151,14 @@ function judgeAgainst(
     Math.abs(oilTempC - baseline.oilTempC) > TEMP_DIFFERENCE_K
   )
     flags.push("temperature-differs");
-  return { ...judge(ratio, uRatio, limits), ratio, uRatio, runsToSettle: settle.runs, flags };
+  return {
+    ...judge(ratio, uRatio, limits),
+    ratio,
+    uRatio,
+    baselineMl: baseline.perRunMl,
+    runsToSettle: settle.runs,
+    flags,
+  };
 }
 
 /**

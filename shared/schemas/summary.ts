@@ -38,6 +38,8 @@ export const checkSummarySchema = z.object({
   /** Null while settling; otherwise of the whole session this check belongs to. */
   ratio: z.number().nullable(),
   uRatio: z.number().nullable(),
+  /** The baseline that `ratio` is taken to, mL a run; null where there was none to compare with. */
+  baselineMl: z.number().nullable(),
   verdict: z.enum(["settling", "holding", "dropping", "low"]),
   action: z.enum(actions),
   pLow: z.number().nullable(),

@@ -6,7 +6,7 @@ import { formatDay } from "../../../ui/format-when.ts";
 import { VerdictShape } from "../../../ui/verdict-mark.tsx";
 import { verdictWords } from "../../../ui/words.ts";
 import type { HistoryPoint } from "../history/history-point.ts";
-import { FlagList } from "../now/flag-list.tsx";
+import { BikeFlags } from "../now/bike-flags.tsx";
 
 interface Props {
   point: HistoryPoint;
@@ -40,7 +40,7 @@ export function CheckRows({ point, meterFormat }: Props) {
       {flags.length > 0 && verdict && (
         <tr>
           <td colSpan={4} className="pb-2 text-sm">
-            <FlagList flags={flags} />
+            <BikeFlags flags={flags} />
           </td>
         </tr>
       )}

@@ -5,7 +5,7 @@ import { VerdictMark } from "../../../ui/verdict-mark.tsx";
 import type { BikeRecord } from "../../../offline/index.ts";
 import type { DeliveryHistory } from "../history/delivery-history.ts";
 import { columnOfSession } from "./column-of-session.ts";
-import { FlagList } from "./flag-list.tsx";
+import { BikeFlags } from "./bike-flags.tsx";
 import { HoursLeft } from "./hours-left.tsx";
 import { HoursNow } from "./hours-now.tsx";
 import { judgedSession } from "./judged-session.ts";
@@ -36,7 +36,7 @@ export function WhatToDo({ record, history, mayRide }: Props) {
           <VerdictMark verdict={summary.verdict} />
           <p className="text-lg">{whySentence(judged, history.actLimit)}</p>
           {certainty && <p className="text-lg">{certainty}</p>}
-          <FlagList flags={summary.flags} />
+          <BikeFlags flags={summary.flags} />
         </div>
         <HoursNow record={record} />
       </div>

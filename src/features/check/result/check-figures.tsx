@@ -1,29 +1,26 @@
 import type { ReactNode } from "react";
 import { measureDelivery } from "../../../../shared/delivery/measure-delivery.ts";
 import type { CheckBody, Sequence } from "../../../../shared/schemas/entry.ts";
-import type { CheckSummary, Summary } from "../../../../shared/schemas/summary.ts";
+import type { CheckSummary } from "../../../../shared/schemas/summary.ts";
 import {
   formatMl,
   formatMlGiveOrTake,
   formatPercent,
   GIVE_OR_TAKE,
 } from "../../../ui/format-quantity.ts";
-import { heldBaseline } from "./held-baseline.ts";
 import { largestUncertainty } from "./largest-uncertainty.ts";
 
 interface Props {
-  summary: Summary;
   check: CheckSummary;
   body: CheckBody;
   sequence: Sequence | null;
 }
 
 /** The numbers behind the verdict, each with how far it may be off. */
-export function CheckFigures({ summary, check, body, sequence }: Props) {
-  const { perRunMl, uMl, ratio, uRatio, runsCounted } = check;
-  const baseline = ratio === null ? null : heldBaseline(summary, check);
+export function CheckFigures({ check, body, sequence }: Props) {
+  const { perRunMl, uMl, ratio, uRatio, baselineMl, runsCounted } = check;
   const { delivery } = measureDelivery(body, sequence);
-  const sessionMl = ratio !== null && baseline ? ratio * baseline.perRunMl : perRunMl;
+  const sessionMl = ratio !== null && baselineMl ? ratio * baselineMl : perRunMl;
   return (
     <>
       <dl className="flex flex-col gap-2 text-lg">

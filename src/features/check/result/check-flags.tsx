@@ -1,39 +1,18 @@
-import { flagSentences, type FlagCode } from "../../../../shared/delivery/flags.ts";
+import type { FlagCode } from "../../../../shared/delivery/flags.ts";
 import type { Spoiler } from "../../../../shared/schemas/entry.ts";
-import { CautionIcon } from "../../../ui/icons.tsx";
+import { FlagList } from "../../../ui/flag-list.tsx";
 import { spoilerWords } from "../../../ui/spoiler-words.ts";
 
-/** Said by the page itself, with what to do about it. */
-const saidElsewhere: readonly string[] = [
-  "not-closed-out",
-  "spoiled",
-  "baseline-cannot-settle",
-] satisfies FlagCode[];
-
-const isFlag = (flag: string): flag is FlagCode => flag in flagSentences;
+const saidElsewhere: FlagCode[] = ["not-closed-out", "spoiled", "baseline-cannot-settle"];
 
 interface Props {
   flags: readonly string[];
   spoilers: readonly Spoiler[];
 }
 
-/** All that has to be said beside the numbers. A flag of a newer app has no words here. */
+/** All that has to be said beside the numbers of a check. */
 export function CheckFlags({ flags, spoilers }: Props) {
-  const sentences: string[] = [...new Set(flags)]
-    .filter((flag) => !saidElsewhere.includes(flag))
-    .filter(isFlag)
-    .map((flag) => flagSentences[flag]);
-  if (spoilers.length > 0)
-    sentences.push(`May have spoiled it: ${spoilers.map((one) => spoilerWords[one]).join(", ")}.`);
-  if (sentences.length === 0) return null;
-  return (
-    <ul className="flex flex-col gap-2">
-      {sentences.map((sentence) => (
-        <li key={sentence} className="flex gap-2">
-          <CautionIcon className="mt-0.5 size-5 shrink-0 text-dropping" />
-          {sentence}
-        </li>
-      ))}
-    </ul>
-  );
+  const named = spoilers.map((one) => spoilerWords[one]).join(", ");
+  const more = named ? [`May have spoiled it: ${named}.`] : [];
+  return <FlagList flags={flags} saidElsewhere={saidElsewhere} more={more} />;
 }

@@ -5,7 +5,7 @@ import { columnOfCheck } from "./column-of-check.ts";
 
 const columnOfLast = ({ entries }: ReturnType<typeof logbook>) => {
   const summary = summariseLogbook({ ownerId: "owner", entries });
-  return columnOfCheck(summary, summary.checks.at(-1)!, 0.15, syringe5);
+  return columnOfCheck(summary.checks.at(-1)!, 0.15, syringe5);
 };
 
 test("draws a check against its baseline and limit, in its own syringe", () => {

@@ -1,21 +1,18 @@
 import type { Syringe } from "../../../../shared/schemas/entry.ts";
-import type { CheckSummary, Summary } from "../../../../shared/schemas/summary.ts";
+import type { CheckSummary } from "../../../../shared/schemas/summary.ts";
 import { usualScale, type Scale } from "../../../ui/column-scale.ts";
 import type { ColumnReading } from "../../../ui/column-sentence.ts";
-import { heldBaseline } from "./held-baseline.ts";
 
 /**
  * The Column of one check, in the syringe it was read from. Its band is the uncertainty of the
  * comparison, so that band and limit tell how sure the verdict is.
  */
 export function columnOfCheck(
-  summary: Summary,
   check: CheckSummary,
   actDrop: number,
   syringe: Syringe | null,
 ): ColumnReading & { scale: Scale } {
-  const compared = check.ratio !== null && check.uRatio !== null;
-  const baselineMl = compared ? (heldBaseline(summary, check)?.perRunMl ?? null) : null;
+  const { baselineMl } = check;
   const readingMl = baselineMl ? check.ratio! * baselineMl : check.perRunMl;
   return {
     scale: syringe

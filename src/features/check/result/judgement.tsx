@@ -1,5 +1,5 @@
 import type { CheckBody } from "../../../../shared/schemas/entry.ts";
-import type { CheckSummary, Summary } from "../../../../shared/schemas/summary.ts";
+import type { CheckSummary } from "../../../../shared/schemas/summary.ts";
 import type { BikeRecord } from "../../../offline/index.ts";
 import { ActionLine } from "../../../ui/action-line.tsx";
 import { certaintySentence } from "../../../ui/certainty-sentence.ts";
@@ -11,7 +11,6 @@ import { columnOfCheck } from "./column-of-check.ts";
 
 interface Props {
   details: BikeRecord["details"];
-  summary: Summary;
   check: CheckSummary;
   /** All that has to be said beside the numbers. */
   flags: readonly string[];
@@ -23,7 +22,7 @@ interface Props {
 }
 
 /** What one check says: the action first, then the verdict and how sure it is, then the numbers. */
-export function Judgement({ details, summary, check, flags, body, hoseMaybeOff, fills }: Props) {
+export function Judgement({ details, check, flags, body, hoseMaybeOff, fills }: Props) {
   const certainty = certaintySentence(check);
   const sayAction = check.action !== "ride" || !hoseMaybeOff;
   return (
@@ -38,11 +37,11 @@ export function Judgement({ details, summary, check, flags, body, hoseMaybeOff, 
           <Column
             size="large"
             fills={fills}
-            {...columnOfCheck(summary, check, details.actDrop, body.syringe)}
+            {...columnOfCheck(check, details.actDrop, body.syringe)}
           />
         </div>
         <div className="flex min-w-0 flex-[1_1_14rem] flex-col gap-4">
-          <CheckFigures summary={summary} check={check} body={body} sequence={details.sequence} />
+          <CheckFigures check={check} body={body} sequence={details.sequence} />
           <CheckFlags flags={flags} spoilers={body.spoilers ?? []} />
         </div>
       </div>

@@ -80,7 +80,6 @@ export function ResultPage({ bike: { record, log }, reading }: Props) {
         <Judgement
           fills
           details={details}
-          summary={summary}
           check={check}
           flags={isLast ? [...check.flags, ...summary.flags] : check.flags}
           body={entry.body}

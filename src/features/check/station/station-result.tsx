@@ -53,7 +53,6 @@ export function StationResult({ entryId, reading, ...station }: Props) {
         <Judgement
           fills
           details={details}
-          summary={summary}
           check={check}
           flags={[...check.flags, ...summary.flags]}
           body={entry.body}
