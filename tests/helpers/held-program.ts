@@ -17,7 +17,7 @@ function hold(moment: string): void {
 
 type Transaction = ReturnType<SQLite.Database["transaction"]>;
 const behaviours = ["default", "deferred", "immediate", "exclusive"] as const;
-const prototype = SQLite.prototype as SQLite.Database;
+const prototype = SQLite.prototype;
 
 /* eslint-disable @typescript-eslint/unbound-method -- called on the connection below */
 const { transaction, backup, pragma } = prototype;
@@ -47,7 +47,7 @@ prototype.backup = function (this: SQLite.Database, file: string) {
     return 1;
   };
   return backup.call(this, file, { progress });
-} as SQLite.Database["backup"];
+};
 
 // With every commit a checkpoint, a kill under load lands in one often.
 prototype.pragma = function (this: SQLite.Database, source, options) {
