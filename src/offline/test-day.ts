@@ -41,4 +41,11 @@ export function useTestDay(clubId: string) {
 export const changeTestDay = (clubId: string, edit: (testDay: TestDay) => TestDay) =>
   changeDraft(clubId, FORM, (content) => edit(parse(content)));
 
+/** Notes the check made of a queued bike; null puts the bike back among those that wait. */
+export const noteCheck = (clubId: string, bikeId: string, entryId: string | null) =>
+  changeTestDay(clubId, (testDay) => ({
+    ...testDay,
+    bikes: testDay.bikes.map((bike) => (bike.bikeId === bikeId ? { ...bike, entryId } : bike)),
+  }));
+
 export const endTestDay = (clubId: string) => dropDraft(clubId, FORM);

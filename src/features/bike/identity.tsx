@@ -13,7 +13,7 @@ export function Identity({ bike }: { bike: BikeWithLog }) {
   const words = [owner && `Belongs to ${owner}`, make, model, year, retired && "Retired"];
   return (
     <div className="-mt-3 flex flex-wrap items-center gap-x-5">
-      <p className="text-soft">
+      <p className="basis-full text-soft">
         {[...words.filter(Boolean), "Tag "].join(" · ")}
         <strong className="tracking-wider text-ink">{bikeTag(bikeId)}</strong>
       </p>

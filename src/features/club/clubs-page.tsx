@@ -85,7 +85,7 @@ function WhatAClubIs() {
       <ol className="flex flex-col gap-4">
         {steps.map((step, index) => (
           <li key={step} className="flex gap-3">
-            <span aria-hidden className="text-4xl leading-none font-bold text-oil">
+            <span aria-hidden className="w-6 shrink-0 text-4xl leading-none font-bold text-oil">
               {index + 1}
             </span>
             <span className="text-lg">{step}</span>

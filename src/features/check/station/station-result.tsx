@@ -1,5 +1,5 @@
 import { useNavigate } from "react-router-dom";
-import { changeTestDay } from "../../../offline/test-day.ts";
+import { noteCheck } from "../../../offline/test-day.ts";
 import { Button } from "../../../ui/button.tsx";
 import { ButtonLink } from "../../../ui/button-link.tsx";
 import { EntryStateMark } from "../../../ui/entry-state-mark.tsx";
@@ -26,11 +26,6 @@ export function StationResult({ entryId, reading, ...station }: Props) {
   const line = bike.log.find(({ entry }) => entry.id === entryId);
   const check = summary.checks.find((one) => one.entryId === entryId);
   const here = testDayBikePath(clubId, bikeId);
-  const again = () =>
-    void changeTestDay(clubId, (now) => ({
-      ...now,
-      bikes: now.bikes.map((one) => (one.bikeId === bikeId ? { ...one, entryId: null } : one)),
-    }));
   if (!line && reading) return <main className="flex-1" aria-busy />;
   const hoseMaybeOff = summary.flags.includes("not-closed-out");
   const entry = line?.understood && line.entry.kind === "check" ? line.entry : null;
@@ -70,7 +65,7 @@ export function StationResult({ entryId, reading, ...station }: Props) {
         </p>
       )}
       <div className="flex flex-wrap gap-2">
-        <Button className="flex-auto" onClick={again}>
+        <Button className="flex-auto" onClick={() => void noteCheck(clubId, bikeId, null)}>
           Check it again
         </Button>
         <ButtonLink

@@ -7,15 +7,19 @@ import { useShares } from "../share/use-shares.ts";
 
 /** The member's own bikes, each with whether this club sees it. */
 export function OwnBikes({ club }: { club: Club }) {
-  const own = useBikes().data?.filter(({ access }) => access === "owner") ?? [];
-  if (own.length === 0) return null;
+  const own = useBikes().data?.filter(({ access }) => access === "owner");
+  if (!own) return null;
   return (
     <section aria-labelledby="own-bikes" className="flex flex-col gap-2">
       <h2 id="own-bikes" className="text-2xl">
         Your bikes
       </h2>
-      <p>The club’s mechanics see those that you share, and no others.</p>
-      <ul className="divide-y divide-rule border-y border-rule">
+      <p>
+        {own.length > 0
+          ? "The club’s mechanics see those that you share, and no others."
+          : "None in your Shed yet. Once there is, you say here whether the club sees it."}
+      </p>
+      <ul className="divide-y divide-rule border-y border-rule empty:hidden">
         {own.map(({ bikeId, details }) => (
           <li key={bikeId}>
             <OwnBike bikeId={bikeId} name={details.name} clubId={club.id} />
