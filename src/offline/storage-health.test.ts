@@ -32,6 +32,15 @@ describe("the storage's health", () => {
     expect(persist).toHaveBeenCalledOnce();
   });
 
+  it("is not asked about where there is no room to note it", async () => {
+    const persist = browserThat(true);
+    vi.spyOn(Storage.prototype, "setItem").mockImplementation(() => {
+      throw new DOMException("Full.", "QuotaExceededError");
+    });
+    await askToKeepStorage();
+    expect(persist).not.toHaveBeenCalled();
+  });
+
   it("is unavailable where the browser makes no promises", async () => {
     Object.defineProperty(navigator, "storage", { value: undefined, configurable: true });
     await askToKeepStorage();

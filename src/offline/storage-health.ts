@@ -26,7 +26,12 @@ export async function storageHealth(): Promise<StorageHealth> {
 /** After the first save: asks the browser, once, to keep what this phone holds. */
 export async function askToKeepStorage(): Promise<void> {
   if ((await storageHealth()) !== "unasked") return;
-  localStorage.setItem(ASKED, "yes");
+  try {
+    localStorage.setItem(ASKED, "yes");
+  } catch {
+    // No room to note it: asked at every save, the rider would be pestered.
+    return;
+  }
   settle((await navigator.storage.persist()) ? "persisted" : "refused");
 }
 
