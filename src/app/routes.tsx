@@ -18,6 +18,11 @@ const SharePage = lazy(() => import("../features/club/share/share-page.tsx"));
 const JoinPage = lazy(() => import("../features/club/join-page.tsx"));
 const SyringesPage = lazy(() => import("../features/syringes/index.tsx"));
 const AccountPage = lazy(() => import("../features/account/account-page.tsx"));
+const ChangeEmailPage = lazy(() => import("../features/account/change-email-page.tsx"));
+const ChangePasswordPage = lazy(() => import("../features/account/change-password-page.tsx"));
+const DevicesPage = lazy(() => import("../features/account/devices-page.tsx"));
+const OwnDataPage = lazy(() => import("../features/account/own-data-page.tsx"));
+const DeleteAccountPage = lazy(() => import("../features/account/delete-account-page.tsx"));
 const SignInPage = lazy(() => import("../features/account/sign-in-page.tsx"));
 const SignUpPage = lazy(() => import("../features/account/sign-up-page.tsx"));
 const ForgotPage = lazy(() => import("../features/account/forgot-page.tsx"));
@@ -40,6 +45,11 @@ export function AppRoutes() {
           <Route path={patterns.club} element={<ClubRoutes />} />
           <Route path={patterns.syringes} element={<SyringesPage />} />
           <Route path={patterns.account} element={<AccountPage />} />
+          <Route path={patterns.changeEmail} element={<ChangeEmailPage />} />
+          <Route path={patterns.changePassword} element={<ChangePasswordPage />} />
+          <Route path={patterns.devices} element={<DevicesPage />} />
+          <Route path={patterns.ownData} element={<OwnDataPage />} />
+          <Route path={patterns.deleteAccount} element={<DeleteAccountPage />} />
         </Route>
         <Route path={patterns.signIn} element={<SignInPage />} />
         <Route path={patterns.signUp} element={<SignUpPage />} />

@@ -58,16 +58,28 @@ async function failure(response: Response): Promise<ApiError | NoNetworkError> {
     : new NoNetworkError({ status: response.status, retryAfterMs: retryAfter });
 }
 
-/**
- * Calls the server. An answer counts only if it is 2xx, JSON, not redirected and of the schema's
- * shape; a problem document throws `ApiError`, everything else `NoNetworkError`.
- */
-export async function apiRequest<T = void>(path: string, request: ApiRequest<T> = {}): Promise<T> {
+async function answerOf<T>(path: string, request: ApiRequest<T>): Promise<Response> {
   const send = request.fetch ?? fetch;
   const response = await send(path, requestInit(request)).catch((cause: unknown) => {
     throw new NoNetworkError(undefined, { cause });
   });
   if (!response.ok || response.redirected) throw await failure(response);
+  return response;
+}
+
+/** A file that the server makes: what it answers counts only if it is of that type. */
+export async function apiFile(path: string, type: string): Promise<Blob> {
+  const response = await answerOf(path, {});
+  if (response.headers.get("content-type")?.startsWith(type)) return response.blob();
+  throw new NoNetworkError({ status: response.status, retryAfterMs: null });
+}
+
+/**
+ * Calls the server. An answer counts only if it is 2xx, JSON, not redirected and of the schema's
+ * shape; a problem document throws `ApiError`, everything else `NoNetworkError`.
+ */
+export async function apiRequest<T = void>(path: string, request: ApiRequest<T> = {}): Promise<T> {
+  const response = await answerOf(path, request);
   if (!request.schema) return undefined as T;
   const parsed = request.schema.safeParse(await json(response));
   if (parsed.success) return parsed.data;

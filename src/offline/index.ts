@@ -11,8 +11,9 @@ export {
   settleAccount,
   useAccount,
 } from "./account.ts";
-export { apiRequest } from "./api-client.ts";
+export { apiFile, apiRequest } from "./api-client.ts";
 export { dropDraft, keepDraft, useDraft, useDrafts } from "./drafts.ts";
+export { eraseFromPhone } from "./erase-from-phone.ts";
 export { exportUnsent } from "./export-unsent.ts";
 export { fetchBikes } from "./fetch-bikes.ts";
 export {

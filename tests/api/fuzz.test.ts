@@ -28,8 +28,7 @@ const agent = new Agent({ keepAlive: true });
 async function makeTarget(server: TestServer, batch: number): Promise<FuzzTarget> {
   // Addresses are used again after a while: so are the limits' counters.
   const from = `198.51.100.${batch % 100}`;
-  const rider = await signUpRider(server);
-  rider.phone.set("X-Forwarded-For", from);
+  const rider = await signUpRider({ ...server, from });
   const bikeId = newId();
   await rider.sync(smallLog(bikeId));
   const club = await makeClub(rider);

@@ -56,7 +56,7 @@ export class ProductServer {
 /** A signed-in account of the API, for setting a scene and for asking what the server thinks. */
 export class Rider {
   readonly email: string;
-  private readonly origin: string;
+  readonly origin: string;
   private cookie = "";
   id = "";
   static readonly password = "correct horse battery";

@@ -204,10 +204,10 @@ test("A rider can use a narrow phone and letters twice as large without scrollin
     for (const size of ["16px", "32px"]) {
       await page.goto(path);
       await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
-      await page.addStyleTag({ content: `html { font-size: ${size} }` });
-      const beyond = await page.evaluate(
-        () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
-      );
+      const beyond = await page.evaluate((fontSize) => {
+        document.documentElement.style.fontSize = fontSize;
+        return document.documentElement.scrollWidth - document.documentElement.clientWidth;
+      }, size);
       expect(beyond, `${path} at ${size}`).toBe(0);
     }
 });

@@ -12,10 +12,13 @@ export const PASSWORD = "two strokes and a pump";
 export interface Served {
   url: string;
   origin: string;
+  /** The address that a proxy in front says the caller has. */
+  from?: string;
 }
 
 /** A phone's browser: it keeps cookies, and says which page it calls from. */
-export const createPhone = ({ url, origin }: Served) => supertest.agent(url).set("Origin", origin);
+export const createPhone = ({ url, origin, from }: Served) =>
+  supertest.agent(url).set({ Origin: origin, ...(from && { "X-Forwarded-For": from }) });
 
 export type Phone = ReturnType<typeof createPhone>;
 

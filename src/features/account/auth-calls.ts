@@ -1,5 +1,4 @@
 /** The calls to `/api/auth`: what is sent is judged here first, in the words the server uses. */
-import type { z } from "zod";
 import {
   requestPasswordResetSchema,
   resetPasswordSchema,
@@ -11,15 +10,8 @@ import {
   type SignUp,
   type User,
 } from "../../../shared/schemas/auth.ts";
-import { errorsByField } from "../../../shared/schemas/errors-by-field.ts";
-import { apiRequest, rememberAccount, syncNow } from "../../offline/index.ts";
-import { FieldErrors } from "../../ui/use-submit.ts";
-
-function checked<T>(schema: z.ZodType<T>, typed: T): T {
-  const parsed = schema.safeParse(typed);
-  if (parsed.success) return parsed.data;
-  throw new FieldErrors(errorsByField(parsed.error));
-}
+import { apiRequest, rememberAccount, rememberedAccount, syncNow } from "../../offline/index.ts";
+import { checked } from "./checked.ts";
 
 const post = (call: string, body?: unknown) =>
   apiRequest(`/api/auth/${call}`, { method: "POST", body });
@@ -43,5 +35,13 @@ export const requestPasswordReset = async (email: string) =>
 export const resetPassword = async (token: string, password: string) =>
   post("reset-password", checked(resetPasswordSchema, { token, password }));
 
-export const verifyEmail = async (token: string) =>
-  post("verify-email", checked(tokenSchema, { token }));
+/** Of the account that the link belongs to, which need not be this phone's. */
+export async function verifyEmail(token: string): Promise<void> {
+  const body = checked(tokenSchema, { token });
+  const schema = userResponseSchema;
+  const { user } = await apiRequest("/api/auth/verify-email", { method: "POST", body, schema });
+  if (user.id === rememberedAccount()?.id) rememberAccount(user);
+}
+
+export const readMe = async (): Promise<User> =>
+  (await apiRequest("/api/auth/me", { schema: userResponseSchema })).user;

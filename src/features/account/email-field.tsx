@@ -1,6 +1,8 @@
 import { TextField } from "../../ui/text-field.tsx";
 
 interface Props {
+  label?: string;
+  autoComplete?: "username" | "email";
   error?: string;
   value: string;
   onChange: (value: string) => void;
@@ -10,9 +12,9 @@ export function EmailField({ onChange, ...props }: Props) {
   return (
     <TextField
       label="E-mail"
+      autoComplete="username"
       type="email"
       inputMode="email"
-      autoComplete="username"
       autoCapitalize="none"
       spellCheck={false}
       {...props}

@@ -1,6 +1,5 @@
 import { useState } from "react";
 import { useNavigate } from "react-router-dom";
-import { MIN_PASSWORD_LENGTH } from "../../../shared/schemas/auth.ts";
 import { Button } from "../../ui/button.tsx";
 import { Form } from "../../ui/form.tsx";
 import { Page } from "../../ui/page.tsx";
@@ -8,7 +7,7 @@ import { patterns } from "../../ui/paths.ts";
 import { useLinkToken } from "../../ui/use-link-token.ts";
 import { useSubmit } from "../../ui/use-submit.ts";
 import { resetPassword } from "./auth-calls.ts";
-import { PasswordField } from "./password-field.tsx";
+import { NewPasswordField } from "./new-password-field.tsx";
 
 /** Where the mailed link leads: the token is in its address. */
 export default function ResetPage() {
@@ -32,10 +31,8 @@ export default function ResetPage() {
     >
       <p>Every phone is then asked to sign in again. Nothing saved on them is lost.</p>
       <Form id="reset" onSubmit={submit} problem={problem ?? tokenProblem}>
-        <PasswordField
+        <NewPasswordField
           label="New password"
-          hint={`At least ${MIN_PASSWORD_LENGTH} characters; a few words in a row are good.`}
-          autoComplete="new-password"
           value={password}
           onChange={setPassword}
           error={errors.password}

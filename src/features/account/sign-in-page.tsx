@@ -1,21 +1,24 @@
 import { useState } from "react";
-import { Link } from "react-router-dom";
+import { Link, useSearchParams } from "react-router-dom";
 import { useAccount } from "../../offline/index.ts";
 import { Button } from "../../ui/button.tsx";
 import { ButtonLink } from "../../ui/button-link.tsx";
 import { Column } from "../../ui/column.tsx";
 import { usualScale } from "../../ui/column-scale.ts";
 import { Form } from "../../ui/form.tsx";
+import { Notice } from "../../ui/notice.tsx";
 import { Page } from "../../ui/page.tsx";
 import { patterns } from "../../ui/paths.ts";
 import { useSubmit } from "../../ui/use-submit.ts";
 import { signIn } from "./auth-calls.ts";
 import { EmailField } from "./email-field.tsx";
+import { leftWordsIn } from "./leave-this-phone.ts";
 import { PasswordField } from "./password-field.tsx";
 import { useWayIn } from "./use-way-in.ts";
 
 export default function SignInPage() {
   const { state, goOn } = useWayIn();
+  const left = leftWordsIn(useSearchParams()[0]);
   const [email, setEmail] = useState(useAccount()?.email ?? "");
   const [password, setPassword] = useState("");
   const { submit, busy, errors, problem } = useSubmit(async () => {
@@ -52,6 +55,7 @@ export default function SignInPage() {
           />
         </div>
       </div>
+      <div role="status">{left && <Notice tone="info" title={left} />}</div>
       <Form id="sign-in" onSubmit={submit} problem={problem}>
         <EmailField value={email} onChange={setEmail} error={errors.email} />
         <PasswordField

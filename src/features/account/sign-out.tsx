@@ -1,15 +1,29 @@
 import { useState } from "react";
 import { useNavigate } from "react-router-dom";
-import { forgetAccount, NoNetworkError, syncNow, useSyncStatus } from "../../offline/index.ts";
+import {
+  eraseFromPhone,
+  forgetAccount,
+  NoNetworkError,
+  syncNow,
+  useSyncStatus,
+} from "../../offline/index.ts";
 import { Button } from "../../ui/button.tsx";
 import { Notice } from "../../ui/notice.tsx";
 import { patterns } from "../../ui/paths.ts";
 import { Sheet } from "../../ui/sheet.tsx";
 import { useSubmit } from "../../ui/use-submit.ts";
 import { signOut } from "./auth-calls.ts";
+import { leaveThisPhone } from "./leave-this-phone.ts";
 
 const NEEDS_NETWORK =
   "Signing out needs the network: only the server can end the session. You are still signed in.";
+
+const endSession = () =>
+  signOut().catch((error: unknown) => {
+    throw error instanceof NoNetworkError
+      ? Object.assign(error, { message: NEEDS_NETWORK })
+      : error;
+  });
 
 /** Unsent entries are said first. They stay, and are sent when their writer signs in again. */
 export function SignOut() {
@@ -17,11 +31,7 @@ export function SignOut() {
   const [asking, setAsking] = useState(false);
   const navigate = useNavigate();
   const { submit, busy, problem } = useSubmit(async () => {
-    await signOut().catch((error: unknown) => {
-      throw error instanceof NoNetworkError
-        ? Object.assign(error, { message: NEEDS_NETWORK })
-        : error;
-    });
+    await endSession();
     forgetAccount();
     await navigate(patterns.signIn, { replace: true });
   });
@@ -33,6 +43,7 @@ export function SignOut() {
         Sign out
       </Button>
       {!asking && problemNotice}
+      {unsent === 0 && <LeaveAndClear />}
       {asking && (
         <Sheet title={words} onClose={() => setAsking(false)}>
           <div className="flex flex-col gap-3">
@@ -58,5 +69,25 @@ export function SignOut() {
         </Sheet>
       )}
     </section>
+  );
+}
+
+/** For a phone that is lent or given away: the log is on the server, and leaves this one. */
+function LeaveAndClear() {
+  const { submit, busy, problem } = useSubmit(async () => {
+    await endSession();
+    await eraseFromPhone();
+    leaveThisPhone("cleared");
+  });
+  return (
+    <>
+      <Button disabled={busy} onClick={() => void submit()}>
+        Leave, and clear this phone
+      </Button>
+      <p className="text-soft">
+        For a phone that is not yours: you are signed out, and your logbook is taken off it.
+      </p>
+      {problem && <Notice tone="error" title={problem} />}
+    </>
   );
 }

@@ -1,5 +1,4 @@
 import { useState } from "react";
-import { MIN_PASSWORD_LENGTH } from "../../../shared/schemas/auth.ts";
 import { Button } from "../../ui/button.tsx";
 import { Form } from "../../ui/form.tsx";
 import { Page } from "../../ui/page.tsx";
@@ -8,7 +7,7 @@ import { TextField } from "../../ui/text-field.tsx";
 import { useSubmit } from "../../ui/use-submit.ts";
 import { signUp } from "./auth-calls.ts";
 import { EmailField } from "./email-field.tsx";
-import { PasswordField } from "./password-field.tsx";
+import { NewPasswordField } from "./new-password-field.tsx";
 import { useWayIn } from "./use-way-in.ts";
 
 export default function SignUpPage() {
@@ -44,10 +43,8 @@ export default function SignUpPage() {
           error={errors.name}
         />
         <EmailField value={email} onChange={setEmail} error={errors.email} />
-        <PasswordField
+        <NewPasswordField
           label="Password"
-          hint={`At least ${MIN_PASSWORD_LENGTH} characters; a few words in a row are good.`}
-          autoComplete="new-password"
           value={password}
           onChange={setPassword}
           error={errors.password}
