@@ -20,6 +20,8 @@ async function freePort(): Promise<number> {
 export class ProductServer {
   private process: ChildProcess | null = null;
   readonly origin: string;
+  /** The folder that holds the built product; a deployed one may be elsewhere. */
+  root = ".";
   private readonly port: number;
   private readonly dataDir: string;
 
@@ -31,7 +33,7 @@ export class ProductServer {
 
   async start(): Promise<void> {
     const environment = { ...process.env, PORT: String(this.port), DATA_DIR: this.dataDir };
-    this.process = spawn(process.execPath, ["dist/server/index.js"], {
+    this.process = spawn(process.execPath, [path.join(this.root, "dist/server/index.js")], {
       env: { ...environment, LOG_LEVEL: "error" },
       stdio: ["ignore", "ignore", "inherit"],
     });

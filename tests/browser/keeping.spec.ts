@@ -7,20 +7,15 @@ import path from "node:path";
 import { hoursEntry } from "../helpers/make-entry.ts";
 import { expect, Rider, signUp, test } from "./fixtures.ts";
 import { installed } from "./open-bike.ts";
-import { addBike, fillNote, logLine, saveNote, sendNow, writeNote } from "./write-notes.ts";
-
-interface Served {
-  id: string;
-  kind: string;
-  body: { text?: string };
-}
-
-/** What the server holds of the account's bikes. */
-async function entriesOnServer(rider: Rider): Promise<Served[]> {
-  const answer = await rider.call("POST", "/api/sync", { known: {}, entries: [] });
-  const { bikes } = (await answer.json()) as { bikes: { entries: Served[] }[] };
-  return bikes.flatMap(({ entries }) => entries);
-}
+import {
+  addBike,
+  entriesOnServer,
+  fillNote,
+  logLine,
+  saveNote,
+  sendNow,
+  writeNote,
+} from "./write-notes.ts";
 
 const waiting = (page: Page, entries: number) =>
   expect(page.getByText(new RegExp(`\\b${entries} (entry waits|entries wait) since`))).toBeVisible({

@@ -1,5 +1,5 @@
 import type { Page } from "@playwright/test";
-import { expect } from "./fixtures.ts";
+import { expect, type Rider } from "./fixtures.ts";
 
 export const card = (page: Page, name: string) => page.getByRole("region", { name });
 
@@ -40,3 +40,19 @@ export const logLine = (page: Page, text: string) =>
 
 export const sendNow = (page: Page) =>
   page.getByRole("button", { name: "Send and fetch now" }).click();
+
+interface Served {
+  id: string;
+  kind: string;
+  body: { text?: string };
+}
+
+/** What the server holds of the account's bikes. */
+export async function entriesOnServer(rider: Rider): Promise<Served[]> {
+  const answer = await rider.call("POST", "/api/sync", { known: {}, entries: [] });
+  const { bikes } = (await answer.json()) as { bikes: { entries: Served[] }[] };
+  return bikes.flatMap(({ entries }) => entries);
+}
+
+export const notesOnServer = async (rider: Rider) =>
+  (await entriesOnServer(rider)).flatMap(({ body }) => body.text ?? []).sort();
