@@ -17,7 +17,6 @@ interface Props {
 /** One level a run: where it started is asked for only where the barrel was emptied before it. */
 export function StationRuns({ draft, edit, errors }: Props) {
   const [allStarts, setAllStarts] = useState(false);
-  const addClass = "flex-1 px-2! text-base!";
   return (
     <div className="flex flex-col gap-3">
       {draft.runs.map((run, index) => (
@@ -30,14 +29,15 @@ export function StationRuns({ draft, edit, errors }: Props) {
         />
       ))}
       {draft.runs.length < MAX_RUNS && (
-        <div className="flex gap-2 border-t border-rule pt-3">
-          <Button className={addClass} onClick={() => edit((now) => addRun(now, false))}>
-            One more on top
+        <fieldset className="flex gap-2 border-t border-rule pt-3">
+          <legend className="sr-only">One more run</legend>
+          <Button className="flex-1" onClick={() => edit((now) => addRun(now, false))}>
+            Run on top
           </Button>
-          <Button className={addClass} onClick={() => edit((now) => addRun(now, true))}>
-            One more, emptied
+          <Button className="flex-1" onClick={() => edit((now) => addRun(now, true))}>
+            Run, emptied
           </Button>
-        </div>
+        </fieldset>
       )}
       {!allStarts && (
         <button
