@@ -1,6 +1,7 @@
 import { useState } from "react";
 import { MAX_RUNS } from "../../../../shared/schemas/entry.ts";
 import { Button } from "../../../ui/button.tsx";
+import { PlusIcon } from "../../../ui/icons.tsx";
 import { NumberField } from "../../../ui/number-field.tsx";
 import { changeRun, startTextOf } from "../draft/check-draft.ts";
 import type { RunDraft } from "../draft/check-draft-schema.ts";
@@ -31,11 +32,13 @@ export function StationRuns({ draft, edit, errors }: Props) {
       {draft.runs.length < MAX_RUNS && (
         <fieldset className="flex gap-2 border-t border-rule pt-3">
           <legend className="sr-only">One more run</legend>
-          <Button className="flex-1" onClick={() => edit((now) => addRun(now, false))}>
+          <Button className="flex-auto px-2!" onClick={() => edit((now) => addRun(now, false))}>
+            <PlusIcon />
             Run on top
           </Button>
-          <Button className="flex-1" onClick={() => edit((now) => addRun(now, true))}>
-            Run, emptied
+          <Button className="flex-auto px-2!" onClick={() => edit((now) => addRun(now, true))}>
+            <PlusIcon />
+            Emptied
           </Button>
         </fieldset>
       )}
