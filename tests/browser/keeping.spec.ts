@@ -1,14 +1,13 @@
 import { chromium, type BrowserContext, type Page } from "@playwright/test";
-import { spawn, type ChildProcess } from "node:child_process";
-import { once } from "node:events";
-import { mkdtemp, readFile, rm } from "node:fs/promises";
+import { mkdtemp, readlink, rm } from "node:fs/promises";
 import { tmpdir } from "node:os";
 import path from "node:path";
 import { hoursEntry } from "../helpers/make-entry.ts";
-import { expect, Rider, signUp, test } from "./fixtures.ts";
+import { expect, signUp, test } from "./fixtures.ts";
 import { installed } from "./open-bike.ts";
 import {
   addBike,
+  card,
   entriesOnServer,
   fillNote,
   logLine,
@@ -140,31 +139,20 @@ test("A rider can write a hundred entries with no network, whatever befalls the 
   expect(entries.filter(({ kind }) => kind === "hours")).toHaveLength(1 + 93);
 });
 
-const running: ChildProcess[] = [];
-test.afterEach(() => running.forEach((browser) => browser.kill("SIGKILL")));
-
-/** A browser of its own, which can be killed as a flat battery would. */
-async function openBrowser(profile: string) {
-  const { executablePath, args = [] } = test.info().project.use.launchOptions!;
-  const portFile = path.join(profile, "DevToolsActivePort");
-  await rm(portFile, { force: true });
-  const process = spawn(
-    executablePath!,
-    [...args, "--headless", "--remote-debugging-port=0", `--user-data-dir=${profile}`],
-    { stdio: "ignore" },
-  );
-  running.push(process);
-  const readPort = () => readFile(portFile, "utf8").then(parseInt, () => 0);
-  await expect.poll(readPort, { timeout: 30_000 }).toBeGreaterThan(0);
-  const browser = await chromium.connectOverCDP(`http://127.0.0.1:${await readPort()}`);
-  const page = await browser.contexts()[0]!.newPage();
-  page.setDefaultTimeout(15_000);
+/** A browser with a disk of its own, which can be killed as by a flat battery. */
+async function openBrowser(profile: string, baseURL: string) {
+  const { launchOptions } = test.info().project.use;
+  const context = await chromium.launchPersistentContext(profile, { ...launchOptions, baseURL });
   const kill = async () => {
-    const exited = once(process, "exit");
-    process.kill("SIGKILL");
-    await exited;
+    const closed = context.waitForEvent("close");
+    // Chromium's lock on the disk names the machine and the process.
+    process.kill(
+      Number((await readlink(path.join(profile, "SingletonLock"))).split("-").at(-1)),
+      9,
+    );
+    await closed;
   };
-  return { page, kill };
+  return { page: context.pages()[0]!, kill };
 }
 
 test("A rider whose browser dies right after signing up finds the entries again, with no network", async ({
@@ -173,24 +161,17 @@ test("A rider whose browser dies right after signing up finds the entries again,
 }) => {
   test.setTimeout(120_000);
   const profile = await mkdtemp(path.join(tmpdir(), "sumpless-profile-"));
-  const first = await openBrowser(profile);
-  await first.page.goto(server.origin);
+  const first = await openBrowser(profile, server.origin);
+  await first.page.goto("/");
   await installed(first.page);
-  await first.page.getByRole("link", { name: "I am new here" }).click();
-  await first.page.getByLabel(/name|call you/i).fill("Wren");
-  await first.page.getByLabel(/e-mail/i).fill(rider.email);
-  await first.page.getByLabel(/^password/i).fill(Rider.password);
-  await first.page.getByRole("button", { name: /create|sign up/i }).click();
-  await expect(first.page.getByRole("link", { name: "Add a bike" })).toBeVisible();
+  await signUp(first.page, rider.email);
   await server.stop();
   await addBike(first.page, "Heather");
   await first.kill();
 
-  const second = await openBrowser(profile);
-  await second.page.goto(server.origin);
-  await expect(second.page.getByRole("region", { name: "Heather" })).toContainText(
-    "Saved on this phone",
-  );
+  const second = await openBrowser(profile, server.origin);
+  await second.page.goto("/");
+  await expect(card(second.page, "Heather")).toContainText("Saved on this phone");
   await second.kill();
   await rm(profile, { recursive: true, force: true, maxRetries: 5 });
 });
