@@ -61,9 +61,9 @@ export async function startFaultProxy(target: () => string, next: () => Fault) {
     if (fault === "delay") await sleep(20);
     const { answer, text } = await forward(target(), request, body);
     if (fault === "drop-answer") return hangUp();
-    const type = answer.headers.get("content-type") ?? "application/json";
-    const length = Buffer.byteLength(text);
-    response.writeHead(answer.status, { "content-type": type, "content-length": length });
+    for (const name of ["content-type", "retry-after"])
+      if (answer.headers.has(name)) response.setHeader(name, answer.headers.get(name)!);
+    response.writeHead(answer.status, { "content-length": Buffer.byteLength(text) });
     if (fault !== "cut-answer") response.end(text);
     else response.write(text.slice(0, text.length / 2), hangUp);
   }
