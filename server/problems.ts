@@ -17,7 +17,8 @@ function problem(status: number, code: string, detail: string, more: More = {}):
 }
 
 export const notJson = () => problem(400, "not-json", "What was sent is not JSON.");
-export const badRequest = () => problem(400, "bad-request", "This request cannot be read.");
+export const badRequest = (status = 400) =>
+  problem(status, "bad-request", "This request cannot be read.");
 export const notSignedIn = () => problem(401, "not-signed-in", "Please sign in first.");
 export const wrongCredentials = () =>
   problem(401, "wrong-credentials", "This e-mail address and password do not go together.");

@@ -5,16 +5,17 @@ import { ProblemError } from "../problem-error.ts";
 interface KnownError {
   /** Of SQLite, or of the operating system. */
   code?: unknown;
-  /** Of Express and its body parser. */
+  /** Of Express, its body parser and what serves its files. */
   status?: unknown;
   type?: unknown;
 }
 
-function fromBodyParser({ status, type }: KnownError): ProblemError | null {
+function fromExpress({ status, type }: KnownError): ProblemError | null {
+  if (typeof status !== "number" || status < 400 || status >= 500) return null;
   if (status === 413) return problems.tooLarge();
   if (status === 415) return problems.unsupportedType();
   if (type === "entity.parse.failed") return problems.notJson();
-  return status === 400 ? problems.badRequest() : null;
+  return problems.badRequest(status);
 }
 
 function fromStorage({ code }: KnownError): ProblemError | null {
@@ -26,7 +27,7 @@ function fromStorage({ code }: KnownError): ProblemError | null {
 function toProblem(error: unknown): ProblemError {
   if (error instanceof ProblemError) return error;
   const known = (typeof error === "object" && error !== null ? error : {}) as KnownError;
-  return fromBodyParser(known) ?? fromStorage(known) ?? problems.failure();
+  return fromExpress(known) ?? fromStorage(known) ?? problems.failure();
 }
 
 /** Registered last. Answers every error as problem details; nothing of its inside is shown. */

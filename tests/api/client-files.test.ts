@@ -54,6 +54,35 @@ it("a file that is not there is not a page", async () => {
   expect((await site.get("/../package.json")).status).toBe(404);
 });
 
+it("a part or a state of a file that there is not is no failure of the server's", async () => {
+  const site = await client();
+  const asked = { Range: "bytes=99999-", "If-Match": '"another"' };
+  expect((await site.get("/sw.js").set("Range", asked.Range)).status).toBe(416);
+  const changed = await site.get("/sw.js").set("If-Match", asked["If-Match"]);
+  expect([changed.status, changed.type]).toEqual([412, "application/problem+json"]);
+});
+
+it("nothing but what was built is served, by whatever spelling of its path", async () => {
+  const site = await client();
+  const around = [
+    "/.git/config",
+    "/.env",
+    "/package.json",
+    "/data/sumpless.sqlite",
+    "/server/index.ts",
+  ];
+  const up = [
+    "/..%2fpackage.json",
+    "/%2e%2e/%2e%2e/package.json",
+    "/assets/..%5c..%5cpackage.json",
+  ];
+  for (const file of [...around, ...up]) {
+    const answer = await site.get(file);
+    if (answer.status === 200) expect(answer.text, file).toBe(PAGE);
+    else expect([answer.status, answer.type], file).toEqual([404, "application/problem+json"]);
+  }
+});
+
 it("without a built client every page is not found", async () => {
   const { url } = await startTestServer({ clientDir: path.join(temporaryDir(), "none") });
   expect((await supertest(url).get("/")).status).toBe(404);

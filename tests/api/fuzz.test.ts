@@ -1,18 +1,20 @@
 import fc from "fast-check";
+import { writeFileSync } from "node:fs";
 import { Agent } from "node:http";
+import path from "node:path";
 import { setFlagsFromString } from "node:v8";
 import { runInNewContext } from "node:vm";
 import { expect, it, onTestFinished } from "vitest";
 import { createSessions } from "../../server/auth/session.ts";
 import { invite, makeClub, share } from "../helpers/club.ts";
-import { arbitraryRequest } from "../helpers/fuzz/arbitrary-request.ts";
+import { arbitraryRequest, CLIENT_FILES } from "../helpers/fuzz/arbitrary-request.ts";
 import { routeBodies } from "../helpers/fuzz/route-bodies.ts";
 import { arbitraryBytes, sendBytes } from "../helpers/fuzz/send-bytes.ts";
 import { sendRequest, wrongWith, type FuzzTarget } from "../helpers/fuzz/send-request.ts";
 import { listRoutes } from "../helpers/list-routes.ts";
 import { newId, smallLog } from "../helpers/make-entry.ts";
 import { signUpRider } from "../helpers/rider.ts";
-import { startTestServer, type TestServer } from "../helpers/start-test-server.ts";
+import { startTestServer, temporaryDir, type TestServer } from "../helpers/start-test-server.ts";
 
 /** `npm run torture -- fuzz` sends many more. */
 const REQUESTS = Number(process.env.REQUESTS ?? 600);
@@ -42,6 +44,7 @@ async function makeTarget(server: TestServer, batch: number): Promise<FuzzTarget
     token: invited.token,
     deviceId: "none",
     name: "none",
+    file: "index.html",
   };
   return { ...server, cookie: rider.cookie, ids, from, agent };
 }
@@ -72,8 +75,10 @@ it(
   { timeout: 3_600_000 },
   async () => {
     onTestFinished(() => agent.destroy());
-    const server = await startTestServer({ trustedProxies: 1 });
-    const routes = listRoutes(server.app);
+    const clientDir = temporaryDir();
+    writeFileSync(path.join(clientDir, "index.html"), "<!doctype html>");
+    const server = await startTestServer({ trustedProxies: 1, clientDir });
+    const routes = [...listRoutes(server.app), CLIENT_FILES, CLIENT_FILES];
     const statuses: Record<number, number> = {};
     const heaps: number[] = [];
     const batches = Math.ceil(REQUESTS / BATCH);

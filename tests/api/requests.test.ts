@@ -1,3 +1,4 @@
+import { gzipSync } from "node:zlib";
 import { describe, expect, it } from "vitest";
 import supertest from "supertest";
 import { problemSchema } from "../../shared/schemas/problem.ts";
@@ -83,6 +84,16 @@ describe("a request that changes something", () => {
     expect((await rider.sync([])).bikes).toHaveLength(1);
   });
 
+  it("is refused where it swells beyond 2 MB once unpacked", async () => {
+    const { phone } = await signUpRider(await startTestServer());
+    const packed = gzipSync(Buffer.alloc(50 * 1024 * 1024, " "));
+    const asked = phone.post("/api/sync").type("json").set("Content-Encoding", "gzip");
+    expectProblem(
+      await asked.serialize((body: Buffer) => body as unknown as string).send(packed),
+      413,
+    );
+  });
+
   it("without a body says what is missing", async () => {
     const { phone } = await signUpRider(await startTestServer());
     for (const path of ["/api/sync", "/api/auth/sign-in"]) {
@@ -101,6 +112,15 @@ describe("the API", () => {
     expectProblem(await phone.put("/api/sync").send({}), 404);
     expectProblem(await phone.get("/api/sync"), 404);
     expectProblem(await phone.get("/api/bikes/%E0"), 400);
+  });
+
+  it("says of what type and encoding each answer is", async () => {
+    const { phone } = await signUpRider(await startTestServer());
+    const typeOf = async (path: string) => (await phone.get(path)).headers["content-type"];
+    expect(await typeOf("/api/auth/me")).toBe("application/json; charset=utf-8");
+    expect(await typeOf("/api/bikes")).toBe("application/json; charset=utf-8");
+    expect(await typeOf("/api/export/checks.csv")).toBe("text/csv; charset=utf-8");
+    expect(await typeOf("/api/nothing")).toBe("application/problem+json; charset=utf-8");
   });
 
   it("is kept by no cache", async () => {

@@ -61,6 +61,9 @@ test("A rider can choose another password, and is kept from one that anybody wou
   await rider.signUp();
   await signIn(page, rider.email);
   await open(page, "Change the password");
+  for (const label of ["Present password", "New password"])
+    await expect(password(page, label)).toHaveAttribute("type", "password");
+  await expect(password(page, "New password")).toHaveAttribute("autocomplete", "new-password");
   await password(page, "Present password").fill(Rider.password);
   await password(page, "New password").fill("password123");
   await page.getByRole("button", { name: "Save the new password" }).click();

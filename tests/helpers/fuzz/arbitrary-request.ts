@@ -6,8 +6,11 @@ import { spoiled } from "./spoiled.ts";
 /** What stands for an id in a path: one that is there, or anything else. */
 export type PathPart = { own: true } | { own: false; text: string };
 
+/** The built client's files, as if they were a route. */
+export const CLIENT_FILES = "GET /:file";
+
 export interface FuzzRequest {
-  /** As `listRoutes` names it. */
+  /** As `listRoutes` names it, or `CLIENT_FILES`. */
   route: string;
   parts: PathPart[];
   query: string;
@@ -41,6 +44,15 @@ const mostly = <T>(usual: T, ...others: fc.Arbitrary<T>[]) =>
 /** Bytes that a header may hold at all: the rest never leaves the client. */
 const headerText = fc.stringMatching(/^[\t -~]{0,80}$/);
 
+const conditions = fc.constantFrom(
+  "bytes=0-1",
+  "bytes=99999-",
+  "bytes=1-0,5-",
+  '"x"',
+  "*",
+  "Tue, 01 Jan 2099 00:00:00 GMT",
+);
+
 const headers = fc.oneof(
   { weight: 6, arbitrary: fc.constant({}) },
   {
@@ -52,14 +64,17 @@ const headers = fc.oneof(
         "authorization",
         "content-encoding",
         "if-none-match",
+        "if-match",
         "if-modified-since",
+        "if-range",
+        "if-unmodified-since",
         "range",
         "user-agent",
         "x-forwarded-proto",
         "x-http-method-override",
         "host",
       ),
-      headerText,
+      fc.oneof(headerText, conditions),
       { maxKeys: 3 },
     ),
   },

@@ -1,7 +1,7 @@
 import { request as httpRequest, type Agent, type IncomingMessage } from "node:http";
 import { buffer } from "node:stream/consumers";
 import { problemSchema } from "../../../shared/schemas/problem.ts";
-import type { FuzzRequest } from "./arbitrary-request.ts";
+import { CLIENT_FILES, type FuzzRequest } from "./arbitrary-request.ts";
 
 /** Longer than any answer takes on a busy machine: beyond it, the server hangs. */
 const PATIENCE_MS = 30_000;
@@ -24,7 +24,8 @@ function pathOf({ route, parts, query }: FuzzRequest, ids: Record<string, string
     const part = parts[next++]!;
     return part.own ? (ids[name] ?? "none") : part.text;
   });
-  return (path.startsWith("/dev/") ? path : `/api${path}`) + query;
+  const outside = route === CLIENT_FILES || path.startsWith("/dev/");
+  return (outside ? path : `/api${path}`) + query;
 }
 
 function headersOf(request: FuzzRequest, target: FuzzTarget): Record<string, string> {
