@@ -9,6 +9,8 @@ export function RequireAccount() {
   const { pathname } = useLocation();
   // The lasting copy, which takes a moment to read, may still know one.
   if (!account) use(settleAccount());
-  if (!account) return <Navigate to={patterns.signIn} replace state={{ from: pathname }} />;
+  // Whoever signs in after a sign-out, which is on the account page, starts in the Shed.
+  const from = pathname === patterns.account ? patterns.shed : pathname;
+  if (!account) return <Navigate to={patterns.signIn} replace state={{ from }} />;
   return <Outlet />;
 }

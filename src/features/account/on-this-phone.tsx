@@ -24,7 +24,7 @@ const healthWords: Record<StorageHealth, string> = {
 
 /** What is on this phone and nowhere else, and how safe it is here. */
 export function OnThisPhone() {
-  const unsent = useUnsent().data ?? [];
+  const { data: unsent } = useUnsent();
   const health = useStorageHealth();
   const save = async () => {
     const day = new Date().toISOString().slice(0, 10);
@@ -34,9 +34,8 @@ export function OnThisPhone() {
     <section className="flex flex-col gap-2 border-t border-rule pt-4">
       <h2 className="text-xl">On this phone</h2>
       <p>{healthWords[health]}</p>
-      {unsent.length === 0 ? (
-        <p>Every entry has been sent.</p>
-      ) : (
+      {unsent?.length === 0 && <p>Every entry has been sent.</p>}
+      {unsent && unsent.length > 0 && (
         <>
           <Fold title={`Not sent yet: ${unsent.length}`}>
             <ul className="divide-y divide-rule border-y border-rule">
