@@ -4,7 +4,8 @@ import type { LogEntry, LogEntryOf, Sequence } from "../schemas/entry.ts";
 import { baselineSeries, measuredCheck } from "./baseline-series.ts";
 import { bikeDetails } from "./bike-details.ts";
 import { byEffectiveOrder, effectiveTime } from "./effective-order.ts";
-import { judgeSeries, volumeOf, type JudgedSeries } from "./judge-series.ts";
+import { volumeOf } from "./baseline-of.ts";
+import { judgeSeries, type JudgedSeries } from "./judge-series.ts";
 import { lifetimeHours } from "./lifetime-hours.ts";
 import { standingEntries } from "./standing-entries.ts";
 

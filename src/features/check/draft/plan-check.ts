@@ -4,7 +4,7 @@ import {
   type PlannedRuns,
 } from "../../../../shared/delivery/plan-runs.ts";
 import { runsPerFill } from "../../../../shared/delivery/runs-per-fill.ts";
-import { usualDeliveryMl } from "../../../../shared/logbook/judge-series.ts";
+import { usualDeliveryMl } from "../../../../shared/delivery/usual-delivery-ml.ts";
 import type { Sequence, Syringe } from "../../../../shared/schemas/entry.ts";
 import type { Summary } from "../../../../shared/schemas/summary.ts";
 import { usualScales } from "../../../ui/column-scale.ts";
