@@ -51,7 +51,7 @@ const playwrightReport = z
 
 function unitTests(): Count {
   const report = path.join(reports, "vitest.json");
-  const reporters = ["--reporter=dot", "--reporter=json", `--outputFile.json=${report}`];
+  const reporters = ["--reporter=default", "--reporter=json", `--outputFile.json=${report}`];
   return counted(run("vitest/vitest.mjs", ["run", ...reporters]), report, vitestReport);
 }
 
