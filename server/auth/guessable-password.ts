@@ -1,7 +1,7 @@
 import type { ZxcvbnFactory } from "@zxcvbn-ts/core";
 
-/** At the 50 tries in 15 minutes that are allowed at one account, years of guessing. */
-const ENOUGH_GUESSES = 10_000_000;
+/** Found before this many guesses, a password is as good as on the list of 49,000 common ones. */
+const ENOUGH_GUESSES = 50_000;
 /** The estimate's work grows with the square of the length; nobody guesses further than this. */
 const JUDGED_LENGTH = 40;
 /** Words that anyone would try here, whoever the rider is. */
