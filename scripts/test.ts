@@ -18,7 +18,7 @@ const reports = mkdtempSync(path.join(tmpdir(), "sumpless-test-"));
 
 /** Runs a package's own program with this Node: no npx, which leaves its child alive when killed. */
 function run(file: string, args: string[], env: NodeJS.ProcessEnv = {}): boolean {
-  console.log(`\n▸ ${path.basename(path.dirname(file))} ${args.join(" ")}`);
+  console.log(`\n▸ ${file.split("/").slice(0, -1).join("/")} ${args.join(" ")}`);
   const { status } = spawnSync(process.execPath, [path.join("node_modules", file), ...args], {
     stdio: "inherit",
     env: { ...process.env, ...env },
