@@ -30,7 +30,7 @@ export function StationRuns({ draft, edit, errors }: Props) {
         />
       ))}
       {draft.runs.length < MAX_RUNS && (
-        <fieldset className="flex gap-2 border-t border-rule pt-3">
+        <fieldset className="flex min-w-0 flex-wrap gap-2 border-t border-rule pt-3">
           <legend className="sr-only">One more run</legend>
           <Button className="flex-auto px-2!" onClick={() => edit((now) => addRun(now, false))}>
             <PlusIcon />
