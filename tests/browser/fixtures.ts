@@ -161,6 +161,37 @@ export async function signIn(page: Page, email: string): Promise<void> {
   await expect(page).toHaveURL("/");
 }
 
+/** Waits until the service worker has everything that the app needs with no network. */
+export const waitUntilInstalled = (page: Page) =>
+  page.evaluate(async () => {
+    await navigator.serviceWorker.ready;
+    if (navigator.serviceWorker.controller) return;
+    await new Promise((resolve) => {
+      navigator.serviceWorker.addEventListener("controllerchange", resolve, { once: true });
+    });
+  });
+
+/** Waits until a form half filled in has come to rest on the phone, with `text` in it. */
+export const waitUntilDrafted = (page: Page, text: string) =>
+  expect
+    .poll(() =>
+      page.evaluate(async () => {
+        const { name } = (await indexedDB.databases()).find((one) =>
+          one.name?.startsWith("sumpless-logbook-"),
+        )!;
+        const opened = <T>(request: IDBRequest<T>) =>
+          new Promise<T>((resolve) => {
+            request.onsuccess = () => resolve(request.result);
+          });
+        const database = await opened(indexedDB.open(name!));
+        const drafts = database.transaction("drafts").objectStore("drafts").getAll();
+        const text = JSON.stringify(await opened(drafts));
+        database.close();
+        return text;
+      }),
+    )
+    .toContain(text);
+
 /** No violation of axe's rules on the page as it stands. */
 export async function expectAccessible(page: Page): Promise<void> {
   const { violations } = await new AxeBuilder({ page }).analyze();

@@ -2,21 +2,11 @@ import type { Page } from "@playwright/test";
 import { subDays } from "date-fns";
 import type { Summary } from "../../shared/schemas/summary.ts";
 import { bikeEntry, checkEntry, newId } from "../helpers/make-entry.ts";
-import { expect, signIn, signUp, test, type Rider } from "./fixtures.ts";
+import { expect, signIn, signUp, test, waitUntilInstalled, type Rider } from "./fixtures.ts";
 
 const card = (page: Page, name: string) => page.getByRole("region", { name });
 const now = new Date();
 const baselineAt = subDays(now, 30);
-
-/** Waits until the service worker has everything that the app needs with no network. */
-const waitUntilInstalled = (page: Page) =>
-  page.evaluate(async () => {
-    await navigator.serviceWorker.ready;
-    if (navigator.serviceWorker.controller) return;
-    await new Promise((resolve) => {
-      navigator.serviceWorker.addEventListener("controllerchange", resolve, { once: true });
-    });
-  });
 
 async function addBike(page: Page, name: string): Promise<void> {
   await page.getByRole("link", { name: "Add a bike" }).click();

@@ -9,7 +9,7 @@ import {
   signIn,
   withBaseline,
 } from "./check-scene.ts";
-import { expect, expectAccessible, test } from "./fixtures.ts";
+import { expect, expectAccessible, test, waitUntilDrafted } from "./fixtures.ts";
 import { bikeEntry, checkEntry, newId } from "../helpers/make-entry.ts";
 
 test("A rider who knows it saves a check with at most six taps and two numbers", async ({
@@ -66,6 +66,7 @@ test("A rider with a delivery low is told to stop, finds the cause and writes do
 
   await page.getByRole("checkbox", { name: /Oil level and tank vent/ }).check();
   await page.getByRole("checkbox", { name: /Pump replaced/ }).check();
+  await waitUntilDrafted(page, "renew");
   await page.reload();
   await expect(page.getByRole("checkbox", { name: /Pump replaced/ })).toBeChecked();
   await expect(page.getByRole("checkbox", { name: /Start a new baseline/ })).toBeChecked();

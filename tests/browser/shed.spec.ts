@@ -1,5 +1,13 @@
 import { bikeEntry, checkEntry, hoursEntry, newId } from "../helpers/make-entry.ts";
-import { expect, expectAccessible, Rider, signIn, signUp, test } from "./fixtures.ts";
+import {
+  expect,
+  expectAccessible,
+  Rider,
+  signIn,
+  signUp,
+  test,
+  waitUntilInstalled,
+} from "./fixtures.ts";
 import type { Page } from "@playwright/test";
 
 const card = (page: Page, name: string) => page.getByRole("region", { name });
@@ -107,6 +115,7 @@ test("A rider is told of unsent entries before signing out, and keeps them", asy
   await expect(card(page, "Moss")).toBeVisible();
   await page.goto("/account");
   await page.goto("/");
+  await waitUntilInstalled(page);
 
   await server.stop();
   await card(page, "Moss").getByRole("button", { name: "Log hours" }).click();
