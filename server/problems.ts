@@ -49,8 +49,10 @@ export const wrongShape = (error: z.ZodError) => wrongFields(errorsByField(error
 const DEAD_LINK = "This link was used already or has run out. Ask for a new one.";
 export const goneLink = () => problem(404, "dead-link", DEAD_LINK);
 export const deadLink = () => wrongFields({ token: DEAD_LINK }, DEAD_LINK);
-export const tooMany = () =>
-  problem(429, "too-many", "That was tried too often. Please wait a little.");
+export const tooMany = (retryAfterSeconds?: number) =>
+  problem(429, "too-many", "That was tried too often. Please wait a little.", {
+    ...(retryAfterSeconds !== undefined && { retryAfterSeconds }),
+  });
 export const failure = () =>
   problem(500, "failure", "Something went wrong on the server. Please try again later.");
 export const unavailable = (retryAfterSeconds: number) =>

@@ -1,3 +1,4 @@
+import { hoursToSeconds } from "date-fns";
 import type { ChangeEmail } from "../../shared/schemas/account.ts";
 import type { User } from "../../shared/schemas/auth.ts";
 import { createMailedTokenService } from "../auth/mailed-token.ts";
@@ -11,6 +12,9 @@ import {
 import { deadLink, emailTaken, tooMany, wrongFields } from "../problems.ts";
 import { confirmPassword, findUser, mailNews, type AccountParts } from "./account-parts.ts";
 import { shownUser } from "./shown-user.ts";
+
+/** Five unused links are there: the first of them may be a day from its end. */
+const LINKS_RETRY_SECONDS = hoursToSeconds(24);
 
 /** The address of an account: it counts once a link that was sent there has been followed. */
 export function createAccountEmail(parts: AccountParts) {
@@ -33,7 +37,7 @@ export function createAccountEmail(parts: AccountParts) {
 
   function sendVerificationAgain(userId: string): void {
     store.write(() => {
-      if (!sendVerification(findUser(parts, userId))) throw tooMany();
+      if (!sendVerification(findUser(parts, userId))) throw tooMany(LINKS_RETRY_SECONDS);
     });
   }
 
@@ -44,7 +48,7 @@ export function createAccountEmail(parts: AccountParts) {
     store.write(() => {
       if (isTaken(email, userId)) throw emailTaken();
       const issued = tokens.issue(userId, "change-email", email);
-      if (!issued) throw tooMany();
+      if (!issued) throw tooMany(LINKS_RETRY_SECONDS);
       const mail = { topic: "change-email", userId, goodUntil: issued.goodUntil } as const;
       const message = newEmailMessage(publicOrigin, issued.token);
       mailer.queue({ ...mail, to: email, message });
