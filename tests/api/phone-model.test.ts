@@ -8,6 +8,7 @@ import { expect, it } from "vitest";
 import type { WiredPhone } from "../helpers/phones/wired-phone.ts";
 import {
   createWorld,
+  end,
   perform,
   storesOf,
   type Step,
@@ -17,7 +18,16 @@ import {
 const device = fc.nat({ max: 2 });
 const pick = fc.nat({ max: 1_000 });
 const year = fc.constantFrom(1970, 2025, 2026, 2027, 2099);
-const network = fc.constantFrom("good", "no-request", "no-answer", "twice", "portal", "late");
+const network = fc.constantFrom(
+  "good",
+  "no-request",
+  "no-answer",
+  "twice",
+  "portal",
+  "late",
+  "overtaken",
+);
+const waiting = fc.constantFrom("request", "answer");
 /** Plain objects, so that a counterexample can be read. */
 const step = <T>(fields: { [K in keyof T]: fc.Arbitrary<T[K]> }) =>
   fc.record(fields, { noNullPrototype: true });
@@ -29,9 +39,12 @@ const anyStep: fc.Arbitrary<Step> = fc.oneof(
   { weight: 3, arbitrary: step({ does: does("strike"), device, year, pick }) },
   { weight: 10, arbitrary: step({ does: does("sync"), device, network }) },
   { weight: 2, arbitrary: step({ does: does("switch-account"), device }) },
+  { weight: 2, arbitrary: step({ does: does("reload"), device, waiting }) },
+  { weight: 1, arbitrary: step({ does: does("upgrade"), device }) },
   { weight: 1, arbitrary: step({ does: does("erase"), device, pick }) },
   { weight: 2, arbitrary: step({ does: does("back-up") }) },
   { weight: 1, arbitrary: step({ does: does("restore") }) },
+  { weight: 1, arbitrary: step({ does: does("upgrade-server") }) },
 );
 
 const rowsOf = async (phone: WiredPhone) => (await phone.open()).getAll("entries");
@@ -118,7 +131,7 @@ async function live(steps: Step[]): Promise<void> {
   await checkPromises(world);
   await checkAgreement(world);
   checkServer(world);
-  await world.server.stop();
+  await end(world);
 }
 
 it("keeps every promise about saving and sending", { timeout: 7_200_000 }, async () => {

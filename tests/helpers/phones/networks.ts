@@ -20,13 +20,17 @@ export const networks = {
   portal: () => Promise.resolve(portalPage()),
 } satisfies Record<string, Network>;
 
-/** Holds every answer back until `letThrough` is called. */
-export function lateNetwork(): { network: Network; letThrough: () => void } {
+/** Holds every request, or every answer, back until `letThrough` is called. */
+export function slowNetwork(holds: "request" | "answer"): {
+  network: Network;
+  letThrough: () => void;
+} {
   let letThrough: () => void = () => undefined;
   const gate = new Promise<void>((resolve) => (letThrough = resolve));
   const network: Network = async (input, init) => {
+    if (holds === "request") await gate;
     const answer = await fetch(input, init);
-    await gate;
+    if (holds === "answer") await gate;
     return answer;
   };
   return { network, letThrough };

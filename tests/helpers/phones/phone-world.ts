@@ -1,14 +1,17 @@
 /** Three phones, two riders and a server, and what they can do to each other. */
+import { rmSync } from "node:fs";
 import path from "node:path";
 import { backUpDatabase, backupsDir } from "../../../server/db/back-up-database.ts";
 import { eraseBike } from "../../../server/services/erase.ts";
 import { restoreDatabase } from "../../../server/services/restore-database.ts";
+import { rebuildSummaries } from "../../../server/services/summarise-bike.ts";
 import { ApiError, NoNetworkError } from "../../../src/offline/errors.ts";
+import type { BikeRow } from "../../../src/offline/logbook/database.ts";
 import type { NewEntry } from "../../../src/offline/types.ts";
 import { bikeEntry, checkEntry, hoursEntry, newId, noteEntry, strikeEntry } from "../make-entry.ts";
 import { signUpRider, type Rider } from "../rider.ts";
 import { startTestServer, type TestServer } from "../start-test-server.ts";
-import { lateNetwork, networks } from "./networks.ts";
+import { networks, slowNetwork } from "./networks.ts";
 import { wiredPhone, type WiredPhone } from "./wired-phone.ts";
 
 const DEVICES = 3;
@@ -17,11 +20,14 @@ export type Step =
   | { does: "register"; device: number; year: number }
   | { does: "write"; device: number; year: number; pick: number }
   | { does: "strike"; device: number; year: number; pick: number }
-  | { does: "sync"; device: number; network: keyof typeof networks | "late" }
+  | { does: "sync"; device: number; network: keyof typeof networks | "late" | "overtaken" }
+  | { does: "reload"; device: number; waiting: "request" | "answer" }
+  | { does: "upgrade"; device: number }
   | { does: "switch-account"; device: number }
   | { does: "erase"; device: number; pick: number }
   | { does: "back-up" }
-  | { does: "restore" };
+  | { does: "restore" }
+  | { does: "upgrade-server" };
 
 /** A phone as a thing: whoever is signed in, each account's store stays on it. */
 interface Device {
@@ -72,6 +78,13 @@ export async function createWorld(): Promise<World> {
 
 export const storesOf = ({ devices }: World): WiredPhone[] =>
   devices.flatMap(({ stores }) => stores);
+
+/** Nothing of a world is left behind, so that there is room for thousands. */
+export async function end(world: World): Promise<void> {
+  await world.server.stop();
+  rmSync(world.server.dataDir, { recursive: true });
+  for (const store of storesOf(world)) await store.discard();
+}
 
 function inHand(world: World, device: number): WiredPhone {
   const { stores, signedIn } = world.devices[device]!;
@@ -125,13 +138,32 @@ function bear(error: unknown): void {
   if (!(error instanceof NoNetworkError) && !(error instanceof ApiError)) throw error;
 }
 
-/** The first session's answer comes when another session has come and gone. */
-async function syncLate(phone: WiredPhone): Promise<void> {
-  const { network, letThrough } = lateNetwork();
+/** Another session comes and goes before the first one's request has arrived, or its answer. */
+async function syncOvertaken(phone: WiredPhone, holds: "request" | "answer"): Promise<void> {
+  const { network, letThrough } = slowNetwork(holds);
   const first = phone.sync(network).catch(bear);
   await phone.sync().catch(bear);
   letThrough();
   await first;
+}
+
+/** The page goes while it sends; its request still arrives, and the answer finds nobody. */
+async function reload(phone: WiredPhone, waiting: "request" | "answer"): Promise<void> {
+  const { network, letThrough } = slowNetwork(waiting);
+  const first = phone.sync(network).catch(bear);
+  await phone.reload();
+  letThrough();
+  await first;
+}
+
+/** A newer build opens: what the one before made of the log, it can make nothing of. */
+async function upgrade(phone: WiredPhone): Promise<void> {
+  const database = await phone.open();
+  for (const { bikeId, access, rev, unsent } of await database.getAll("bikes")) {
+    const older = { bikeId, access, rev, unsent, format: 0, builtWith: "an earlier build" };
+    await database.put("bikes", older as BikeRow);
+  }
+  await phone.reload();
 }
 
 function erase(world: World, phone: WiredPhone, pick: number): void {
@@ -148,27 +180,41 @@ async function backUp(world: World): Promise<void> {
   await backUpDatabase(database.$client, world.backup);
 }
 
-async function restore(world: World): Promise<void> {
-  if (world.backup === null) return;
+/** The server is stopped, something is done to its files, and it starts again. */
+async function restart(world: World, meanwhile?: (dataDir: string) => Promise<unknown>) {
   const { dataDir } = world.server;
   await world.server.stop();
-  await restoreDatabase(dataDir, world.backup);
+  await meanwhile?.(dataDir);
   world.server = await startTestServer({ dataDir });
+}
+
+async function restore(world: World): Promise<void> {
+  const { backup } = world;
+  if (backup !== null) await restart(world, (dataDir) => restoreDatabase(dataDir, backup));
+}
+
+async function upgradeServer(world: World): Promise<void> {
+  await restart(world);
+  rebuildSummaries(world.server.store);
 }
 
 export async function perform(world: World, step: Step): Promise<void> {
   if (step.does === "back-up") return backUp(world);
   if (step.does === "restore") return restore(world);
+  if (step.does === "upgrade-server") return upgradeServer(world);
   const phone = inHand(world, step.device);
   if (step.does === "register") return register(world, phone, step.year);
   if (step.does === "write") return write(world, phone, step.pick, step.year);
   if (step.does === "strike") return strike(world, phone, step.pick, step.year);
   if (step.does === "erase") return erase(world, phone, step.pick);
+  if (step.does === "reload") return reload(phone, step.waiting);
+  if (step.does === "upgrade") return upgrade(phone);
   if (step.does === "switch-account") {
     const device = world.devices[step.device]!;
     device.signedIn = (device.signedIn + 1) % device.stores.length;
     return;
   }
-  if (step.network === "late") return syncLate(phone);
+  if (step.network === "late") return syncOvertaken(phone, "answer");
+  if (step.network === "overtaken") return syncOvertaken(phone, "request");
   await phone.sync(networks[step.network]).catch(bear);
 }

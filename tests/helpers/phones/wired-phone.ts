@@ -1,9 +1,12 @@
+import { deleteDB } from "idb";
 import { summarySchema } from "../../../shared/schemas/summary.ts";
 import { syncResponseSchema } from "../../../shared/schemas/sync.ts";
 import type { User } from "../../../shared/schemas/auth.ts";
 import { apiRequest } from "../../../src/offline/api-client.ts";
+import { openDatabase, type LogbookDatabase } from "../../../src/offline/logbook/database.ts";
 import { keepEntry } from "../../../src/offline/logbook/keep-entry.ts";
 import { readBike, readUnsent } from "../../../src/offline/logbook/read-bike.ts";
+import { rebuildBikes } from "../../../src/offline/logbook/rebuild-bikes.ts";
 import { runSyncSession } from "../../../src/offline/sync/sync-session.ts";
 import type { NewEntry } from "../../../src/offline/types.ts";
 import type { Served } from "../rider.ts";
@@ -35,9 +38,28 @@ const browserFetch =
 
 /** The phone's own store and sync over a real connection to a real server. */
 export function wiredPhone({ id, name, email }: User, wire: Wire) {
-  const phone = testPhone({ id, name, email }, wire.device);
+  let connection: Promise<LogbookDatabase> | undefined;
+  let visit = 1;
+  const ignored = () => undefined;
+  const account = testPhone({ id, name, email }, wire.device);
+  const connect = () =>
+    openDatabase(account.databaseName, { blocking: ignored, terminated: ignored });
+  const phone = { ...account, open: () => (connection ??= connect()) };
+
+  async function close(): Promise<void> {
+    const closing = connection;
+    [connection, visit] = [undefined, visit + 1];
+    (await closing)?.close();
+  }
+
+  /** The page goes, whatever it waited for, and comes again as the app does when it is opened. */
+  async function reload(): Promise<void> {
+    await close();
+    await rebuildBikes(phone);
+  }
 
   async function sync(network = wire.network): Promise<void> {
+    const started = visit;
     await runSyncSession({
       phone,
       send: (body) =>
@@ -47,7 +69,7 @@ export function wiredPhone({ id, name, email }: User, wire: Wire) {
           schema: syncResponseSchema,
           fetch: browserFetch({ ...wire, ...(network && { network }) }),
         }),
-      isCurrent: () => true,
+      isCurrent: () => started === visit,
       onApplied: () => undefined,
     });
   }
@@ -55,6 +77,12 @@ export function wiredPhone({ id, name, email }: User, wire: Wire) {
   return {
     ...phone,
     sync,
+    reload,
+    /** The account's store is gone from the phone, as if it had never been there. */
+    async discard() {
+      await close();
+      await deleteDB(phone.databaseName);
+    },
     keep: (entry: NewEntry) => keepEntry(phone, entry, { signal: new AbortController().signal }),
     bike: (bikeId: string) => readBike(phone, bikeId),
     bikes: async () => (await phone.open()).getAll("bikes"),
