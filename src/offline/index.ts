@@ -25,6 +25,7 @@ export {
 } from "./hold-updates.ts";
 export { useBike, useBikes, useUnsent } from "./logbook-queries.ts";
 export { CHECK_FORM, isHoseMaybeOff, useOpenChecks, type OpenCheck } from "./open-checks.ts";
+export { isPassing } from "./logbook/refusals.ts";
 export { createReadCache, type ReadCache } from "./query-cache.ts";
 export { previewSummary, saveEntry, type SaveOptions } from "./save-entry.ts";
 export { storageHealth, useStorageHealth } from "./storage-health.ts";

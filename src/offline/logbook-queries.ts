@@ -22,7 +22,10 @@ export const useBike = (bikeId: string): UseQueryResult<BikeWithLog | null> =>
     return readBike(phone, bikeId);
   });
 
-/** Entries the server does not have yet, of all bikes, the oldest first; refused ones included. */
+/**
+ * Entries the server does not have yet, of all bikes, the oldest first. Refused ones are among them
+ * until they are struck or written anew.
+ */
 export const useUnsent = (): UseQueryResult<KeptEntry[]> =>
   useLogbookQuery(["unsent"], async (_, phone) => {
     const { readUnsent } = await import("./logbook/read-bike.ts");

@@ -3,6 +3,7 @@ import { useAccount } from "./account.ts";
 import { announce, onAnnouncement } from "./announcements.ts";
 import { useLogbookQuery } from "./logbook-query.ts";
 import type { LogbookDatabase } from "./logbook/database.ts";
+import { readWaiting } from "./logbook/refusals.ts";
 import type { SyncStatus } from "./types.ts";
 
 type Phase = SyncStatus["phase"];
@@ -21,14 +22,11 @@ export const reportPhase = (accountId: string, phase: Phase): void =>
   announce({ accountId, about: "phase", phase });
 
 async function readCounts(database: LogbookDatabase): Promise<Counts> {
-  const [unsent, sync] = await Promise.all([
-    database.getAllFromIndex("entries", "unsent"),
-    database.get("meta", "sync"),
-  ]);
+  const [waiting, sync] = await Promise.all([readWaiting(database), database.get("meta", "sync")]);
   return {
-    unsent: unsent.length,
-    refused: unsent.filter((row) => row.refusal).length,
-    oldestUnsentAt: unsent[0]?.unsentSince ?? null,
+    unsent: waiting.length,
+    refused: waiting.filter((row) => row.refusal).length,
+    oldestUnsentAt: waiting[0]?.unsentSince ?? null,
     lastSyncAt: sync?.lastSyncAt ?? null,
   };
 }

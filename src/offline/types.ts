@@ -54,7 +54,7 @@ export interface BikeRecord {
   lineUp: LineUpFacts;
   /** The advice that stands; null where nobody advised anything. */
   advice: AdviceNote | null;
-  /** Entries of this bike not yet sent, refused ones included. */
+  /** Entries of this bike not yet sent; of those refused for good, the ones not yet mended. */
   unsent: number;
 }
 
@@ -66,7 +66,7 @@ export interface BikeWithLog {
 
 export interface SyncStatus {
   phase: "idle" | "sending" | "offline" | "signed-out";
-  /** Entries not yet sent, refused ones included. */
+  /** Entries not yet sent; of those refused for good, the ones not yet mended. */
   unsent: number;
   refused: number;
   /** ISO instant the oldest unsent entry was saved at. */

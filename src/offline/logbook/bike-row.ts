@@ -10,7 +10,7 @@ import type { BikeAccess } from "../../../shared/schemas/sync.ts";
 import type { Account } from "../types.ts";
 import { BIKE_ROW_FORMAT, type BikeRow, type EntryRow } from "./database.ts";
 import { readEntry } from "./kept-entry.ts";
-import { isRefusedForGood } from "./refusals.ts";
+import { isRefusedForGood, waitingRows } from "./refusals.ts";
 
 /** This file's address holds a hash of the built code: another one means another judgement. */
 export const BUILD = import.meta.url;
@@ -61,7 +61,7 @@ export function makeBikeRow(standing: BikeStanding, rows: EntryRow[], account: A
     summary,
     lineUp: lineUpFacts(logbook, summary),
     advice: standingAdvice(heeded),
-    unsent: rows.filter((row) => row.unsentSince !== undefined).length,
+    unsent: waitingRows(rows).length,
     format: BIKE_ROW_FORMAT,
     builtWith: BUILD,
   };

@@ -3,6 +3,7 @@ import type { LogEntry } from "../../../shared/schemas/entry.ts";
 import type { BikeWithLog, KeptEntry } from "../types.ts";
 import { asKeptEntry } from "./kept-entry.ts";
 import type { Phone } from "./phone.ts";
+import { readWaiting } from "./refusals.ts";
 
 /** Only `at`, `receivedAt` and `id` are read, which every entry has, of whatever kind. */
 const newestFirst = (a: KeptEntry, b: KeptEntry) =>
@@ -19,6 +20,6 @@ export async function readBike(phone: Phone, bikeId: string): Promise<BikeWithLo
 }
 
 export async function readUnsent(phone: Phone): Promise<KeptEntry[]> {
-  const rows = await (await phone.open()).getAllFromIndex("entries", "unsent");
+  const rows = await readWaiting(await phone.open());
   return rows.map((row) => asKeptEntry(row, phone.account));
 }
