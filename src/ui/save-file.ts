@@ -1,3 +1,6 @@
+export const asJson = (content: unknown): Blob =>
+  new Blob([JSON.stringify(content, null, 2)], { type: "application/json" });
+
 /** Hands a file to the browser to be saved. */
 export function saveFile(content: Blob, name: string): void {
   const url = URL.createObjectURL(content);

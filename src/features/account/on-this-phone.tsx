@@ -1,17 +1,13 @@
 import {
   exportUnsent,
-  useBikes,
   useStorageHealth,
   useUnsent,
-  type KeptEntry,
   type StorageHealth,
 } from "../../offline/index.ts";
 import { Button } from "../../ui/button.tsx";
-import { EntryStateMark } from "../../ui/entry-state-mark.tsx";
 import { Fold } from "../../ui/fold.tsx";
-import { formatWhen } from "../../ui/format-when.ts";
-import { kindWords, refusalWords } from "../../ui/words.ts";
 import { saveFile } from "../../ui/save-file.ts";
+import { UnsentLine } from "./unsent-line.tsx";
 
 const healthWords: Record<StorageHealth, string> = {
   unasked:
@@ -48,25 +44,5 @@ export function OnThisPhone() {
         </>
       )}
     </section>
-  );
-}
-
-function UnsentLine({ kept }: { kept: KeptEntry }) {
-  const bike = useBikes().data?.find(({ bikeId }) => bikeId === kept.entry.bikeId);
-  const kind = kept.understood ? kindWords[kept.entry.kind] : "From a newer version of the app";
-  return (
-    <li className="py-2">
-      <p className="font-bold">
-        {bike?.details.name ? `${bike.details.name}: ` : ""}
-        {kind}
-      </p>
-      <p className="flex flex-wrap gap-x-3 text-soft">
-        {formatWhen(kept.entry.at)}
-        <EntryStateMark state={kept.state} />
-      </p>
-      {kept.state === "refused" && (
-        <p>{Object.values(kept.errors ?? {})[0] ?? refusalWords[kept.reason]}</p>
-      )}
-    </li>
   );
 }

@@ -5,7 +5,7 @@ import { ButtonLink } from "../../../ui/button-link.tsx";
 import { Button } from "../../../ui/button.tsx";
 import { Notice } from "../../../ui/notice.tsx";
 import { bikeDetailsPath, mendEntryPath } from "../../../ui/paths.ts";
-import { saveFile } from "../../../ui/save-file.ts";
+import { asJson, saveFile } from "../../../ui/save-file.ts";
 import { refusalWords } from "../../../ui/words.ts";
 
 interface Props {
@@ -30,7 +30,7 @@ export function RefusedEntry({ kept, reason }: Props) {
       )}
       <div className="flex flex-wrap gap-2">
         <WriteAnew kept={kept} reason={reason} />
-        <Button onClick={() => saveFile(asJson(kept), `entry-${kept.entry.id}.json`)}>
+        <Button onClick={() => saveFile(asJson(kept.entry), `entry-${kept.entry.id}.json`)}>
           Save as a file
         </Button>
       </div>
@@ -47,8 +47,4 @@ function WriteAnew({ kept: { understood, entry }, reason }: Props) {
   return (
     <ButtonLink to={mendEntryPath(entry.bikeId, entry.kind, entry.id)}>Write it anew</ButtonLink>
   );
-}
-
-function asJson({ entry }: KeptEntry): Blob {
-  return new Blob([JSON.stringify(entry, null, 2)], { type: "application/json" });
 }
