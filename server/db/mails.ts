@@ -1,4 +1,4 @@
-import { and, asc, eq, isNull, lt, lte, sql } from "drizzle-orm";
+import { and, asc, eq, isNotNull, isNull, lt, lte, ne, sql } from "drizzle-orm";
 import type { Letter } from "../mail/letter.ts";
 import type { Database } from "./open-database.ts";
 import { mails, type mailTopics } from "./schema.ts";
@@ -61,6 +61,17 @@ export function createMails(db: Database) {
         .delete(mails)
         .where(
           and(isNull(mails.userId), eq(mails.topic, "invitation"), eq(mails.occasion, inviteId)),
+        )
+        .run(),
+    /** What still waits to be sent about a bike, but for one occasion. */
+    withdrawAbout: (bikeId: string, topic: MailTopic, occasion: string) =>
+      db
+        .delete(mails)
+        .where(
+          and(
+            ...[eq(mails.bikeId, bikeId), eq(mails.topic, topic)],
+            ...[ne(mails.occasion, occasion), isNotNull(mails.nextAttemptAt)],
+          ),
         )
         .run(),
     removeAbout: (bikeId: string) => db.delete(mails).where(eq(mails.bikeId, bikeId)).run(),

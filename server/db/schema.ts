@@ -223,6 +223,7 @@ export const mailTopics = [
   "invitation",
   "due",
   "stop",
+  "stop-advice",
 ] as const;
 
 /**

@@ -41,13 +41,17 @@ export const dueMessage = ({
   });
 
 /** To the owner, or, naming the owner, to a mechanic of a club that the bike is shared with. */
+export interface AboutStop extends AboutBike {
+  ownerName: string | null;
+}
+
 export const stopMessage = ({
   bikeName,
   ownerName,
   authorName,
   ratio,
   ...about
-}: AboutBike & { ownerName: string | null; authorName: string; ratio: number | null }): Message => {
+}: AboutStop & { authorName: string; ratio: number | null }): Message => {
   const whose = ownerName === null ? bikeName : `${bikeName}, the bike of ${ownerName},`;
   const share = ratio === null ? "" : `, at ${Math.round(ratio * 100)} % of its baseline`;
   return compose({
@@ -63,3 +67,23 @@ export const stopMessage = ({
     ],
   });
 };
+
+/** Of a *stop* that somebody wrote, whatever was measured. */
+export const stopAdviceMessage = ({
+  bikeName,
+  ownerName,
+  authorName,
+  text,
+  ...about
+}: AboutStop & { authorName: string; text: string }): Message =>
+  compose({
+    ...about,
+    subject: `${bikeName}: stop advised`,
+    opening: [
+      `${authorName} advises to stop riding ${bikeName}${ownerName === null ? "" : `, the bike of ${ownerName}`}, and wrote:`,
+      text,
+      "This stands, whatever is measured, until a later note lifts it.",
+    ],
+    linkText: `Open ${bikeName}`,
+    closing: ["If you do not know why, ask whoever wrote it before the bike is ridden."],
+  });

@@ -1,11 +1,10 @@
 import { MAX_ENTRIES_PER_BIKE, type Entry } from "../../shared/schemas/entry.ts";
-import type { Summary } from "../../shared/schemas/summary.ts";
 import type { BikeAccess, SyncResult } from "../../shared/schemas/sync.ts";
 import type { Store } from "../db/store.ts";
 import { isSameEntry } from "./is-same-entry.ts";
 import { accessTo, mayStrike, mayWrite } from "./permissions.ts";
 import { readPushedEntry, type Refusal } from "./read-pushed-entry.ts";
-import { summariseBike } from "./summarise-bike.ts";
+import { summariseBike, type SummarisedBike } from "./summarise-bike.ts";
 
 type Outcome = "stored" | "duplicate" | Refusal;
 
@@ -67,7 +66,7 @@ export function pushEntries(
   store: Store,
   accountId: string,
   sent: readonly unknown[],
-  summarised: (summary: Summary) => void = () => undefined,
+  summarised: (bike: SummarisedBike) => void = () => undefined,
 ): SyncResult[] {
   if (sent.length === 0) return [];
   const pushed = sent.map((raw, index) => ({ index, ...readPushedEntry(raw) }));
@@ -86,8 +85,8 @@ export function pushEntries(
     for (const { index, entry } of [...registrations, ...others])
       outcomes.set(index, push.add(entry));
     for (const bikeId of push.touched) {
-      const summary = summariseBike(store, bikeId);
-      if (summary) summarised(summary);
+      const bike = summariseBike(store, bikeId);
+      if (bike) summarised(bike);
     }
     return pushed.map((one) =>
       answer(one.index, one.id, "refusal" in one ? one.refusal : outcomes.get(one.index)!),

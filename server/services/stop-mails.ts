@@ -1,16 +1,30 @@
 import { addDays, differenceInDays } from "date-fns";
 import { lastSession } from "../../shared/logbook/last-session.ts";
+import type { AdviceNote } from "../../shared/logbook/standing-advice.ts";
 import type { Summary } from "../../shared/schemas/summary.ts";
+import type { MailTopic } from "../db/mails.ts";
 import type { Store } from "../db/store.ts";
-import { stopMessage } from "../mail/bike-messages.ts";
+import { stopAdviceMessage, stopMessage, type AboutStop } from "../mail/bike-messages.ts";
+import type { Message } from "../mail/letter.ts";
 import { aboutBike } from "./about-bike.ts";
 import type { MailParts } from "./mail-parts.ts";
 
-/** A check copied from an old book is no news; nor is a mail that could not be sent for so long. */
+/** What was copied from an old book is no news; nor is a mail that could not be sent for so long. */
 const NEWS_DAYS = 7;
 
-/** Owner and mechanics who want such mails, but for the author of the entry that caused this one. */
-function readersOf(store: Store, bikeId: string, authorId: string) {
+interface StopNews {
+  bikeId: string;
+  bikeName: string;
+  topic: MailTopic;
+  /** Of the check, or of the note. */
+  entryId: string;
+  at: string;
+  /** Knows already, and is not written to. */
+  authorId: string;
+}
+
+/** Owner and mechanics who want such mails: those who may read the log, and its authors' names. */
+function readersOf(store: Store, { bikeId, authorId }: StopNews) {
   const ownerId = store.bikes.ownerOf(bikeId);
   const userIds = new Set([ownerId ?? "", ...store.bikeShares.mechanicsOf(bikeId)]);
   userIds.delete(authorId);
@@ -20,32 +34,57 @@ function readersOf(store: Store, bikeId: string, authorId: string) {
   });
 }
 
+function tell(parts: MailParts, news: StopNews, compose: (about: AboutStop) => Message): void {
+  const now = new Date();
+  if (differenceInDays(now, news.at) > NEWS_DAYS) return;
+  const { store, mailer } = parts;
+  const { bikeId, bikeName, topic, entryId } = news;
+  const ownerId = store.bikes.ownerOf(bikeId);
+  const ownerName = store.users.find(ownerId ?? "")?.name ?? null;
+  for (const { id: userId, email } of readersOf(store, news)) {
+    mailer.queue({
+      ...{ topic, userId, bikeId, to: email, occasion: entryId },
+      goodUntil: addDays(now, NEWS_DAYS).getTime(),
+      message: compose({
+        ...aboutBike(parts, { bikeId, bikeName, userId }, "stopMails"),
+        ownerName: userId === ownerId ? null : ownerName,
+      }),
+    });
+  }
+}
+
 /**
  * Tells owner and mechanics that a bike's delivery is judged *stop*, once for each session so
  * judged. To be called in the transaction that stores the entry which made it so.
  */
 export function mailStop(parts: MailParts, summary: Summary, authorId: string): void {
-  const { bikeId } = summary;
+  const { bikeId, name: bikeName, action } = summary;
   const session = lastSession(summary);
   const [first, last] = [session[0], session.at(-1)];
-  if (summary.action !== "stop" || !first || !last) return;
-  const now = new Date();
-  if (differenceInDays(now, last.at) > NEWS_DAYS) return;
+  if (action !== "stop" || !first || !last) return;
+  const authorName = parts.store.users.find(authorId)?.name ?? "";
+  const check = { topic: "stop", entryId: first.entryId, at: last.at } as const;
+  tell(parts, { bikeId, bikeName, authorId, ...check }, (about) =>
+    stopMessage({ ...about, authorName, ratio: last.ratio }),
+  );
+}
 
-  const { store, mailer } = parts;
-  const ownerId = store.bikes.ownerOf(bikeId);
-  const ownerName = store.users.find(ownerId ?? "")?.name ?? null;
-  const authorName = store.users.find(authorId)?.name ?? "";
-  for (const { id: userId, email } of readersOf(store, bikeId, authorId)) {
-    mailer.queue({
-      ...{ topic: "stop", userId, bikeId, to: email, occasion: first.entryId },
-      goodUntil: addDays(now, NEWS_DAYS).getTime(),
-      message: stopMessage({
-        ...aboutBike(parts, { bikeId, bikeName: summary.name, userId }, "stopMails"),
-        ownerName: userId === ownerId ? null : ownerName,
-        authorName,
-        ratio: last.ratio,
-      }),
-    });
-  }
+/**
+ * Tells owner and mechanics of a *stop* that somebody wrote, once for each note. What still waits to
+ * be sent of one that was struck or lifted is not sent. To be called as `mailStop` is.
+ */
+export function mailStopAdvice(
+  parts: MailParts,
+  { bikeId, name: bikeName }: Summary,
+  advice: AdviceNote | null,
+): void {
+  const topic = "stop-advice";
+  const stop = advice?.body.advice === "stop" ? advice : null;
+  parts.store.mails.withdrawAbout(bikeId, topic, stop?.id ?? "");
+  if (!stop?.author) return;
+  const { id: entryId, at, author, body } = stop;
+  const note = { topic, entryId, at, authorId: author.id } as const;
+  tell(parts, { bikeId, bikeName, ...note }, (about) =>
+    stopAdviceMessage({ ...about, authorName: author.name, text: body.text }),
+  );
 }

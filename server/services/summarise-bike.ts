@@ -1,15 +1,23 @@
 import { lineUpFacts } from "../../shared/logbook/line-up-facts.ts";
+import { standingAdvice, type AdviceNote } from "../../shared/logbook/standing-advice.ts";
+import { standingEntries } from "../../shared/logbook/standing-entries.ts";
 import { summariseLogbook } from "../../shared/logbook/summarise-logbook.ts";
 import { lineUpOrder } from "../../shared/schemas/club.ts";
 import type { LogEntry } from "../../shared/schemas/entry.ts";
 import type { Summary } from "../../shared/schemas/summary.ts";
 import type { Store } from "../db/store.ts";
 
+export interface SummarisedBike {
+  summary: Summary;
+  /** The advice that stands. */
+  advice: AdviceNote | null;
+}
+
 /**
  * Makes a bike's summary anew from its entries, and moves the bike on the Line-ups that show it.
  * To be called in the transaction that adds the entries.
  */
-export function summariseBike(store: Store, bikeId: string): Summary | null {
+export function summariseBike(store: Store, bikeId: string): SummarisedBike | null {
   const ownerId = store.bikes.ownerOf(bikeId);
   if (ownerId === undefined) return null;
   // Parsed when they were stored; a kind or version of a newer server is left out by the logbook.
@@ -35,7 +43,7 @@ export function summariseBike(store: Store, bikeId: string): Summary | null {
     store.bikeShares.place(bikeId, place);
     store.clubs.touchAllOf(bikeId);
   }
-  return summary;
+  return { summary, advice: standingAdvice(standingEntries(ownerId, entries).standing) };
 }
 
 /** A bike a transaction, so that a server at work is not held up. */

@@ -3,7 +3,7 @@ import { otherAccount } from "../problems.ts";
 import type { MailParts } from "./mail-parts.ts";
 import { pullEntries } from "./pull-entries.ts";
 import { pushEntries } from "./push-entries.ts";
-import { mailStop } from "./stop-mails.ts";
+import { mailStop, mailStopAdvice } from "./stop-mails.ts";
 
 /** Push, then pull: what was just stored comes back with its `rev`. */
 export function syncLogbooks(
@@ -12,9 +12,10 @@ export function syncLogbooks(
   request: SyncRequest,
 ): SyncResponse {
   if (request.account !== undefined && request.account !== accountId) throw otherAccount();
-  const results = pushEntries(parts.store, accountId, request.entries, (summary) =>
-    mailStop(parts, summary, accountId),
-  );
+  const results = pushEntries(parts.store, accountId, request.entries, ({ summary, advice }) => {
+    mailStop(parts, summary, accountId);
+    mailStopAdvice(parts, summary, advice);
+  });
   const { epoch, ...pulled } = pullEntries(parts.store, accountId, request);
   return { epoch, results, ...pulled };
 }

@@ -5,7 +5,7 @@ import { z } from "zod";
 export const remindersSchema = z.strictObject({
   /** A check due soon or overdue: at most one a week and bike. */
   dueMails: z.boolean("Say whether to send them."),
-  /** A pump judged *stop*, on one's own bike or, to a mechanic, on one shared with the club. */
+  /** *Stop*, judged or advised, on one's own bike or, to a mechanic, on one shared with the club. */
   stopMails: z.boolean("Say whether to send them."),
 });
 export const remindersResponseSchema = z.object({ reminders: remindersSchema });

@@ -2,7 +2,14 @@ import { subDays } from "date-fns";
 import { describe, expect, it } from "vitest";
 import { clubOfFour, giveRoles, share, withdraw } from "../helpers/club.ts";
 import { linkIn, startMailServer } from "../helpers/mail-server.ts";
-import { checkEntry, hoursEntry, newId, bikeEntry, noteEntry } from "../helpers/make-entry.ts";
+import {
+  bikeEntry,
+  checkEntry,
+  hoursEntry,
+  newId,
+  noteEntry,
+  strikeEntry,
+} from "../helpers/make-entry.ts";
 import { PASSWORD, type Rider } from "../helpers/rider.ts";
 import { startTestServer } from "../helpers/start-test-server.ts";
 
@@ -24,8 +31,13 @@ async function clubThatIsMailed() {
     await server.mailer.sendDue();
     return mail.about("Fern: delivery low").flatMap(({ to }) => to).sort(); // prettier-ignore
   };
+  /** Who was mailed that somebody advises to stop riding Fern. */
+  const advised = async () => {
+    await server.mailer.sendDue();
+    return mail.about("Fern: stop advised").flatMap(({ to }) => to).sort(); // prettier-ignore
+  };
   const findLow = (who: Rider, days = 0) => who.sync([checkEntry(bikeId, 32, 2.4, daysAgo(days))]);
-  return { ...four, server, mail, bikeId, told, findLow };
+  return { ...four, server, mail, bikeId, told, advised, findLow };
 }
 
 const emails = (...riders: Rider[]) => riders.map(({ user }) => user.email).sort();
@@ -105,5 +117,95 @@ describe("a delivery judged low", () => {
     await mechanic.phone.delete("/api/account").send({ password: PASSWORD }).expect(204);
     const left = server.database.$client.prepare("SELECT count(*) FROM mails WHERE topic = 'stop'");
     expect(left.pluck().get()).toBe(0);
+  });
+});
+
+describe("a stop that somebody wrote", () => {
+  const advice = (bikeId: string, words: "ride" | "stop" = "stop", days = 0) => ({
+    ...noteEntry(bikeId, "Hose is <cracked> at the clip", words),
+    at: daysAgo(days),
+  });
+
+  it("is told to the owner and the other mechanics, with its words, and not to its author", async () => {
+    const { organiser, mechanic, owner, member, club, mail, bikeId, advised } =
+      await clubThatIsMailed();
+    await giveRoles(organiser, club.id, member, { mechanic: true }).expect(200);
+    await mechanic.sync([advice(bikeId)]);
+    expect(await advised()).toEqual(emails(owner, member));
+    const letters = mail.about("Fern: stop advised");
+    const toOwner = letters.find(({ to }) => to.includes(owner.user.email))!;
+    const toMember = letters.find((letter) => letter !== toOwner)!;
+    expect(toOwner.words).toContain("Mick advises to stop riding Fern, and wrote:");
+    expect(toMember.words).toContain("Mick advises to stop riding Fern, the bike of Ann, and");
+    for (const letter of letters) {
+      expect(letter.words).toContain("Hose is <cracked> at the clip");
+      expect(letter.html).toContain("Hose is &lt;cracked&gt; at the clip");
+      expect(linkIn(letter, "/bikes/")).toBe(`/bikes/${bikeId}`);
+      expect(letter.text).not.toContain("@");
+    }
+  });
+
+  it("is told once for each note, whatever else is written, and by whom", async () => {
+    const { owner, mechanic, bikeId, advised } = await clubThatIsMailed();
+    const note = advice(bikeId);
+    await mechanic.sync([note]);
+    expect(await advised()).toEqual(emails(owner));
+    await mechanic.sync([note, hoursEntry(bikeId, 13, daysAgo(0))]);
+    await owner.sync([checkEntry(bikeId, 14, 3, daysAgo(0))]);
+    expect(await advised()).toEqual(emails(owner));
+    await mechanic.sync([advice(bikeId)]);
+    expect(await advised()).toEqual(emails(owner, owner));
+  });
+
+  it("is told beside a delivery judged low, each for itself", async () => {
+    const { owner, mechanic, bikeId, findLow, told, advised } = await clubThatIsMailed();
+    await findLow(mechanic);
+    await mechanic.sync([advice(bikeId)]);
+    expect(await told()).toEqual(emails(owner));
+    expect(await advised()).toEqual(emails(owner));
+  });
+
+  it.each(["lifted", "struck"])("is not told where it was %s in the same call", async (how) => {
+    const { mechanic, bikeId, advised } = await clubThatIsMailed();
+    const note = advice(bikeId, "stop", 1);
+    const end = how === "lifted" ? advice(bikeId, "ride") : strikeEntry(bikeId, note.id);
+    await mechanic.sync([note, end]);
+    expect(await advised()).toEqual([]);
+  });
+
+  it.each(["lifted", "struck"])(
+    "is not told where it was %s before the mail could be sent, and again once it stands",
+    async (how) => {
+      const { mail, server, owner, mechanic, bikeId, advised } = await clubThatIsMailed();
+      mail.state.busy = true;
+      const note = advice(bikeId, "stop", 1);
+      await mechanic.sync([note]);
+      expect(await advised()).toEqual([]);
+      const end = how === "lifted" ? advice(bikeId, "ride") : strikeEntry(bikeId, note.id);
+      await owner.sync([end]);
+      mail.state.busy = false;
+      server.database.$client.exec("UPDATE mails SET next_attempt_at = 0 WHERE letter IS NOT NULL");
+      expect(await advised()).toEqual([]);
+      if (how === "lifted") await owner.sync([strikeEntry(bikeId, end.id)]);
+      else await mechanic.sync([advice(bikeId)]);
+      expect(await advised()).toEqual(emails(owner));
+    },
+  );
+
+  it("and copied from an old book, or another advice, is told to nobody", async () => {
+    const { mechanic, owner, bikeId, advised } = await clubThatIsMailed();
+    await owner.sync([advice(bikeId, "stop", 20)]);
+    await mechanic.sync([advice(bikeId, "ride")]);
+    expect(await advised()).toEqual([]);
+  });
+
+  it("is told to nobody who does not want such mails, or may no longer see the bike", async () => {
+    const { owner, mechanic, club, bikeId, advised } = await clubThatIsMailed();
+    const wanted = { dueMails: true, stopMails: false };
+    await owner.phone.put("/api/account/reminders").send(wanted).expect(200);
+    await mechanic.sync([advice(bikeId)]);
+    await withdraw(owner, bikeId, club.id);
+    await owner.sync([advice(bikeId)]);
+    expect(await advised()).toEqual([]);
   });
 });

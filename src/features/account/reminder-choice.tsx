@@ -42,7 +42,7 @@ function Ticks({ reminders }: { reminders: Reminders }) {
         Before it is due, and while it is overdue; at most one a week for each bike.
       </ReminderTick>
       <ReminderTick change={{ ...reminders, stopMails: !stopMails }} checked={stopMails}>
-        <strong className="block">A pump is found low</strong>
+        <strong className="block">A pump is found low, or a stop is advised</strong>
         At once: on your own bikes, and on those of your clubs where you are a mechanic.
       </ReminderTick>
     </>
