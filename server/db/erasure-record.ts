@@ -10,6 +10,7 @@ const erasureSchema = z.strictObject({
   /** What was taken back rather than erased; it may have been given again since. */
   clubIds: z.array(z.string()).optional(),
   members: z.array(z.strictObject({ clubId: z.string(), userId: z.string() })).optional(),
+  invites: z.array(z.strictObject({ clubId: z.string(), inviteId: z.string() })).optional(),
   shares: z.array(z.strictObject({ clubId: z.string(), bikeId: z.string() })).optional(),
 });
 export type Erasure = z.infer<typeof erasureSchema>;

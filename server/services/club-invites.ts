@@ -10,6 +10,8 @@ import { goneLink, notFound } from "../problems.ts";
 import { shownClub } from "./clubs.ts";
 import type { MailParts } from "./mail-parts.ts";
 import { membershipAs } from "./permissions.ts";
+import { revokeInvite } from "./revoke-invites.ts";
+import { recordTakenBack } from "./take-back.ts";
 
 const shown = ({ id, email, usesLeft, createdAt, expiresAt }: InviteRow): Invite => ({
   ...{ id, email, usesLeft, createdAt, expiresAt },
@@ -20,7 +22,7 @@ const isGood = (invite: InviteRow | undefined): invite is InviteRow =>
 
 /** Links by which people join clubs: kept as hashes, good for so many, for so long, until revoked. */
 export function createClubInviteService({ store, mailer, publicOrigin }: MailParts) {
-  const { clubInvites, clubMembers, clubs, mails, write } = store;
+  const { clubInvites, clubMembers, clubs, write } = store;
 
   return {
     list(accountId: string, clubId: string): Invite[] {
@@ -57,12 +59,11 @@ export function createClubInviteService({ store, mailer, publicOrigin }: MailPar
         return { invite: shown(invite), url };
       }),
 
-    /** Its link leads nowhere from now on, and is not sent if it was not yet. */
     revoke(accountId: string, clubId: string, inviteId: string): void {
       write(() => {
         membershipAs(store, accountId, clubId, "organiser");
-        if (!clubInvites.remove(clubId, inviteId)) throw notFound();
-        mails.removeInvitation(inviteId);
+        if (!revokeInvite(store, clubId, inviteId)) throw notFound();
+        recordTakenBack(store, { invites: [{ clubId, inviteId }] });
       });
     },
 

@@ -3,6 +3,7 @@ import type { Store } from "../db/store.ts";
 import { lastOrganiser, notFound } from "../problems.ts";
 import { endMembership } from "./end-membership.ts";
 import { assertMayRemove, maySeeMember, membershipAs } from "./permissions.ts";
+import { revokeInvitesHeldBy } from "./revoke-invites.ts";
 import { recordTakenBack } from "./take-back.ts";
 
 /** The members of clubs, each for the account that asks. */
@@ -36,13 +37,21 @@ export function createClubMemberService(store: Store) {
         return member;
       }),
 
-    /** Removes a member, or lets one leave; what that member shared is shared no more. */
+    /**
+     * Removes a member, or lets one leave; what that member shared is shared no more. Whoever was
+     * removed cannot come back by a link that was open then.
+     */
     remove(accountId: string, clubId: string, userId: string): void {
       store.write(() => {
         assertMayRemove(store, accountId, clubId, userId);
         if (find(clubId, userId).organiser) assertOrganiserLeft(clubId, userId);
         endMembership(store, clubId, userId);
-        recordTakenBack(store, { members: [{ clubId, userId }] });
+        const left = accountId === userId;
+        const inviteIds = left ? [] : revokeInvitesHeldBy(store, clubId, userId);
+        recordTakenBack(store, {
+          members: [{ clubId, userId }],
+          invites: inviteIds.map((inviteId) => ({ clubId, inviteId })),
+        });
       });
     },
   };

@@ -1,8 +1,9 @@
 import type { Erasure } from "../db/erasure-record.ts";
 import type { Store } from "../db/store.ts";
 import { endClub, leaveClub } from "./end-membership.ts";
+import { revokeInvite } from "./revoke-invites.ts";
 
-type TakenBack = Pick<Erasure, "clubIds" | "members" | "shares">;
+type TakenBack = Pick<Erasure, "clubIds" | "members" | "invites" | "shares">;
 
 /** To be called last in the transaction: what cannot be written down is not taken back. */
 export function recordTakenBack(store: Store, taken: TakenBack): void {
@@ -14,7 +15,7 @@ export function recordTakenBack(store: Store, taken: TakenBack): void {
 
 /** After a restore: what was given before that moment, and is there again, is taken back again. */
 export function takeBackAgain(store: Store, erasure: Erasure): void {
-  const { erasedAt, clubIds = [], members = [], shares = [] } = erasure;
+  const { erasedAt, clubIds = [], members = [], invites = [], shares = [] } = erasure;
   for (const { bikeId, clubId } of shares) {
     const share = store.bikeShares.clubsOf(bikeId).find(({ id }) => id === clubId);
     if (!share || share.since > erasedAt) continue;
@@ -25,5 +26,6 @@ export function takeBackAgain(store: Store, erasure: Erasure): void {
     const member = store.clubMembers.membersOf(clubId).find(({ id }) => id === userId);
     if (member && member.joinedAt <= erasedAt) leaveClub(store, clubId, userId);
   }
+  for (const { clubId, inviteId } of invites) revokeInvite(store, clubId, inviteId);
   for (const clubId of clubIds) if (store.clubs.find(clubId)) endClub(store, clubId);
 }

@@ -119,3 +119,52 @@ describe("an invite", () => {
     expect(text()).not.toContain(token);
   });
 });
+
+describe("a member whom an organiser removed", () => {
+  async function clubAndRemoved() {
+    const { server, organiser, club } = await clubWithOrganiser();
+    const rider = await signUpRider(server, "Rex");
+    const open = await invite(organiser, club.id, { uses: 50 });
+    await join(rider, open.token);
+    const remove = ({ phone }: Rider) =>
+      phone.delete(`/api/clubs/${club.id}/members/${rider.user.id}`);
+    return { server, organiser, club, rider, open, remove };
+  }
+
+  it("cannot come back by any link that was open, be it under another name", async () => {
+    const { server, organiser, club, rider, open, remove } = await clubAndRemoved();
+    const email = rider.user.email.toUpperCase();
+    const made = [
+      open,
+      await invite(organiser, club.id),
+      await invite(organiser, club.id, { email }),
+      await invite(organiser, club.id, { email: "all@club.example", uses: 9 }),
+    ];
+    await remove(organiser).expect(204);
+    for (const { token } of made) {
+      await accept(rider, token).expect(404);
+      await expectDead(server, token);
+    }
+    expect(await invitesOf(organiser, club.id)).toEqual([]);
+  });
+
+  it("takes nobody else's invitation along", async () => {
+    const { server, organiser, club, remove } = await clubAndRemoved();
+    const { token } = await invite(organiser, club.id, { email: "friend@club.example" });
+    await remove(organiser).expect(204);
+    await join(await signUpRider(server), token);
+  });
+
+  it("is let in again by an invitation that is mailed afterwards", async () => {
+    const { organiser, club, rider, remove } = await clubAndRemoved();
+    await remove(organiser).expect(204);
+    const { token } = await invite(organiser, club.id, { email: rider.user.email });
+    await join(rider, token);
+  });
+
+  it("is another than one who left, to whom the links stay open", async () => {
+    const { rider, open, remove } = await clubAndRemoved();
+    await remove(rider).expect(204);
+    await join(rider, open.token);
+  });
+});

@@ -5,7 +5,7 @@ import { assertIntegrity, backUpDatabase, backupsDir } from "../../server/db/bac
 import { databaseFile } from "../../server/db/open-database.ts";
 import { restoreDatabase } from "../../server/services/restore-database.ts";
 import { rebuildSummaries } from "../../server/services/summarise-bike.ts";
-import { clubOfFour, giveRoles, lineUp, share, withdraw } from "../helpers/club.ts";
+import { clubOfFour, giveRoles, invite, join, lineUp, share, withdraw } from "../helpers/club.ts";
 import { bikeEntry, hoursEntry, newId, noteEntry, smallLog } from "../helpers/make-entry.ts";
 import { PASSWORD, signInRider, signUpRider } from "../helpers/rider.ts";
 import { startTestServer, temporaryDir, type TestServer } from "../helpers/start-test-server.ts";
@@ -129,6 +129,23 @@ describe("a restored club", () => {
     const restored = await restoreAndStart(server, await backUp(server));
     const mick = await signInRider(restored, mechanic.user.email);
     expect((await lineUp(mick, club.id)).bikes).toHaveLength(1);
+  });
+
+  it("does not open again a link that was revoked since the backup", async () => {
+    const server = await startTestServer();
+    const { organiser, member, club, invited } = await clubOfFour(server);
+    const other = await invite(organiser, club.id);
+    const kept = await invite(organiser, club.id, { email: "friend@club.example" });
+    const backup = await backUp(server);
+    const path = `/api/clubs/${club.id}`;
+    await organiser.phone.delete(`${path}/invites/${other.invite.id}`).expect(204);
+    await organiser.phone.delete(`${path}/members/${member.user.id}`).expect(204);
+
+    const restored = await restoreAndStart(server, backup);
+    const bob = await signInRider(restored, member.user.email);
+    await bob.phone.post(`/api/invites/${invited.token}/accept`).expect(404);
+    await bob.phone.post(`/api/invites/${other.token}/accept`).expect(404);
+    await join(await signUpRider(restored), kept.token);
   });
 
   it("that was closed since the backup is closed", async () => {

@@ -27,6 +27,10 @@ export function RemoveMember({ club, member, onRemoved }: Props) {
             The bikes of {member.name} leave the Line-up. What was logged on them stays in their
             logs.
           </p>
+          <p>
+            The club’s open links end, so that {member.name} cannot come back by one of them: make
+            new ones for others. An invitation mailed to one other person alone stays good.
+          </p>
           {problem && <Notice tone="error" title={problem} />}
           <Button look="danger" wide disabled={busy} onClick={() => void submit()}>
             Remove {member.name}
