@@ -53,10 +53,12 @@ function Outcome({ bike, unsent }: { bike: QueuedBike; unsent: KeptEntry[] }) {
   const here = useBikes().data?.find(({ bikeId }) => bikeId === bike.bikeId);
   const check = here?.summary.checks.find(({ entryId }) => entryId === bike.entryId);
   const waiting = unsent.find(({ entry }) => entry.id === bike.entryId);
+  // Never *ride on* against what somebody wrote.
+  const action = here?.lineUp.stopAdvised ? "stop" : check?.action;
   return (
     <span className="flex flex-col items-end">
-      {check ? (
-        <strong className={actionInks[check.action]}>{actionWords[check.action]}</strong>
+      {check && action ? (
+        <strong className={actionInks[action]}>{actionWords[action]}</strong>
       ) : (
         here && <strong>Not counted</strong>
       )}
