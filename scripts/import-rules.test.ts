@@ -3,10 +3,10 @@ import path from "node:path";
 import { describe, expect, it } from "vitest";
 
 const root = path.resolve(import.meta.dirname, "..");
+const eslint = new ESLint({ cwd: root });
 
 /** The rules that stop `code` where it stands in for the file at `filePath`. */
 async function rulesAgainst(filePath: string, code: string): Promise<(string | null)[]> {
-  const eslint = new ESLint({ cwd: root });
   const [result] = await eslint.lintText(code, { filePath: path.join(root, filePath) });
   return result?.messages.map((message) => message.ruleId) ?? [];
 }

@@ -52,8 +52,7 @@ async function nextStart() {
   return import("./account.ts");
 }
 
-const copyHolds = (text: string | null) =>
-  vi.waitFor(async () => expect(await readAccountCopy()).toBe(text));
+const copyHolds = (text: string | null) => expect.poll(() => readAccountCopy()).toBe(text);
 
 describe("the lasting copy of the account", () => {
   const bea = { ...ada, id: "b" };

@@ -72,7 +72,7 @@ describe("syncing while the page is open", () => {
     stop = startSyncing();
     await syncNow();
     await saveEntry(newBike("0193a000-0000-7000-8000-000000000001"));
-    await vi.waitFor(async () => expect(await unsentOf(account)).toBe(0));
+    await expect.poll(() => unsentOf(account)).toBe(0);
     expect(sent.at(-1)).toMatchObject({ account: account.id, entries: [{ kind: "bike" }] });
   });
 
@@ -82,7 +82,7 @@ describe("syncing while the page is open", () => {
     await saveEntry(newBike("0193a000-0000-7000-8000-000000000002"));
     held = [];
     stop = startSyncing();
-    await vi.waitFor(() => expect(held).toHaveLength(1));
+    await expect.poll(() => held).toHaveLength(1);
     const [answerFirst] = held;
     held = null;
     rememberAccount(second);
@@ -96,7 +96,7 @@ describe("syncing while the page is open", () => {
     ]);
 
     rememberAccount(first);
-    await vi.waitFor(async () => expect(await unsentOf(first)).toBe(0));
+    await expect.poll(() => unsentOf(first)).toBe(0);
   });
 
   it("does nothing once ended", async () => {
