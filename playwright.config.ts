@@ -6,9 +6,9 @@ export default defineConfig({
   outputDir: "test-results",
   fullyParallel: true,
   workers: 2,
-  timeout: 120_000,
   // A machine under load is slow, not wrong.
-  expect: { timeout: 20_000 },
+  timeout: 300_000,
+  expect: { timeout: 60_000 },
   forbidOnly: true,
   reporter: process.env.PLAYWRIGHT_JSON_OUTPUT_FILE ? [["line"], ["json"]] : [["list"]],
   use: {

@@ -1,7 +1,18 @@
 import type { Page } from "@playwright/test";
 import { readFile } from "node:fs/promises";
 import { bikeEntry, checkEntry, newId } from "../helpers/make-entry.ts";
-import { expect, expectAccessible, Rider, signIn, signUp, test } from "./fixtures.ts";
+import {
+  expect,
+  expectAccessible,
+  expectNoSidewaysScroll,
+  openAs,
+  Rider,
+  setLetters,
+  signIn,
+  signUp,
+  test,
+  testAlone,
+} from "./fixtures.ts";
 import { mailedLink } from "./mailed-link.ts";
 
 const NEW_PASSWORD = "another pump altogether";
@@ -22,37 +33,36 @@ async function saved(page: Page, button: string) {
   return { name: file.suggestedFilename(), text: await readFile(await file.path(), "utf8") };
 }
 
-test("A rider can confirm an address, and then move to another one", async ({
-  page,
-  rider,
-  server,
-}) => {
-  await signUp(page, rider.email);
-  await page.getByRole("link", { name: "Account" }).click();
-  await expect(page.getByText("not confirmed yet")).toBeVisible();
-  await page.getByRole("button", { name: "Send the link again" }).click();
-  await expect(page.getByText("A link is on its way")).toBeVisible();
-  await page.goto(await mailedLink(server, "Confirm your e-mail address"));
-  await page.getByRole("button", { name: "Yes, this is my address" }).click();
-  await expect(page.getByText("Confirmed, thank you")).toBeVisible();
+testAlone(
+  "A rider can confirm an address, and then move to another one",
+  async ({ page, rider, server }) => {
+    await signUp(page, rider.email);
+    await page.getByRole("link", { name: "Account" }).click();
+    await expect(page.getByText("not confirmed yet")).toBeVisible();
+    await page.getByRole("button", { name: "Send the link again" }).click();
+    await expect(page.getByText("A link is on its way")).toBeVisible();
+    await page.goto(await mailedLink(server, "Confirm your e-mail address"));
+    await page.getByRole("button", { name: "Yes, this is my address" }).click();
+    await expect(page.getByText("Confirmed, thank you")).toBeVisible();
 
-  await open(page, "Change the e-mail address");
-  await page.getByLabel("New e-mail").fill("wren@fell.example");
-  await password(page, "Your password").fill("not this one");
-  await page.getByRole("button", { name: "Send a link" }).click();
-  await expect(password(page, "Your password")).toHaveAccessibleDescription(/not your password/);
-  await password(page, "Your password").fill(Rider.password);
-  await page.getByRole("button", { name: "Send a link" }).click();
-  await expect(page.getByRole("status").filter({ hasText: "Look in your mail" })).toBeVisible();
-  await expect(page.getByText(`Now it is ${rider.email}`)).toBeVisible();
+    await open(page, "Change the e-mail address");
+    await page.getByLabel("New e-mail").fill("wren@fell.example");
+    await password(page, "Your password").fill("not this one");
+    await page.getByRole("button", { name: "Send a link" }).click();
+    await expect(password(page, "Your password")).toHaveAccessibleDescription(/not your password/);
+    await password(page, "Your password").fill(Rider.password);
+    await page.getByRole("button", { name: "Send a link" }).click();
+    await expect(page.getByRole("status").filter({ hasText: "Look in your mail" })).toBeVisible();
+    await expect(page.getByText(`Now it is ${rider.email}`)).toBeVisible();
 
-  await page.goto(await mailedLink(server, "Confirm your new e-mail address"));
-  await page.getByRole("button", { name: "Yes, this is my address" }).click();
-  await expect(page.getByText("Confirmed, thank you")).toBeVisible();
-  await page.getByRole("link", { name: "Account" }).click();
-  await expect(page.getByText("wren@fell.example")).toBeVisible();
-  await expect(page.getByText("not confirmed yet")).toBeHidden();
-});
+    await page.goto(await mailedLink(server, "Confirm your new e-mail address"));
+    await page.getByRole("button", { name: "Yes, this is my address" }).click();
+    await expect(page.getByText("Confirmed, thank you")).toBeVisible();
+    await page.getByRole("link", { name: "Account" }).click();
+    await expect(page.getByText("wren@fell.example")).toBeVisible();
+    await expect(page.getByText("not confirmed yet")).toBeHidden();
+  },
+);
 
 test("A rider can choose another password, and is kept from one that anybody would try", async ({
   page,
@@ -79,7 +89,7 @@ test("A rider can choose another password, and is kept from one that anybody wou
   await expect(page.getByRole("listitem")).toHaveCount(1);
 });
 
-test("A rider can choose a new password by a mailed link", async ({ page, rider, server }) => {
+testAlone("A rider can choose a new password by a mailed link", async ({ page, rider, server }) => {
   await rider.signUp();
   await page.goto("/sign-in");
   await page.getByRole("link", { name: "I forgot my password" }).click();
@@ -121,7 +131,7 @@ test("A rider can take everything along as files", async ({ page, rider }) => {
   const bikeId = newId();
   await rider.signUp();
   await rider.push([bikeEntry(bikeId), checkEntry(bikeId, 12, 3)]);
-  await signIn(page, rider.email);
+  await openAs(rider, page);
   await open(page, "Take it along");
   const all = await saved(page, "Save everything");
   expect(all.name).toBe("sumpless.json");
@@ -182,25 +192,26 @@ test("A rider can leave a phone with nothing on it", async ({ page, rider }) => 
 const screens = ["", "/email", "/password", "/devices", "/data", "/delete"];
 
 for (const colorScheme of ["light", "dark"] as const)
-  for (const size of [
-    { width: 360, height: 780 },
-    { width: 1280, height: 800 },
-  ])
-    test(`A rider can read and reach all of the account in the ${colorScheme} theme at ${size.width} px`, async ({
-      page,
-      rider,
-    }) => {
-      await rider.signUp();
-      await page.setViewportSize(size);
-      await page.emulateMedia({ colorScheme });
-      await signIn(page, rider.email);
-      for (const screen of screens) {
-        await page.goto(`/account${screen}`);
-        await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
-        if (screen === "/devices") await expect(page.getByRole("listitem")).toHaveCount(2);
+  test(`A rider can read and reach all of the account in the ${colorScheme} theme at 360 px and at 1280 px`, async ({
+    page,
+    rider,
+  }) => {
+    await rider.signUp();
+    await page.emulateMedia({ colorScheme });
+    await rider.enterOn(page.context());
+    for (const screen of screens) {
+      await page.goto(`/account${screen}`);
+      await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
+      if (screen === "/devices") await expect(page.getByRole("listitem")).toHaveCount(2);
+      for (const size of [
+        { width: 360, height: 780 },
+        { width: 1280, height: 800 },
+      ]) {
+        await page.setViewportSize(size);
         await expectAccessible(page);
       }
-    });
+    }
+  });
 
 test("A rider can use the account's pages on a narrow phone with letters twice as large", async ({
   page,
@@ -208,15 +219,13 @@ test("A rider can use the account's pages on a narrow phone with letters twice a
 }) => {
   await rider.signUp();
   await page.setViewportSize({ width: 320, height: 640 });
-  await signIn(page, rider.email);
-  for (const screen of screens)
+  await rider.enterOn(page.context());
+  for (const screen of screens) {
+    await page.goto(`/account${screen}`);
+    await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
     for (const size of ["16px", "32px"]) {
-      await page.goto(`/account${screen}`);
-      await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
-      const beyond = await page.evaluate((fontSize) => {
-        document.documentElement.style.fontSize = fontSize;
-        return document.documentElement.scrollWidth - document.documentElement.clientWidth;
-      }, size);
-      expect(beyond, `${screen} at ${size}`).toBe(0);
+      await setLetters(page, size);
+      await expectNoSidewaysScroll(page, `${screen} at ${size}`);
     }
+  }
 });

@@ -3,18 +3,17 @@ import type { Page } from "@playwright/test";
 import type { LogEntry } from "../../shared/schemas/entry.ts";
 import { syncResponseSchema } from "../../shared/schemas/sync.ts";
 import { bikeEntry, checkEntry, newId } from "../helpers/make-entry.ts";
-import { expect, expectAccessible, Rider } from "./fixtures.ts";
+import {
+  expect,
+  expectAccessible,
+  expectNoSidewaysScroll,
+  openAs,
+  waitUntilDrafted,
+  type Rider,
+} from "./fixtures.ts";
 
 export const short = { seconds: 30, rhythm: "steady", nominalMl: 3 } as const;
 export const daysAgo = (days: number) => new Date(Date.now() - days * 86_400_000).toISOString();
-
-export async function signIn(page: Page, email: string): Promise<void> {
-  await page.goto("/sign-in");
-  await page.getByLabel("E-mail").fill(email);
-  await page.getByLabel("Password", { exact: true }).fill(Rider.password);
-  await page.getByRole("button", { name: "Sign in" }).click();
-  await expect(page).toHaveURL("/");
-}
 
 /** A bike whose sequence is known, with a baseline of 3 mL from four runs at 12.0 h. */
 export async function withBaseline(page: Page, rider: Rider): Promise<string> {
@@ -23,18 +22,19 @@ export async function withBaseline(page: Page, rider: Rider): Promise<string> {
   baseline.body.runs = Array.from({ length: 4 }, () => ({ startMl: 0, endMl: 3 }));
   await rider.signUp();
   await rider.push([bikeEntry(bikeId, { name: "Moss", sequence: short }), baseline]);
-  await signIn(page, rider.email);
+  await openAs(rider, page);
   await expect(page.getByRole("region", { name: "Moss" })).toBeVisible();
   return bikeId;
 }
 
-/** Everything the app needs is on the phone: from here on it works with the server gone. */
-export async function installed(page: Page): Promise<void> {
-  await page.evaluate(() => navigator.serviceWorker.ready);
-  await page.reload();
-  await expect
-    .poll(() => page.evaluate(() => navigator.serviceWorker.controller !== null))
-    .toBe(true);
+/**
+ * Stops the clock; the answer lets so many seconds pass. A run is then as long as the test says,
+ * however slow the machine is.
+ */
+export async function stopClock(page: Page) {
+  let nowMs = Date.now();
+  await page.clock.setFixedTime(nowMs);
+  return (seconds: number) => page.clock.setFixedTime((nowMs += 1000 * seconds));
 }
 
 export const button = (page: Page, name: string | RegExp) => page.getByRole("button", { name });
@@ -43,35 +43,50 @@ export const field = (page: Page, name: string) => page.getByRole("textbox", { n
 export const heading = (page: Page, name: string | RegExp) =>
   page.getByRole("heading", { name, level: 1 });
 
-export async function expectNoSidewaysScroll(page: Page): Promise<void> {
-  const [content = 0, screen = 0] = await page.evaluate(() => [
-    document.documentElement.scrollWidth,
-    window.innerWidth,
-  ]);
-  expect(content).toBeLessThanOrEqual(screen);
-}
-
-/** A step stands the same after the page is loaded anew, and axe finds nothing wrong with it. */
-export async function expectStep(page: Page, title: string | RegExp): Promise<void> {
+/**
+ * A step stands the same after the page is loaded anew, and axe finds nothing wrong with it.
+ * `drafted`: what was done last, as the phone's store has it.
+ */
+export async function expectStep(
+  page: Page,
+  title: string | RegExp,
+  drafted?: string,
+): Promise<void> {
   await expect(heading(page, title)).toBeVisible();
+  if (drafted) await waitUntilDrafted(page, drafted);
   await page.reload();
   await expect(heading(page, title)).toBeVisible();
   await expectAccessible(page);
   await expectNoSidewaysScroll(page);
 }
 
-/** One run of a known sequence: started, waited for and read. */
-export async function runAndRead(page: Page, startMl: string, endMl: string): Promise<void> {
-  await field(page, "Level before the run").fill(startMl);
+/** Starts a run, and sees it run. */
+export async function startRun(page: Page): Promise<void> {
   await button(page, /^Start$/).click();
-  await page.clock.runFor(61_000);
+  await expect(page.getByRole("timer")).toContainText(/^0/);
+}
+
+/** One run of a known sequence: started, waited for and read. */
+export async function runAndRead(
+  page: Page,
+  pass: (seconds: number) => Promise<void>,
+  startMl: string,
+  endMl: string,
+): Promise<void> {
+  await field(page, "Level before the run").fill(startMl);
+  await startRun(page);
+  await pass(61);
   await link(page, "Read the level").click();
   await field(page, "Level after the run").fill(endMl);
   await button(page, "That is the level").click();
 }
 
+/** Ticks all that makes the bike safe. */
 export async function closeOut(page: Page): Promise<void> {
-  for (const tick of await page.getByRole("checkbox").all()) await tick.check();
+  const ticks = page.getByRole("checkbox");
+  await expect(ticks).toHaveCount(5);
+  for (const tick of await ticks.all()) await tick.check();
+  await expect(page.getByRole("checkbox", { checked: true })).toHaveCount(5);
 }
 
 /** The entries of the rider's one bike, as the server has them. */

@@ -1,11 +1,10 @@
 import type { Browser, Page } from "@playwright/test";
 import type { Club } from "../../shared/schemas/club.ts";
-import { expect, Rider, signIn, type ProductServer } from "./fixtures.ts";
+import { expect, newEmail, openAs, Rider, waitUntilSent, type Served } from "./fixtures.ts";
 
 /** An account of the scene, by the name that others see. */
-export async function member(server: ProductServer, name: string): Promise<Rider> {
-  const rider = new Rider(server.origin, `${name.toLowerCase()}@moor.example`);
-  return rider.signUp(name);
+export async function member(server: Served, name: string): Promise<Rider> {
+  return new Rider(server.origin, newEmail(name.toLowerCase())).signUp(name);
 }
 
 async function answer<T>(response: Response): Promise<T> {
@@ -33,7 +32,7 @@ export async function share(rider: Rider, bikeId: string, club: Club): Promise<v
 }
 
 /** Somebody's own phone, apart from the test's first one. */
-export async function phoneOf(browser: Browser, server: ProductServer, rider: Rider) {
+export async function phoneOf(browser: Browser, server: Served, rider: Rider) {
   const context = await browser.newContext({
     baseURL: server.origin,
     viewport: { width: 360, height: 780 },
@@ -41,7 +40,7 @@ export async function phoneOf(browser: Browser, server: ProductServer, rider: Ri
     timezoneId: "Europe/Berlin",
   });
   const page = await context.newPage();
-  await signIn(page, rider.email);
+  await openAs(rider, page);
   return page;
 }
 
@@ -49,8 +48,8 @@ export async function phoneOf(browser: Browser, server: ProductServer, rider: Ri
 export async function exchange(page: Page): Promise<void> {
   const answered = page.waitForResponse((response) => response.url().endsWith("/api/sync"));
   await page.getByRole("button", { name: "Send and fetch now" }).click();
-  await answered;
-  await expect(page.getByRole("status").filter({ hasText: /^All sent/ })).toBeVisible();
+  expect((await answered).ok()).toBe(true);
+  await waitUntilSent(page);
 }
 
 /** The read cache is written a second behind: waits until it holds what the page shows. */

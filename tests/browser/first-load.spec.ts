@@ -1,7 +1,7 @@
 import { readFileSync } from "node:fs";
 import path from "node:path";
 import { gzipSync } from "node:zlib";
-import { expect, test } from "@playwright/test";
+import { expect, test } from "./fixtures.ts";
 
 const client = "dist/client";
 /** Gzipped, of all JavaScript that the first paint waits for. */

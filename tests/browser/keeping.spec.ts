@@ -3,8 +3,15 @@ import { mkdtemp, readlink, rm } from "node:fs/promises";
 import { tmpdir } from "node:os";
 import path from "node:path";
 import { hoursEntry } from "../helpers/make-entry.ts";
-import { expect, signUp, test } from "./fixtures.ts";
-import { installed } from "./open-bike.ts";
+import {
+  expect,
+  openAs,
+  signUp,
+  test,
+  testAlone,
+  waitUntilInstalled,
+  waitUntilSent,
+} from "./fixtures.ts";
 import {
   addBike,
   card,
@@ -17,9 +24,9 @@ import {
 } from "./write-notes.ts";
 
 const waiting = (page: Page, entries: number) =>
-  expect(page.getByText(new RegExp(`\\b${entries} (entry waits|entries wait) since`))).toBeVisible({
-    timeout: 15_000,
-  });
+  expect(
+    page.getByText(new RegExp(`\\b${entries} (entry waits|entries wait) since`)),
+  ).toBeVisible();
 
 /** The read cache's key; anything may happen to what stands there. */
 const cacheKey = (accountId: string) => `sumpless-read-${accountId}`;
@@ -81,63 +88,61 @@ async function logHoursAgain(page: Page): Promise<void> {
   await expect(page.getByRole("dialog")).toBeHidden();
 }
 
-test("A rider can write a hundred entries with no network, whatever befalls the phone, and all are sent once", async ({
-  page,
-  context,
-  rider,
-  server,
-}) => {
-  test.setTimeout(300_000);
-  await signUp(page, rider.email);
-  await rider.signIn();
-  const bike = await addBike(page, "Heather");
-  await rider.push([hoursEntry(bike.split("/").at(-1)!, 5)]);
-  await installed(page);
-  await page.goto("/clubs");
-  const key = cacheKey(rider.id);
-  await page.waitForFunction((key) => localStorage.getItem(key)?.includes("queries"), key);
-  await page.goto("/");
-  await page.getByRole("button", { name: "Log hours" }).click();
-  await expect(page.getByText(/^Last: 5/)).toBeVisible();
-  await server.stop();
+testAlone(
+  "A rider can write a hundred entries with no network, whatever befalls the phone, and all are sent once",
+  async ({ page, context, rider, server }) => {
+    await rider.signUp();
+    await openAs(rider, page);
+    const bike = await addBike(page, "Heather");
+    await waitUntilSent(page);
+    await rider.push([hoursEntry(bike.split("/").at(-1)!, 5)]);
+    await waitUntilInstalled(page);
+    await page.goto("/clubs");
+    const key = cacheKey(rider.id);
+    await page.waitForFunction((key) => localStorage.getItem(key)?.includes("queries"), key);
+    await page.goto("/");
+    await page.getByRole("button", { name: "Log hours" }).click();
+    await expect(page.getByText(/^Last: 5/)).toBeVisible();
+    await server.stop();
 
-  const tabs = [page, await context.newPage(), await context.newPage()];
-  await Promise.all(
-    tabs.map(async (tab) => {
-      await tab.goto("/");
-      for (let count = 0; count < 31; count += 1) await logHoursAgain(tab);
-    }),
-  );
-  for (const tab of tabs) await waiting(tab, 93);
+    const tabs = [page, await context.newPage(), await context.newPage()];
+    await Promise.all(
+      tabs.map(async (tab) => {
+        await tab.goto("/");
+        for (let count = 0; count < 31; count += 1) await logHoursAgain(tab);
+      }),
+    );
+    for (const tab of tabs) await waiting(tab, 93);
 
-  const notes: string[] = [];
-  const nextNote = () => notes[notes.push(`Note ${notes.length + 1}`) - 1]!;
-  for (const [how, harm] of Object.entries(harms))
-    await test.step(`the read cache is ${how}`, async () => {
-      await context.pages()[0]!.evaluate(harm, key);
-      const opened = await openAnew(context, bike);
-      await waiting(opened, 93 + notes.length);
-      await writeNote(opened, nextNote());
-    });
+    const notes: string[] = [];
+    const nextNote = () => notes[notes.push(`Note ${notes.length + 1}`) - 1]!;
+    for (const [how, harm] of Object.entries(harms))
+      await test.step(`the read cache is ${how}`, async () => {
+        await context.pages()[0]!.evaluate(harm, key);
+        const opened = await openAnew(context, bike);
+        await waiting(opened, 93 + notes.length);
+        await writeNote(opened, nextNote());
+      });
 
-  for (let count = 0; count < 3; count += 1)
-    await test.step("a tab dies right after saving", async () => {
-      const doomed = await openAnew(context, bike);
-      await fillNote(doomed, nextNote());
-      await killOnceSaved(context, doomed);
-      await waiting(await openAnew(context, bike), 93 + notes.length);
-    });
+    for (let count = 0; count < 3; count += 1)
+      await test.step("a tab dies right after saving", async () => {
+        const doomed = await openAnew(context, bike);
+        await fillNote(doomed, nextNote());
+        await killOnceSaved(context, doomed);
+        await waiting(await openAnew(context, bike), 93 + notes.length);
+      });
 
-  const opened = await openAnew(context, bike);
-  await waiting(opened, 100);
-  await server.start();
-  await sendNow(opened);
-  await expect(opened.getByText(/^All sent/)).toBeVisible({ timeout: 30_000 });
-  await expect(logLine(opened, notes.at(-1)!)).toContainText("Sent");
-  const entries = await entriesOnServer(rider);
-  expect(entries.flatMap(({ body }) => body.text ?? []).sort()).toEqual(notes);
-  expect(entries.filter(({ kind }) => kind === "hours")).toHaveLength(1 + 93);
-});
+    const opened = await openAnew(context, bike);
+    await waiting(opened, 100);
+    await server.start();
+    await sendNow(opened);
+    await waitUntilSent(opened);
+    await expect(logLine(opened, notes.at(-1)!)).toContainText("Sent");
+    const entries = await entriesOnServer(rider);
+    expect(entries.flatMap(({ body }) => body.text ?? []).sort()).toEqual(notes);
+    expect(entries.filter(({ kind }) => kind === "hours")).toHaveLength(1 + 93);
+  },
+);
 
 /** A browser with a disk of its own, which can be killed as by a flat battery. */
 async function openBrowser(profile: string, baseURL: string) {
@@ -155,23 +160,22 @@ async function openBrowser(profile: string, baseURL: string) {
   return { page: context.pages()[0]!, kill };
 }
 
-test("A rider whose browser dies right after signing up finds the entries again, with no network", async ({
-  rider,
-  server,
-}) => {
-  test.setTimeout(120_000);
-  const profile = await mkdtemp(path.join(tmpdir(), "sumpless-profile-"));
-  const first = await openBrowser(profile, server.origin);
-  await first.page.goto("/");
-  await installed(first.page);
-  await signUp(first.page, rider.email);
-  await server.stop();
-  await addBike(first.page, "Heather");
-  await first.kill();
+testAlone(
+  "A rider whose browser dies right after signing up finds the entries again, with no network",
+  async ({ rider, server }) => {
+    const profile = await mkdtemp(path.join(tmpdir(), "sumpless-profile-"));
+    const first = await openBrowser(profile, server.origin);
+    await first.page.goto("/");
+    await waitUntilInstalled(first.page);
+    await signUp(first.page, rider.email);
+    await server.stop();
+    await addBike(first.page, "Heather");
+    await first.kill();
 
-  const second = await openBrowser(profile, server.origin);
-  await second.page.goto("/");
-  await expect(card(second.page, "Heather")).toContainText("Saved on this phone");
-  await second.kill();
-  await rm(profile, { recursive: true, force: true, maxRetries: 5 });
-});
+    const second = await openBrowser(profile, server.origin);
+    await second.page.goto("/");
+    await expect(card(second.page, "Heather")).toContainText("Saved on this phone");
+    await second.kill();
+    await rm(profile, { recursive: true, force: true, maxRetries: 5 });
+  },
+);

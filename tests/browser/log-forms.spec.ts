@@ -1,7 +1,16 @@
 import type { Page } from "@playwright/test";
 import { logbook } from "../helpers/logbook-in-words.ts";
-import { expect, expectAccessible, test } from "./fixtures.ts";
-import { installed, logLines, openBike, overflow } from "./open-bike.ts";
+import {
+  expect,
+  expectAccessible,
+  expectNoSidewaysScroll,
+  setLetters,
+  test,
+  testAlone,
+  waitUntilInstalled,
+  waitUntilSent,
+} from "./fixtures.ts";
+import { logLines, openBike } from "./open-bike.ts";
 
 const moss = () => logbook().bike({ name: "Moss" }).check(12, [3]).hours(24.5);
 const write = (page: Page, what: string) =>
@@ -10,65 +19,67 @@ const hours = (page: Page, name: string | RegExp = "Engine hours") =>
   page.getByRole("textbox", { name });
 const save = (page: Page) => page.getByRole("button", { name: "Save", exact: true }).click();
 
-test("A rider can write every kind of entry with no network, and it is sent later", async ({
-  page,
-  rider,
-  server,
-}) => {
-  test.setTimeout(120_000);
-  await openBike(page, rider, moss());
-  await installed(page);
-  await server.stop();
+testAlone(
+  "A rider can write every kind of entry with no network, and it is sent later",
+  async ({ page, rider, server }) => {
+    await openBike(page, rider, moss());
+    await waitUntilInstalled(page);
+    await server.stop();
 
-  await write(page, "Hours").click();
-  await expect(hours(page)).toHaveValue("24.5");
-  await page.getByRole("button", { name: "Engine hours: more" }).click();
-  await page.getByLabel("Note").fill("A ride along the moor");
-  await save(page);
-  await expect(page.getByRole("main").getByRole("status").first()).toHaveText(
-    "Saved on this phone",
-  );
-  await expect(logLines(page).first()).toContainText(/Hours\s*24\.6\sh.*A ride along the moor/);
+    await write(page, "Hours").click();
+    await expect(hours(page)).toHaveValue("24.5");
+    await page.getByRole("button", { name: "Engine hours: more" }).click();
+    await page.getByLabel("Note").fill("A ride along the moor");
+    await save(page);
+    await expect(page.getByRole("main").getByRole("status").first()).toHaveText(
+      "Saved on this phone",
+    );
+    await expect(logLines(page).first()).toContainText(/Hours\s*24\.6\sh.*A ride along the moor/);
 
-  await write(page, "Top-up").click();
-  await page.getByRole("textbox", { name: "Oil added" }).fill("450");
-  await page.getByLabel("The oil tank is full now").check();
-  await page.getByRole("textbox", { name: "Fuel added" }).fill("8,5");
-  await save(page);
-  await expect(logLines(page).first()).toContainText(/Oil 450\smL, filled up · Fuel 8\.5\sL/);
+    await write(page, "Top-up").click();
+    await page.getByRole("textbox", { name: "Oil added" }).fill("450");
+    await page.getByLabel("The oil tank is full now").check();
+    await page.getByRole("textbox", { name: "Fuel added" }).fill("8,5");
+    await save(page);
+    await expect(logLines(page).first()).toContainText(/Oil 450\smL, filled up · Fuel 8\.5\sL/);
 
-  await write(page, "Note").click();
-  await page.getByLabel("What is worth keeping?").fill("Smokes when cold");
-  await save(page);
-  await expect(logLines(page).first()).toContainText("Smokes when cold");
+    await write(page, "Note").click();
+    await page.getByLabel("What is worth keeping?").fill("Smokes when cold");
+    await save(page);
+    await expect(logLines(page).first()).toContainText("Smokes when cold");
 
-  await write(page, "Meter change").click();
-  await expect(hours(page, /old meter/)).toHaveValue("24.6");
-  await hours(page, /old meter/).fill("24.7");
-  await hours(page, /new meter/).fill("0.5");
-  await save(page);
-  await expect(logLines(page).first()).toContainText(
-    /The old meter showed 24\.7\sh · The new one starts at 0\.5\sh/,
-  );
-  const now = page.getByRole("region", { name: "What to do now" });
-  await expect(now).toContainText(/Over the bike's life\s*24\.7\sh/);
+    await write(page, "Meter change").click();
+    await expect(hours(page, /old meter/)).toHaveValue("24.6");
+    await hours(page, /old meter/).fill("24.7");
+    await hours(page, /new meter/).fill("0.5");
+    await save(page);
+    await expect(logLines(page).first()).toContainText(
+      /The old meter showed 24\.7\sh · The new one starts at 0\.5\sh/,
+    );
+    const now = page.getByRole("region", { name: "What to do now" });
+    await expect(now).toContainText(/Over the bike's life\s*24\.7\sh/);
 
-  await write(page, "Work").click();
-  await page.getByLabel("Pump renewed").check();
-  await hours(page).fill("0.5");
-  await save(page);
-  await expect(logLines(page).first()).toContainText("Pump renewed · Starts a new baseline");
-  await expect(page.getByText("No check yet")).toBeVisible();
-  await expect(page.getByText(/^Offline · 5 entries wait since/)).toBeVisible();
+    await write(page, "Work").click();
+    await page.getByLabel("Pump renewed").check();
+    await hours(page).fill("0.5");
+    await save(page);
+    await expect(logLines(page).first()).toContainText("Pump renewed · Starts a new baseline");
+    await expect(page.getByText("No check yet")).toBeVisible();
+    await expect(page.getByText(/^Offline · 5 entries wait since/)).toBeVisible();
 
-  await server.start();
-  await page.getByRole("button", { name: "Send and fetch now" }).click();
-  await expect(page.getByText(/^All sent/)).toBeVisible();
-  await expect(logLines(page).first()).toContainText("Sent");
-  expect(await rider.bikes()).toMatchObject([
-    { verdict: "none", hours: { displayOffset: 24.2 }, series: [{}, { items: ["pump-renewed"] }] },
-  ]);
-});
+    await server.start();
+    await page.getByRole("button", { name: "Send and fetch now" }).click();
+    await waitUntilSent(page);
+    await expect(logLines(page).first()).toContainText("Sent");
+    expect(await rider.bikes()).toMatchObject([
+      {
+        verdict: "none",
+        hours: { displayOffset: 24.2 },
+        series: [{}, { items: ["pump-renewed"] }],
+      },
+    ]);
+  },
+);
 
 test("A new baseline is proposed where the delivery changes, and the rider decides", async ({
   page,
@@ -175,10 +186,8 @@ test("Every form can be read and reached", async ({ page, rider }) => {
     await expectAccessible(page);
     await page.setViewportSize({ width: 320, height: 640 });
     for (const size of ["16px", "32px"]) {
-      await page.evaluate((size) => {
-        document.documentElement.style.fontSize = size;
-      }, size);
-      expect(await overflow(page), `${kind}, ${size}`).toBeLessThanOrEqual(0);
+      await setLetters(page, size);
+      await expectNoSidewaysScroll(page, `${kind}, ${size}`);
     }
   }
 });

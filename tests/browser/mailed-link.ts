@@ -1,9 +1,9 @@
-import { expect, type ProductServer } from "./fixtures.ts";
+import { expect, type Served } from "./fixtures.ts";
 
 const links = (html: string) => [...html.matchAll(/href="([^"]+)"[^>]*>([^<]*)/g)];
 
 /** The link of the newest mail of this subject, as the server keeps it where no mail goes out. */
-export async function mailedLink({ origin }: ProductServer, subject: string): Promise<string> {
+export async function mailedLink({ origin }: Served, subject: string): Promise<string> {
   const read = async (pathname: string) => (await fetch(origin + pathname)).text();
   const newest = async () =>
     links(await read("/dev/mail")).find(([, , words]) => words!.includes(subject))?.[1];

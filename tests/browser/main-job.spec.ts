@@ -2,7 +2,18 @@ import type { Page } from "@playwright/test";
 import { subDays } from "date-fns";
 import type { Summary } from "../../shared/schemas/summary.ts";
 import { bikeEntry, checkEntry, newId } from "../helpers/make-entry.ts";
-import { expect, signIn, signUp, test, waitUntilInstalled, type Rider } from "./fixtures.ts";
+import {
+  expect,
+  openAs,
+  rowsOnPhone,
+  signIn,
+  signUp,
+  test,
+  testAlone,
+  waitUntilInstalled,
+  waitUntilSent,
+  type Rider,
+} from "./fixtures.ts";
 
 const card = (page: Page, name: string) => page.getByRole("region", { name });
 const now = new Date();
@@ -31,13 +42,19 @@ async function addSyringe(page: Page): Promise<void> {
 }
 
 /** The quick form from the Shed: one run, read from an empty 5 mL barrel with 0.2 mL marks. */
-async function check(page: Page, bike: string, hours: string, levelMl: string): Promise<void> {
+async function check(
+  page: Page,
+  bike: string,
+  hours: string,
+  levelMl: string,
+  { ownsSyringe = true } = {},
+): Promise<void> {
   await page.goto("/");
   await card(page, bike).getByRole("link", { name: "Delivery check" }).click();
   await page.getByRole("link", { name: /quick/i }).click();
   await page.getByRole("textbox", { name: "Engine hours" }).fill(hours);
   const syringe = page.getByLabel("Syringe", { exact: true });
-  if (!(await syringe.textContent())?.includes("5 mL")) await addSyringe(page);
+  if (!ownsSyringe) await addSyringe(page);
   await expect(syringe).toContainText(/5\smL.*0\.2\smL marks/);
   await page.getByRole("textbox", { name: "Run 1: level before" }).fill("0.0");
   await page.getByRole("textbox", { name: "Run 1: level after" }).fill(levelMl);
@@ -47,87 +64,73 @@ async function check(page: Page, bike: string, hours: string, levelMl: string): 
 }
 
 /** What the phone stored with the bike's log, and shows. */
-const summaryOnPhone = (page: Page, bikeId: string): Promise<Summary> =>
-  page.evaluate(async (id) => {
-    const databases = await indexedDB.databases();
-    const info = databases.find(({ name }) => name?.startsWith("sumpless-logbook-"));
-    const database = await new Promise<IDBDatabase>((resolve) => {
-      const opening = indexedDB.open(info!.name!);
-      opening.onsuccess = () => resolve(opening.result);
-    });
-    return new Promise<Summary>((resolve) => {
-      const reading = database.transaction("bikes").objectStore("bikes").get(id);
-      reading.onsuccess = () => {
-        database.close();
-        resolve((reading.result as { summary: Summary }).summary);
-      };
-    });
-  }, bikeId);
+const summaryOnPhone = async (page: Page, bikeId: string) =>
+  (await rowsOnPhone<{ bikeId: string; summary: Summary }>(page, "bikes")).find(
+    (row) => row.bikeId === bikeId,
+  )?.summary;
 
 const summaryOnServer = async (rider: Rider, bikeId: string) =>
   (await (await rider.call("GET", `/api/bikes/${bikeId}`)).json()) as Summary;
 
-test("A rider logs hours and a check with the server gone, and it is all there when it is back", async ({
-  page,
-  context,
-  rider,
-  server,
-}) => {
-  test.setTimeout(120_000);
-  await page.clock.setFixedTime(baselineAt);
-  await signUp(page, rider.email);
-  await addBike(page, "Moss");
-  await waitUntilInstalled(page);
-  await server.stop();
+testAlone(
+  "A rider logs hours and a check with the server gone, and it is all there when it is back",
+  async ({ page, context, rider, server }) => {
+    await page.clock.setFixedTime(baselineAt);
+    await signUp(page, rider.email);
+    await addBike(page, "Moss");
+    await waitUntilSent(page);
+    await waitUntilInstalled(page);
+    await server.stop();
 
-  await logHours(page, "Moss", "12.0");
-  await check(page, "Moss", "12.0", "3.0");
-  await expect(page.getByText("Saved on this phone")).toBeVisible();
-  await expect(page.getByText("Ride on")).toBeVisible();
-  await expect(page.getByText("Delivery settling")).toBeVisible();
+    await logHours(page, "Moss", "12.0");
+    await check(page, "Moss", "12.0", "3.0", { ownsSyringe: false });
+    await expect(page.getByText("Saved on this phone")).toBeVisible();
+    await expect(page.getByText("Ride on")).toBeVisible();
+    await expect(page.getByText("Delivery settling")).toBeVisible();
 
-  await page.goto("/");
-  await page.reload();
-  await expect(card(page, "Moss")).toContainText("20.0 h to the next check");
-  await expect(card(page, "Moss")).toContainText("Saved on this phone");
-  await card(page, "Moss").getByRole("link", { name: "Moss" }).click();
-  await expect(page.getByText("2.99 ± 0.20 mL")).toBeVisible();
-  await expect(page.getByText("Saved on this phone")).toHaveCount(2);
-  const bikeId = new URL(page.url()).pathname.split("/").at(-1)!;
+    await page.goto("/");
+    await page.reload();
+    await expect(card(page, "Moss")).toContainText("20.0 h to the next check");
+    await expect(card(page, "Moss")).toContainText("Saved on this phone");
+    await card(page, "Moss").getByRole("link", { name: "Moss" }).click();
+    await expect(page.getByText("2.99 ± 0.20 mL")).toBeVisible();
+    await expect(page.getByText("Saved on this phone")).toHaveCount(2);
+    const bikeId = new URL(page.url()).pathname.split("/").at(-1)!;
 
-  // Closed and opened again, still without a server: a new page of the same installed app.
-  await page.close();
-  const reopened = await context.newPage();
-  await reopened.clock.setFixedTime(now);
-  await reopened.goto("/");
-  await check(reopened, "Moss", "32.0", "2.5");
-  await expect(reopened.getByText("Stop, find the cause")).toBeVisible();
-  await expect(reopened.getByText("Delivery low")).toBeVisible();
+    // Closed and opened again, still without a server: a new page of the same installed app.
+    await page.close();
+    const reopened = await context.newPage();
+    await reopened.clock.setFixedTime(now);
+    await reopened.goto("/");
+    await check(reopened, "Moss", "32.0", "2.5");
+    await expect(reopened.getByText("Stop, find the cause")).toBeVisible();
+    await expect(reopened.getByText("Delivery low")).toBeVisible();
 
-  await server.start();
-  await reopened.goto("/");
-  await expect(reopened.getByText(/^All sent/)).toBeVisible({ timeout: 30_000 });
-  await rider.signIn();
-  const onServer = await summaryOnServer(rider, bikeId);
-  expect(onServer).toEqual(await summaryOnPhone(reopened, bikeId));
-  expect(onServer).toMatchObject({ verdict: "low", action: "stop", due: { inHours: 0 } });
-  expect(onServer.pLow).toBeCloseTo(0.65, 2);
+    await server.start();
+    await reopened.goto("/");
+    await expect(card(reopened, "Moss")).toBeVisible();
+    await waitUntilSent(reopened);
+    await rider.signIn();
+    const onServer = await summaryOnServer(rider, bikeId);
+    expect(onServer).toEqual(await summaryOnPhone(reopened, bikeId));
+    expect(onServer).toMatchObject({ verdict: "low", action: "stop", due: { inHours: 0 } });
+    expect(onServer.pLow).toBeCloseTo(0.65, 2);
 
-  // A second phone of the same rider shows the same.
-  const second = await context.browser()!.newContext({ baseURL: server.origin });
-  const secondPage = await second.newPage();
-  await signIn(secondPage, rider.email);
-  await expect(card(secondPage, "Moss")).toContainText("Stop, find the cause");
-  await card(secondPage, "Moss").getByRole("link", { name: "Moss" }).click();
-  await expect(secondPage.getByText("2.99 ± 0.20 mL").first()).toBeVisible();
-  await second.close();
-});
+    // A second phone of the same rider shows the same.
+    const second = await context.browser()!.newContext({ baseURL: server.origin });
+    const secondPage = await second.newPage();
+    await signIn(secondPage, rider.email);
+    await expect(card(secondPage, "Moss")).toContainText("Stop, find the cause");
+    await card(secondPage, "Moss").getByRole("link", { name: "Moss" }).click();
+    await expect(secondPage.getByText("2.99 ± 0.20 mL").first()).toBeVisible();
+    await second.close();
+  },
+);
 
 test("A rider is told what a second check means and when the next one falls due", async ({
   page,
   rider,
 }) => {
-  test.setTimeout(120_000);
   const cases = [
     { name: "Fern", levelMl: "2.7", action: "repeat", verdict: "dropping", pLow: 0.13, due: 32 },
     { name: "Reed", levelMl: "2.95", action: "ride", verdict: "holding", pLow: 0.0025, due: 52 },
@@ -144,7 +147,7 @@ test("A rider is told what a second check means and when the next one falls due"
       ];
     }),
   );
-  await signIn(page, rider.email);
+  await rider.enterOn(page.context());
   for (const { name, levelMl, action, verdict, pLow, due } of cases) {
     await check(page, name, "32.0", levelMl);
     await expect(
@@ -159,7 +162,8 @@ test("A rider is told what a second check means and when the next one falls due"
 });
 
 test("The app can be installed", async ({ page, rider }) => {
-  await signUp(page, rider.email);
+  await rider.signUp();
+  await openAs(rider, page);
   await waitUntilInstalled(page);
   const devtools = await page.context().newCDPSession(page);
   const { installabilityErrors } = await devtools.send("Page.getInstallabilityErrors");

@@ -6,10 +6,16 @@ import {
   field,
   heading,
   link,
-  signIn,
   withBaseline,
 } from "./check-scene.ts";
-import { expect, expectAccessible, test, waitUntilDrafted } from "./fixtures.ts";
+import {
+  expect,
+  expectAccessible,
+  openAs,
+  test,
+  waitUntilDrafted,
+  waitUntilSent,
+} from "./fixtures.ts";
 import { bikeEntry, checkEntry, newId } from "../helpers/make-entry.ts";
 
 test("A rider who knows it saves a check with at most six taps and two numbers", async ({
@@ -52,6 +58,7 @@ test("A rider with a delivery low is told to stop, finds the cause and writes do
   await expectAccessible(page);
   await button(page, "Save the check").click();
 
+  await expect(heading(page, "Result")).toBeVisible();
   await expect(page.getByText("Stop, find the cause")).toBeVisible();
   await expect(page.getByText("Delivery low", { exact: true })).toBeVisible();
   await expect(page.getByText(/sure the delivery is below the limit/)).toBeVisible();
@@ -73,7 +80,7 @@ test("A rider with a delivery low is told to stop, finds the cause and writes do
   await expectAccessible(page);
   await button(page, "Write it in the log").click();
   await expect(page.getByText("Written in the log: saved on this phone.")).toBeVisible();
-  await expect(page.getByText(/^All sent/)).toBeVisible();
+  await waitUntilSent(page);
   const work = (await entriesOnServer(rider)).at(-1);
   expect(work).toMatchObject({
     kind: "work",
@@ -95,6 +102,7 @@ test("A check saved with its close-out open is closed out later from the Shed", 
   await field(page, "Engine hours").fill("32");
   await field(page, "Run 1: level after").fill("3");
   await button(page, "Save the check").click();
+  await expect(heading(page, "Result")).toBeVisible();
   await expect(page.getByText("Hose may be off: do not start")).toBeVisible();
   await expect(page.getByText("Delivery holding")).toBeVisible();
   await expect(page.getByText("Ride on")).toBeHidden();
@@ -153,6 +161,8 @@ test("Every wrong field of the quick form is told by a sentence of its own", asy
   await field(page, "Run 1: level after").fill("9");
   await field(page, "Oil temperature").fill("");
   await expect(page.getByText("This level is far beyond the 5 mL barrel.")).toBeVisible();
+  await waitUntilDrafted(page, '"endText":"9"');
+  await waitUntilDrafted(page, '"oilTempText":""');
   await page.reload();
   await expect(field(page, "Run 1: level after")).toHaveValue("9");
   await field(page, "Run 1: level after").fill("3");
@@ -195,14 +205,13 @@ test("A bike with an hours-and-minutes meter takes 12:30 in the check", async ({
     bikeEntry(bikeId, { name: "Moss", meterFormat: "hh:mm" }),
     checkEntry(bikeId, 12, 3, daysAgo(9)),
   ]);
-  await signIn(page, rider.email);
-  await page.goto(`/bikes/${bikeId}/check/quick`);
+  await openAs(rider, page, `/bikes/${bikeId}/check/quick`);
   await expect(page.getByRole("textbox", { name: "Hours" })).toHaveValue("12");
   await page.getByRole("textbox", { name: "Minutes" }).fill("30");
   await field(page, "Run 1: level after").fill("3");
   await page.getByRole("checkbox", { name: /Closed out/ }).check();
   await button(page, "Save the check").click();
   await expect(page.getByText(/At 32:30/)).toBeVisible();
-  await expect(page.getByText(/^All sent/)).toBeVisible();
+  await waitUntilSent(page);
   expect((await entriesOnServer(rider)).at(-1)?.hours).toBe(12.5);
 });

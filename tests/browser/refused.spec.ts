@@ -1,7 +1,7 @@
 import { readFile } from "node:fs/promises";
 import { bikeEntry, newId, noteEntry } from "../helpers/make-entry.ts";
 import { clubOf, member, share } from "./club-scene.ts";
-import { expect, expectAccessible, signIn, test } from "./fixtures.ts";
+import { expect, expectAccessible, openAs, test, waitUntilSent } from "./fixtures.ts";
 import { putInStore } from "./open-bike.ts";
 import { logLine, saveNote, sendNow, writeNote } from "./write-notes.ts";
 
@@ -15,9 +15,9 @@ test("A mechanic can discard what a withdrawn bike no longer takes, and is asked
   await wren.push([bikeEntry(bikeId, { name: "Heather" })]);
   await share(wren, bikeId, club);
 
-  await signIn(page, odo.email);
-  await page.goto(`/bikes/${bikeId}`);
+  await openAs(odo, page, `/bikes/${bikeId}`);
   await expect(page.getByRole("heading", { name: "Heather" })).toBeVisible();
+  await waitUntilSent(page);
   await page.route("**/api/sync", (route) => route.abort());
   await writeNote(page, "Screen half blocked");
   await wren.call("DELETE", `/api/bikes/${bikeId}/shares/${club.id}`);
@@ -32,6 +32,7 @@ test("A mechanic can discard what a withdrawn bike no longer takes, and is asked
   await expect(line).toContainText("Its bike is no longer on this phone.");
   await line.getByRole("button", { name: "Discard" }).click();
   const question = page.getByRole("dialog", { name: "Discard this entry?" });
+  await expect(question).toBeVisible();
   await expectAccessible(page);
   const download = page.waitForEvent("download");
   await question.getByRole("button", { name: "Save it as a file" }).click();
@@ -59,8 +60,9 @@ test("A rider who writes a refused entry anew is told of it no more", async ({
   const bikeId = newId();
   await rider.signUp();
   await rider.push([bikeEntry(bikeId, { name: "Heather" })]);
-  await signIn(page, rider.email);
-  await page.goto(`/bikes/${bikeId}`);
+  await openAs(rider, page, `/bikes/${bikeId}`);
+  await expect(page.getByRole("heading", { name: "Heather" })).toBeVisible();
+  await waitUntilSent(page);
   await putInStore(page, { ...noteEntry(bikeId), id: taken.id });
   await sendNow(page);
   await expect(page.getByText(/1 not accepted/)).toBeVisible();

@@ -1,8 +1,8 @@
 import type { Page } from "@playwright/test";
 import type { Club } from "../../shared/schemas/club.ts";
 import { bikeEntry, checkEntry, newId, noteEntry, strikeEntry } from "../helpers/make-entry.ts";
-import { share } from "./club-scene.ts";
-import { expect, Rider, signIn, test } from "./fixtures.ts";
+import { exchange, share } from "./club-scene.ts";
+import { expect, openAs, Rider, test } from "./fixtures.ts";
 
 /** What somebody might type into a field, told apart by the field. */
 const markup = (field: string) => `"><img src=x onerror=alert(1)>${field}`;
@@ -38,7 +38,7 @@ function markedLog(bikeId: string): object[] {
 }
 
 test("Markup in any text that riders type is shown as the text it is", async ({ page, server }) => {
-  const rider = new Rider(server.origin, "rider@moor.example");
+  const rider = new Rider(server.origin);
   await rider.signUp(markup("rider"));
   const bikeId = newId();
   await rider.push(markedLog(bikeId));
@@ -50,7 +50,7 @@ test("Markup in any text that riders type is shown as the text it is", async ({ 
   const { url } = (await invited.json()) as { url: string };
 
   page.on("dialog", (dialog) => expect(dialog.message(), "a script has run").toBe(""));
-  await signIn(page, rider.email);
+  await rider.enterOn(page.context());
   const seen: string[] = [];
   const screens: [path: string, ...fields: string[]][] = [
     ["/", "bike"],
@@ -68,7 +68,7 @@ test("Markup in any text that riders type is shown as the text it is", async ({ 
     await page.goto(path);
     for (const field of fields)
       await expect.poll(() => textOf(page), `${field} on ${path}`).toContain(markup(field));
-    expect(await page.locator("img[src=x]").count(), path).toBe(0);
+    await expect(page.locator("img[src=x]"), path).toHaveCount(0);
     seen.push(...fields);
   }
   expect(new Set(seen).size).toBe(11);
@@ -82,7 +82,7 @@ test("A page of another site can neither frame the app nor send a form to it", a
   await rider.signUp();
   // A page of its own: what the browser says of the refused frame is no error of ours.
   const page = await browser.newPage({ baseURL: server.origin });
-  await signIn(page, rider.email);
+  await openAs(rider, page);
   const elsewhere = server.origin.replace("localhost", "127.0.0.1");
   await page.route(`${elsewhere}/trap`, (route) =>
     route.fulfill({
@@ -96,7 +96,6 @@ test("A page of another site can neither frame the app nor send a form to it", a
   await page.locator("form").evaluate((form: HTMLFormElement) => form.submit());
   await expect(page.getByText("not sent from the logbook's own address")).toBeVisible();
   await page.goto("/");
-  await page.getByRole("button", { name: "Send and fetch now" }).click();
-  await expect(page.getByText(/^All sent/)).toBeVisible();
+  await exchange(page);
   await page.context().close();
 });

@@ -2,11 +2,15 @@ import { bikeEntry, checkEntry, hoursEntry, newId } from "../helpers/make-entry.
 import {
   expect,
   expectAccessible,
+  expectNoSidewaysScroll,
+  openAs,
   Rider,
-  signIn,
+  setLetters,
   signUp,
   test,
+  testAlone,
   waitUntilInstalled,
+  waitUntilSent,
 } from "./fixtures.ts";
 import type { Page } from "@playwright/test";
 
@@ -30,7 +34,7 @@ test("A rider can add a bike and log its hours in two taps and a number", async 
   await page.keyboard.type("12,4");
   await page.getByRole("button", { name: "Save hours" }).click();
   await expect(page.getByRole("dialog")).toBeHidden();
-  await expect(page.getByText(/^All sent/)).toBeVisible();
+  await waitUntilSent(page);
 
   await heather.getByRole("button", { name: "Log hours" }).click();
   await expect(page.getByRole("textbox", { name: "Engine hours" })).toHaveValue("12.4");
@@ -53,7 +57,7 @@ test("A rider is told that a reading does not fit, saves it all the same and con
     checkEntry(bikeId, 12, 3, daysAgo(9)),
     hoursEntry(bikeId, 16, daysAgo(2)),
   ]);
-  await signIn(page, rider.email);
+  await openAs(rider, page);
   const moss = card(page, "Moss");
   await expect(moss).toContainText("16.0 h to the next check");
 
@@ -89,7 +93,7 @@ test("A rider sees the worst bike first, and a hose that may be off before all",
     },
     bikeEntry(newId(), { name: "Sold", retired: true }),
   ]);
-  await signIn(page, rider.email);
+  await openAs(rider, page);
   await expect(page.getByRole("heading", { level: 2 })).toHaveText(["Left open", "Low", "Sound"]);
   await expect(card(page, "Left open")).toContainText("Hose may be off: do not start");
   await expect(card(page, "Left open")).not.toContainText("Ride on");
@@ -103,44 +107,42 @@ test("A rider sees the worst bike first, and a hose that may be off before all",
   await expect(page.getByRole("link", { name: "Sold" })).toBeVisible();
 });
 
-test("A rider is told of unsent entries before signing out, and keeps them", async ({
-  page,
-  rider,
-  server,
-}) => {
-  const bikeId = newId();
-  await rider.signUp();
-  await rider.push([bikeEntry(bikeId), hoursEntry(bikeId, 3, daysAgo(2))]);
-  await signIn(page, rider.email);
-  await expect(card(page, "Moss")).toBeVisible();
-  await page.goto("/account");
-  await page.goto("/");
-  await waitUntilInstalled(page);
+testAlone(
+  "A rider is told of unsent entries before signing out, and keeps them",
+  async ({ page, rider, server }) => {
+    const bikeId = newId();
+    await rider.signUp();
+    await rider.push([bikeEntry(bikeId), hoursEntry(bikeId, 3, daysAgo(2))]);
+    await openAs(rider, page);
+    await expect(card(page, "Moss")).toBeVisible();
+    await waitUntilSent(page);
+    await waitUntilInstalled(page);
 
-  await server.stop();
-  await card(page, "Moss").getByRole("button", { name: "Log hours" }).click();
-  await page.getByRole("textbox", { name: "Engine hours" }).fill("5");
-  await page.getByRole("button", { name: "Save hours" }).click();
-  await expect(card(page, "Moss")).toContainText("Saved on this phone");
-  await expect(page.getByText(/^Offline · 1 entry waits since/)).toBeVisible();
+    await server.stop();
+    await card(page, "Moss").getByRole("button", { name: "Log hours" }).click();
+    await page.getByRole("textbox", { name: "Engine hours" }).fill("5");
+    await page.getByRole("button", { name: "Save hours" }).click();
+    await expect(card(page, "Moss")).toContainText("Saved on this phone");
+    await expect(page.getByText(/^Offline · 1 entry waits since/)).toBeVisible();
 
-  await page.getByRole("link", { name: "Account" }).click();
-  await page.getByRole("button", { name: "Sign out" }).click();
-  await expect(page.getByRole("dialog", { name: "1 entry is not sent yet" })).toBeVisible();
-  await page.getByRole("button", { name: "Sign out, keep them here" }).click();
-  await expect(page.getByRole("alert")).toContainText("Signing out needs the network");
+    await page.getByRole("link", { name: "Account" }).click();
+    await page.getByRole("button", { name: "Sign out" }).click();
+    await expect(page.getByRole("dialog", { name: "1 entry is not sent yet" })).toBeVisible();
+    await page.getByRole("button", { name: "Sign out, keep them here" }).click();
+    await expect(page.getByRole("alert")).toContainText("Signing out needs the network");
 
-  const download = page.waitForEvent("download");
-  await page.getByRole("button", { name: "Close" }).click();
-  await page.getByRole("button", { name: "Save these as a file" }).click();
-  expect((await download).suggestedFilename()).toMatch(/^sumpless-not-sent-.*\.json$/);
+    const download = page.waitForEvent("download");
+    await page.getByRole("button", { name: "Close" }).click();
+    await page.getByRole("button", { name: "Save these as a file" }).click();
+    expect((await download).suggestedFilename()).toMatch(/^sumpless-not-sent-.*\.json$/);
 
-  await server.start();
-  await page.getByRole("button", { name: "Send and fetch now" }).click();
-  await expect(page.getByText(/^All sent/)).toBeVisible();
-  await page.getByRole("button", { name: "Sign out" }).click();
-  await expect(page).toHaveURL("/sign-in");
-});
+    await server.start();
+    await page.getByRole("button", { name: "Send and fetch now" }).click();
+    await waitUntilSent(page);
+    await page.getByRole("button", { name: "Sign out" }).click();
+    await expect(page).toHaveURL("/sign-in");
+  },
+);
 
 test("A wrong password and a taken address are said, and what was typed is kept", async ({
   page,
@@ -178,8 +180,7 @@ for (const colorScheme of ["light", "dark"] as const)
       checkEntry(bikeId, 132.5, 2.7, daysAgo(9)),
     ]);
     await page.emulateMedia({ colorScheme });
-    await signIn(page, rider.email);
-    await expect(page.getByRole("region")).toBeVisible();
+    await rider.enterOn(page.context());
     for (const path of [
       "/",
       "/bikes/new",
@@ -191,6 +192,7 @@ for (const colorScheme of ["light", "dark"] as const)
     ]) {
       await page.goto(path);
       await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
+      if (path === "/") await expect(page.getByRole("region")).toBeVisible();
       await expectAccessible(page);
     }
   });
@@ -207,30 +209,29 @@ test("A rider can use a narrow phone and letters twice as large without scrollin
     hoursEntry(bikeId, 250, daysAgo(9)),
   ]);
   await page.setViewportSize({ width: 320, height: 640 });
-  await signIn(page, rider.email);
-  await expect(page.getByRole("region")).toBeVisible();
-  for (const path of ["/", "/bikes/new", "/account", "/sign-in", "/sign-up"])
+  await rider.enterOn(page.context());
+  for (const path of ["/", "/bikes/new", "/account", "/sign-in", "/sign-up"]) {
+    await page.goto(path);
+    await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
+    if (path === "/") await expect(page.getByRole("region")).toBeVisible();
     for (const size of ["16px", "32px"]) {
-      await page.goto(path);
-      await expect(page.getByRole("heading", { level: 1 })).toBeVisible();
-      const beyond = await page.evaluate((fontSize) => {
-        document.documentElement.style.fontSize = fontSize;
-        return document.documentElement.scrollWidth - document.documentElement.clientWidth;
-      }, size);
-      expect(beyond, `${path} at ${size}`).toBe(0);
+      await setLetters(page, size);
+      await expectNoSidewaysScroll(page, `${path} at ${size}`);
     }
+  }
 });
 
 test("A rider's choice of theme outlives a reload", async ({ page, rider }) => {
-  await signUp(page, rider.email);
+  await rider.signUp();
+  await openAs(rider, page);
   const ground = () =>
     page.evaluate(() => getComputedStyle(document.documentElement).backgroundColor);
   const light = await ground();
   await page.getByRole("link", { name: "Account" }).click();
   await page.getByText("Dark", { exact: true }).click();
+  await expect.poll(ground).not.toBe(light);
   const dark = await ground();
-  expect(dark).not.toBe(light);
   await page.reload();
   await expect(page.getByRole("radio", { name: "Dark" })).toBeChecked();
-  expect(await ground()).toBe(dark);
+  await expect.poll(ground).toBe(dark);
 });

@@ -1,7 +1,7 @@
 import { bikeEntry, checkEntry, newId, noteEntry } from "../helpers/make-entry.ts";
 import { daysAgo, withBaseline } from "./check-scene.ts";
 import { clubOf, member, share } from "./club-scene.ts";
-import { expect, expectAccessible, signIn, test } from "./fixtures.ts";
+import { expect, expectAccessible, openAs, test } from "./fixtures.ts";
 import { sendNow } from "./write-notes.ts";
 
 test("A mechanic at the station reads that a stop still stands, however good the check", async ({
@@ -18,7 +18,7 @@ test("A mechanic at the station reads that a stop still stands, however good the
   ]);
   await share(wren, bikeId, club);
 
-  await signIn(page, odo.email);
+  await openAs(odo, page);
   await page.getByRole("link", { name: "Clubs" }).click();
   await page.getByRole("link", { name: "Test day" }).click();
   await page.getByRole("button", { name: "Add a syringe" }).click();

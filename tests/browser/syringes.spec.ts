@@ -1,10 +1,17 @@
 import { logbook } from "../helpers/logbook-in-words.ts";
-import { expect, expectAccessible, signUp, test } from "./fixtures.ts";
-import { openBike, overflow } from "./open-bike.ts";
+import {
+  expect,
+  expectAccessible,
+  expectNoSidewaysScroll,
+  openAs,
+  setLetters,
+  test,
+} from "./fixtures.ts";
+import { openBike } from "./open-bike.ts";
 
 test("A rider can add, change and retire a syringe", async ({ page, rider }) => {
-  await signUp(page, rider.email);
-  await page.goto("/syringes");
+  await rider.signUp();
+  await openAs(rider, page, "/syringes");
   await expect(page.getByText("Add the syringe you measure with")).toBeVisible();
   await expectAccessible(page);
 
@@ -54,9 +61,7 @@ test("A syringe comes with the checks made with it; with other marks it is anoth
   await expectAccessible(page);
   await page.setViewportSize({ width: 320, height: 640 });
   for (const size of ["16px", "32px"]) {
-    await page.evaluate((size) => {
-      document.documentElement.style.fontSize = size;
-    }, size);
-    expect(await overflow(page), size).toBeLessThanOrEqual(0);
+    await setLetters(page, size);
+    await expectNoSidewaysScroll(page, size);
   }
 });

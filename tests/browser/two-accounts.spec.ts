@@ -1,8 +1,15 @@
 import type { Page, Request } from "@playwright/test";
 import type { SyncRequest, SyncResponse } from "../../shared/schemas/sync.ts";
 import { bikeEntry, newId } from "../helpers/make-entry.ts";
-import { expect, Rider, signIn, signUp, test } from "./fixtures.ts";
-import { installed } from "./open-bike.ts";
+import {
+  expect,
+  openAs,
+  Rider,
+  test,
+  testAlone,
+  waitUntilInstalled,
+  waitUntilSent,
+} from "./fixtures.ts";
 import {
   addBike,
   card,
@@ -14,15 +21,12 @@ import {
   writeNote,
 } from "./write-notes.ts";
 
-const allSent = (page: Page) => expect(page.getByText(/^All sent/)).toBeVisible();
-
-const toShed = (page: Page) => page.getByRole("link", { name: "Sumpless" }).click();
-
 /** Through the form that stands open, without loading the page anew. */
 async function fillSignIn(page: Page, email: string): Promise<void> {
   await page.getByLabel("E-mail").fill(email);
   await page.getByLabel("Password", { exact: true }).fill(Rider.password);
   await page.getByRole("button", { name: "Sign in" }).click();
+  await expect(page).toHaveURL("/");
 }
 
 /** All that the phone holds of an account. */
@@ -49,12 +53,12 @@ test.describe("on one phone", () => {
     rider,
     server,
   }) => {
-    const other = await new Rider(server.origin, "fern@moor.example").signUp("Fern");
+    const other = await new Rider(server.origin).signUp("Fern");
     await other.push([bikeEntry(newId(), { name: "Gorse" })]);
-    await signUp(page, rider.email);
-    await rider.signIn();
+    await rider.signUp();
+    await openAs(rider, page);
     await page.goto(await addBike(page, "Heather"));
-    await allSent(page);
+    await waitUntilSent(page);
 
     let deliver: () => void = () => undefined;
     const released = new Promise<void>((resolve) => (deliver = resolve));
@@ -77,9 +81,8 @@ test.describe("on one phone", () => {
     await page.getByRole("button", { name: "Sign out, keep them here" }).click();
 
     await fillSignIn(page, other.email);
-    await toShed(page);
     await expect(card(page, "Gorse")).toBeVisible();
-    await allSent(page);
+    await waitUntilSent(page);
     const before = await logbookOf(page, other.id);
     const arrived = page.waitForResponse((response) => carriesNote(response.request()));
     deliver();
@@ -88,7 +91,7 @@ test.describe("on one phone", () => {
     await expect(page.getByText("Every entry has been sent.")).toBeVisible();
     expect(await logbookOf(page, other.id)).toBe(before);
     expect(before).not.toMatch(/Heather|Smokes when cold/);
-    await toShed(page);
+    await page.getByRole("link", { name: "Sumpless" }).click();
     await expect(card(page, "Gorse")).toBeVisible();
     await expect(page.getByText("Heather")).toHaveCount(0);
     expect(await logbookOf(page, rider.id)).toMatch(/Smokes when cold.*"unsentSince"/);
@@ -96,7 +99,6 @@ test.describe("on one phone", () => {
     await page.getByRole("link", { name: "Account" }).click();
     await page.getByRole("button", { name: "Sign out" }).click();
     await fillSignIn(page, rider.email);
-    await toShed(page);
     await card(page, "Heather").getByRole("link", { name: "Heather" }).click();
     await expect(logLine(page, "Smokes when cold")).toContainText("Sent");
     expect(await notesOnServer(rider)).toEqual(["Smokes when cold"]);
@@ -107,9 +109,10 @@ test.describe("on one phone", () => {
     page,
     rider,
   }) => {
-    await signUp(page, rider.email);
+    await rider.signUp();
+    await openAs(rider, page);
     const bike = await addBike(page, "Heather");
-    await allSent(page);
+    await waitUntilSent(page);
     const answered = page.waitForResponse("**/api/sync");
     await sendNow(page);
     const { epoch } = (await (await answered).json()) as SyncResponse;
@@ -127,6 +130,7 @@ test.describe("on one phone", () => {
     await fillNote(page, "Smokes when cold");
     await saveNote(page);
     await expect(page.getByText(/1 not accepted/)).toBeVisible();
+    await expect(page.getByRole("heading", { name: "This bike is not here" })).toBeVisible();
     await page.goto("/");
     await expect(card(page, "Heather")).toHaveCount(0);
     await page.goto("/account");
@@ -134,39 +138,36 @@ test.describe("on one phone", () => {
 
     await page.unroute("**/api/sync");
     await sendNow(page);
-    await allSent(page);
+    await waitUntilSent(page);
     await page.goto(bike);
     await expect(logLine(page, "Smokes when cold")).toContainText("Sent");
-    await rider.signIn();
     expect(await notesOnServer(rider)).toEqual(["Smokes when cold"]);
   });
 });
 
-test("A rider whose session has expired opens the app with no network, and is asked to sign in to send", async ({
-  page,
-  context,
-  rider,
-  server,
-}) => {
-  await signUp(page, rider.email);
-  const bike = await addBike(page, "Heather");
-  await allSent(page);
-  await installed(page);
-  await context.clearCookies();
-  await server.stop();
+testAlone(
+  "A rider whose session has expired opens the app with no network, and is asked to sign in to send",
+  async ({ page, context, rider, server }) => {
+    await rider.signUp();
+    await openAs(rider, page);
+    const bike = await addBike(page, "Heather");
+    await waitUntilSent(page);
+    await waitUntilInstalled(page);
+    await context.clearCookies();
+    await server.stop();
 
-  await page.goto("/");
-  await expect(card(page, "Heather")).toBeVisible();
-  await page.goto(bike);
-  await writeNote(page, "Smokes when cold");
+    await page.goto("/");
+    await expect(card(page, "Heather")).toBeVisible();
+    await page.goto(bike);
+    await writeNote(page, "Smokes when cold");
 
-  await server.start();
-  await sendNow(page);
-  await expect(page.getByText(/^Signed out · 1 entry waits since/)).toBeVisible();
-  await expect(logLine(page, "Smokes when cold")).toContainText("Saved on this phone");
-  await page.getByRole("link", { name: "Sign in to send" }).click();
-  await signIn(page, rider.email);
-  await allSent(page);
-  await rider.signIn();
-  expect(await notesOnServer(rider)).toEqual(["Smokes when cold"]);
-});
+    await server.start();
+    await sendNow(page);
+    await expect(page.getByText(/^Signed out · 1 entry waits since/)).toBeVisible();
+    await expect(logLine(page, "Smokes when cold")).toContainText("Saved on this phone");
+    await page.getByRole("link", { name: "Sign in to send" }).click();
+    await fillSignIn(page, rider.email);
+    await waitUntilSent(page);
+    expect(await notesOnServer(rider)).toEqual(["Smokes when cold"]);
+  },
+);

@@ -7,7 +7,7 @@ import type { StoredEntry } from "../../shared/schemas/entry.ts";
 import type { SyncRequest, SyncResponse } from "../../shared/schemas/sync.ts";
 import { earlierChunks } from "../../scripts/earlier-chunks.ts";
 import { hoursEntry, newId } from "../helpers/make-entry.ts";
-import { expect, signUp, test } from "./fixtures.ts";
+import { expect, openAs, test, testAlone, waitUntilSent } from "./fixtures.ts";
 import { logLines } from "./open-bike.ts";
 import { addBike, card, logLine, notesOnServer, sendNow, writeNote } from "./write-notes.ts";
 
@@ -62,40 +62,40 @@ function chunksGot(page: Page): string[] {
   return got;
 }
 
-test("A rider saves a half-typed form and goes on with the version that is open, after a newer one was deployed", async ({
-  page,
-  rider,
-  server,
-}) => {
-  next = await buildNext();
-  await signUp(page, rider.email);
-  await page.goto("/bikes/new");
-  await page.getByLabel("Name", { exact: true }).fill("Heather");
-  await server.stop();
-  server.root = next;
-  await server.start();
+testAlone(
+  "A rider saves a half-typed form and goes on with the version that is open, after a newer one was deployed",
+  async ({ page, rider, server }) => {
+    next = await buildNext();
+    await rider.signUp();
+    await openAs(rider, page, "/bikes/new");
+    await page.getByLabel("Name", { exact: true }).fill("Heather");
+    await waitUntilSent(page);
+    await server.stop();
+    server.root = next;
+    await server.start();
 
-  const got = chunksGot(page);
-  await expect(page.getByLabel("Name", { exact: true })).toHaveValue("Heather");
-  await page.getByRole("button", { name: "Save the bike" }).click();
-  await expect(card(page, "Heather")).toBeVisible();
-  await page.getByRole("link", { name: "Account" }).click();
-  await expect(page.getByText("Every entry has been sent.")).toBeVisible();
-  expect(got.length).toBeGreaterThan(1);
-  expect(got.filter((name) => name.startsWith("next-"))).toEqual([]);
+    const got = chunksGot(page);
+    await expect(page.getByLabel("Name", { exact: true })).toHaveValue("Heather");
+    await page.getByRole("button", { name: "Save the bike" }).click();
+    await expect(card(page, "Heather")).toBeVisible();
+    await page.getByRole("link", { name: "Account" }).click();
+    await expect(page.getByText("Every entry has been sent.")).toBeVisible();
+    expect(got.length).toBeGreaterThan(1);
+    expect(got.filter((name) => name.startsWith("next-"))).toEqual([]);
 
-  await expect(nextScripts(page)).toHaveCount(0);
-  await page.reload();
-  await expect(page.getByText("Every entry has been sent.")).toBeVisible();
-  await expect(nextScripts(page)).not.toHaveCount(0);
-});
+    await expect(nextScripts(page)).toHaveCount(0);
+    await page.reload();
+    await expect(page.getByText("Every entry has been sent.")).toBeVisible();
+    await expect(nextScripts(page)).not.toHaveCount(0);
+  },
+);
 
 test("A rider whose open version is served no more keeps what was typed", async ({
   page,
   rider,
 }) => {
-  await signUp(page, rider.email);
-  await page.goto("/bikes/new");
+  await rider.signUp();
+  await openAs(rider, page, "/bikes/new");
   await page.getByLabel("Name", { exact: true }).fill("Heather");
   await page.route("**/assets/**", (route) => route.fulfill({ status: 404 }));
   await page.getByRole("button", { name: "Save the bike" }).click();
@@ -120,13 +120,12 @@ test("A rider with an older version keeps what a newer one wrote, and is judged 
   page,
   rider,
 }) => {
-  await signUp(page, rider.email);
+  await rider.signUp();
+  await openAs(rider, page);
   const bike = await addBike(page, "Heather");
-  await expect(page.getByText(/^All sent/)).toBeVisible();
-  await rider.signIn();
+  await waitUntilSent(page);
   await rider.push([hoursEntry(bike.split("/").at(-1)!, 5)]);
   await page.route("**/api/sync", answerAsNewer);
-  await sendNow(page);
   await page.goto(bike);
   const foreign = logLines(page).filter({ hasText: "Written by a newer version of the app" });
   await expect(foreign).toHaveCount(2);
@@ -156,7 +155,8 @@ test("A rider with a newer version keeps what an older server does not know, unt
   page,
   rider,
 }) => {
-  await signUp(page, rider.email);
+  await rider.signUp();
+  await openAs(rider, page);
   await page.goto(await addBike(page, "Heather"));
   await page.route("**/api/sync", askAsOlder);
   await writeNote(page, "Chain oiled");
@@ -168,6 +168,5 @@ test("A rider with a newer version keeps what an older server does not know, unt
   await page.unroute("**/api/sync");
   await sendNow(page);
   await expect(logLine(page, "Chain oiled")).toContainText("Sent");
-  await rider.signIn();
   expect(await notesOnServer(rider)).toEqual(["Chain oiled"]);
 });
