@@ -5,7 +5,7 @@ const USAGE = `npm run admin -- <what to do>
 
   reset-link <e-mail>            prints a link to choose a new password: once, for 30 minutes
   end-sessions <e-mail>          signs the account out on every device
-  end-sessions --all             signs everyone out, as after a restore of an old backup
+  end-sessions --all             signs everyone out
   delete-account <e-mail> --yes  erases the account, its bikes and their logs, for good
   list-clubs                     prints each club, its size and its organisers' addresses`;
 

@@ -6,9 +6,13 @@ const [file] = process.argv.slice(2);
 try {
   if (file === undefined)
     throw new Error("Say which backup to restore: npm run restore -- data/backups/<name>.sqlite");
-  const { setAside, erasures } = await restoreDatabase(readConfig(process.env).dataDir, file);
+  const { setAside, erasures, signedOut } = await restoreDatabase(
+    readConfig(process.env).dataDir,
+    file,
+  );
   if (setAside) console.log(`The database that was there is now ${setAside}`);
   if (erasures > 0) console.log(`Erased again what was erased since: ${erasures}`);
+  if (signedOut) console.log("Everyone is signed out: nothing told which sessions had ended.");
   console.log("Restored. The phones will send what is missing.");
 } catch (error) {
   console.error(error instanceof Error ? error.message : error);

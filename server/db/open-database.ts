@@ -35,6 +35,10 @@ function connect(file: string): SQLite.Database {
 /** The only way to a connection. Column names are the schema's in snake_case. */
 export const openDatabase = (file: string) => drizzle(connect(file), { casing: "snake_case" });
 
+/** To look into a database that no server uses, and leave it as it is. */
+export const openReadOnly = (file: string) =>
+  drizzle(new SQLite(file, { readonly: true, fileMustExist: true }), { casing: "snake_case" });
+
 export type Database = ReturnType<typeof openDatabase>;
 
 export const databaseFile = (dataDir: string) => path.join(dataDir, "sumpless.sqlite");

@@ -1,6 +1,8 @@
 import { and, desc, eq, gt, ne } from "drizzle-orm";
 import type { Database } from "./open-database.ts";
-import { sessions } from "./schema.ts";
+import { sessions, users } from "./schema.ts";
+
+export type SessionRow = typeof sessions.$inferSelect;
 
 /** What is kept of a session for its account to see; the session itself is Lucia's. */
 export function createSessionRows(db: Database) {
@@ -31,5 +33,18 @@ export function createSessionRows(db: Database) {
         .run(),
     removeOf: (userId: string) => db.delete(sessions).where(mine(userId)).run(),
     removeAll: () => db.delete(sessions).run(),
+    all: (): SessionRow[] => db.select().from(sessions).all(),
+    /** Those and no others, of accounts that there are. */
+    replaceAll(rows: SessionRow[]): void {
+      const accounts = new Set(
+        db
+          .select({ id: users.id })
+          .from(users)
+          .all()
+          .map(({ id }) => id),
+      );
+      db.delete(sessions).run();
+      for (const row of rows) if (accounts.has(row.userId)) db.insert(sessions).values(row).run();
+    },
   };
 }

@@ -2,7 +2,8 @@ import { copyFileSync, existsSync, mkdirSync, renameSync } from "node:fs";
 import path from "node:path";
 import { assertIntegrity, backupName, backupsDir } from "../db/back-up-database.ts";
 import { migrateDatabase } from "../db/migrate-database.ts";
-import { databaseFile, openDatabase } from "../db/open-database.ts";
+import { databaseFile, openDatabase, openReadOnly, type Database } from "../db/open-database.ts";
+import { createSessionRows } from "../db/sessions.ts";
 import { createStore } from "../db/store.ts";
 import { replayErasures } from "./erase.ts";
 import { rebuildSummaries } from "./summarise-bike.ts";
@@ -32,9 +33,27 @@ function setAsideDatabase(dataDir: string): string | null {
   return aside;
 }
 
+/** What the database that was there says; null where there is none, or none that is sound. */
+function askSetAside<T>(setAside: string | null, ask: (database: Database) => T): T | null {
+  if (setAside === null) return null;
+  try {
+    assertIntegrity(setAside);
+    const database = openReadOnly(setAside);
+    try {
+      return ask(database);
+    } finally {
+      database.$client.close();
+    }
+  } catch {
+    return null;
+  }
+}
+
 /**
  * Puts a backup in the database's place and readies it to be healed by the phones: a new epoch, so
- * that they send their entries again; and what was erased since the backup, erased again.
+ * that they send their entries again; and what was erased since the backup, erased again. Sessions
+ * are never the backup's, or one that was ended since would be back: they stay those of the database
+ * that was there, and where that tells nothing, all have ended.
  */
 export async function restoreDatabase(dataDir: string, backup: string) {
   assertIntegrity(backup);
@@ -47,9 +66,11 @@ export async function restoreDatabase(dataDir: string, backup: string) {
   const database = openDatabase(file);
   await migrateDatabase(database, backupsDir(dataDir));
   const store = createStore(database, dataDir);
+  const sessions = askSetAside(setAside, (before) => createSessionRows(before).all());
+  store.write(() => createSessionRows(database).replaceAll(sessions ?? []));
   store.epoch.renew();
   const erasures = replayErasures(store);
   rebuildSummaries(store);
   database.$client.close();
-  return { setAside, erasures };
+  return { setAside, erasures, signedOut: sessions === null };
 }

@@ -1,4 +1,4 @@
-import { existsSync, writeFileSync } from "node:fs";
+import { existsSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import { describe, expect, it } from "vitest";
 import { assertIntegrity, backUpDatabase, backupsDir } from "../../server/db/back-up-database.ts";
@@ -7,7 +7,7 @@ import { restoreDatabase } from "../../server/services/restore-database.ts";
 import { rebuildSummaries } from "../../server/services/summarise-bike.ts";
 import { clubOfFour, giveRoles, invite, join, lineUp, share, withdraw } from "../helpers/club.ts";
 import { bikeEntry, hoursEntry, newId, noteEntry, smallLog } from "../helpers/make-entry.ts";
-import { PASSWORD, signInRider, signUpRider } from "../helpers/rider.ts";
+import { createPhone, PASSWORD, signInRider, signUpRider } from "../helpers/rider.ts";
 import { startTestServer, temporaryDir, type TestServer } from "../helpers/start-test-server.ts";
 
 async function backUp({ database, dataDir }: TestServer): Promise<string> {
@@ -156,6 +156,61 @@ describe("a restored club", () => {
     const restored = await restoreAndStart(server, backup);
     const ann = await signInRider(restored, owner.user.email);
     await ann.phone.get("/api/clubs").expect(200, { clubs: [] });
+  });
+});
+
+describe("sessions after a restore", () => {
+  const statusOf = async (server: TestServer, { cookie }: { cookie: string }) =>
+    (await createPhone(server).get("/api/auth/me").set("Cookie", cookie)).status;
+
+  it("stay as they were before it, those begun since the backup too, and none that ended is back", async () => {
+    const server = await startTestServer();
+    const first = await signUpRider(server);
+    const { email } = first.user;
+    const [left, lost] = [await signInRider(server, email), await signInRider(server, email)];
+    const gone = await signUpRider(server, "Bob");
+    const backup = await backUp(server);
+    await left.phone.post("/api/auth/sign-out").expect(204);
+    const devices = (await lost.phone.get("/api/account/devices")).body as {
+      devices: { id: string; current: boolean }[];
+    };
+    const { id } = devices.devices.find(({ current }) => current)!;
+    await first.phone.delete(`/api/account/devices/${id}`).expect(204);
+    await gone.phone.delete("/api/account").send({ password: PASSWORD }).expect(204);
+    const since = await signInRider(server, email);
+    const stranger = await signUpRider(server, "Una");
+
+    const restored = await restoreAndStart(server, backup);
+    expect(await statusOf(restored, first)).toBe(200);
+    expect(await statusOf(restored, since)).toBe(200);
+    for (const ended of [left, lost, gone, stranger])
+      expect(await statusOf(restored, ended)).toBe(401);
+  });
+
+  it("are none that an old password had begun", async () => {
+    const server = await startTestServer();
+    const [rider, { email }] = await signUpRider(server).then((one) => [one, one.user] as const);
+    const thief = await signInRider(server, email);
+    const backup = await backUp(server);
+    const change = { password: PASSWORD, newPassword: "nine valves and a spare" };
+    await rider.phone.post("/api/account/password").send(change).expect(204);
+    const restored = await restoreAndStart(server, backup);
+    expect(await statusOf(restored, thief)).toBe(401);
+    expect(await statusOf(restored, rider)).toBe(401);
+  });
+
+  it.each(["damaged", "gone"])("are none where the database that was there is %s", async (how) => {
+    const server = await startTestServer();
+    const rider = await signUpRider(server);
+    const backup = await backUp(server);
+    await server.stop();
+    const file = databaseFile(server.dataDir);
+    if (how === "gone") rmSync(file);
+    else writeFileSync(file, "no database any more, whatever it was before");
+    expect(await restoreDatabase(server.dataDir, backup)).toMatchObject({ signedOut: true });
+    const restored = await startTestServer({ dataDir: server.dataDir });
+    expect(await statusOf(restored, rider)).toBe(401);
+    await signInRider(restored, rider.user.email);
   });
 });
 
