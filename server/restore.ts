@@ -12,7 +12,8 @@ try {
   );
   if (setAside) console.log(`The database that was there is now ${setAside}`);
   if (erasures > 0) console.log(`Erased again what was erased since: ${erasures}`);
-  if (signedOut) console.log("Everyone is signed out: nothing told which sessions had ended.");
+  if (signedOut)
+    console.log("Everyone is signed out, and mails may go out twice: no sound database was there.");
   console.log("Restored. The phones will send what is missing.");
 } catch (error) {
   console.error(error instanceof Error ? error.message : error);

@@ -1,7 +1,7 @@
 import { and, asc, eq, isNotNull, isNull, lt, lte, ne, sql } from "drizzle-orm";
 import type { Letter } from "../mail/letter.ts";
 import type { Database } from "./open-database.ts";
-import { mails, type mailTopics } from "./schema.ts";
+import { bikes, mails, users, type mailTopics } from "./schema.ts";
 
 export type MailTopic = (typeof mailTopics)[number];
 export type MailRow = typeof mails.$inferSelect;
@@ -76,6 +76,35 @@ export function createMails(db: Database) {
         .run(),
     removeAbout: (bikeId: string) => db.delete(mails).where(eq(mails.bikeId, bikeId)).run(),
     removeTo: (userId: string) => db.delete(mails).where(eq(mails.userId, userId)).run(),
+    all: (): MailRow[] => db.select().from(mails).all(),
+    /**
+     * Those and no others, of accounts that there are. A bike that is not there yet is left unnamed:
+     * the occasion is remembered all the same, for when its phone brings it.
+     */
+    replaceAll(rows: MailRow[]): void {
+      const accounts = new Set(
+        db
+          .select({ id: users.id })
+          .from(users)
+          .all()
+          .map(({ id }) => id),
+      );
+      const there = new Set(
+        db
+          .select({ id: bikes.id })
+          .from(bikes)
+          .all()
+          .map(({ id }) => id),
+      );
+      db.delete(mails).run();
+      for (const row of rows) {
+        if (row.userId !== null && !accounts.has(row.userId)) continue;
+        const bikeId = row.bikeId !== null && there.has(row.bikeId) ? row.bikeId : null;
+        db.insert(mails)
+          .values({ ...row, bikeId })
+          .run();
+      }
+    },
     removeBefore: (queuedAt: string) =>
       db
         .delete(mails)

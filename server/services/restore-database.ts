@@ -3,6 +3,7 @@ import path from "node:path";
 import { assertIntegrity, backupName, backupsDir } from "../db/back-up-database.ts";
 import { migrateDatabase } from "../db/migrate-database.ts";
 import { databaseFile, openDatabase, openReadOnly, type Database } from "../db/open-database.ts";
+import { createMails } from "../db/mails.ts";
 import { createSessionRows } from "../db/sessions.ts";
 import { createStore } from "../db/store.ts";
 import { replayErasures } from "./erase.ts";
@@ -52,8 +53,9 @@ function askSetAside<T>(setAside: string | null, ask: (database: Database) => T)
 /**
  * Puts a backup in the database's place and readies it to be healed by the phones: a new epoch, so
  * that they send their entries again; and what was erased since the backup, erased again. Sessions
- * are never the backup's, or one that was ended since would be back: they stay those of the database
- * that was there, and where that tells nothing, all have ended.
+ * and mails stay those of the database that was there: by the backup's, a session ended since would
+ * be back, and a mail sent since would go out again. Where that database tells nothing, all sessions
+ * have ended, and the mails are the backup's.
  */
 export async function restoreDatabase(dataDir: string, backup: string) {
   assertIntegrity(backup);
@@ -66,11 +68,17 @@ export async function restoreDatabase(dataDir: string, backup: string) {
   const database = openDatabase(file);
   await migrateDatabase(database, backupsDir(dataDir));
   const store = createStore(database, dataDir);
-  const sessions = askSetAside(setAside, (before) => createSessionRows(before).all());
-  store.write(() => createSessionRows(database).replaceAll(sessions ?? []));
+  const kept = askSetAside(setAside, (before) => ({
+    sessions: createSessionRows(before).all(),
+    mails: createMails(before).all(),
+  }));
+  store.write(() => {
+    createSessionRows(database).replaceAll(kept?.sessions ?? []);
+    if (kept) store.mails.replaceAll(kept.mails);
+  });
   store.epoch.renew();
   const erasures = replayErasures(store);
   rebuildSummaries(store);
   database.$client.close();
-  return { setAside, erasures, signedOut: sessions === null };
+  return { setAside, erasures, signedOut: kept === null };
 }

@@ -1,3 +1,4 @@
+import { subDays } from "date-fns";
 import { existsSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import { describe, expect, it } from "vitest";
@@ -6,7 +7,15 @@ import { databaseFile } from "../../server/db/open-database.ts";
 import { restoreDatabase } from "../../server/services/restore-database.ts";
 import { rebuildSummaries } from "../../server/services/summarise-bike.ts";
 import { clubOfFour, giveRoles, invite, join, lineUp, share, withdraw } from "../helpers/club.ts";
-import { bikeEntry, hoursEntry, newId, noteEntry, smallLog } from "../helpers/make-entry.ts";
+import { startMailServer } from "../helpers/mail-server.ts";
+import {
+  bikeEntry,
+  checkEntry,
+  hoursEntry,
+  newId,
+  noteEntry,
+  smallLog,
+} from "../helpers/make-entry.ts";
 import { createPhone, PASSWORD, signInRider, signUpRider } from "../helpers/rider.ts";
 import { startTestServer, temporaryDir, type TestServer } from "../helpers/start-test-server.ts";
 
@@ -17,10 +26,14 @@ async function backUp({ database, dataDir }: TestServer): Promise<string> {
 }
 
 /** Stops the server, restores the backup, and starts another over the same folder. */
-async function restoreAndStart(server: TestServer, backup: string): Promise<TestServer> {
+async function restoreAndStart(
+  server: TestServer,
+  backup: string,
+  config: { smtpUrl?: string } = {},
+): Promise<TestServer> {
   await server.stop();
   await restoreDatabase(server.dataDir, backup);
-  return startTestServer({ dataDir: server.dataDir });
+  return startTestServer({ ...config, dataDir: server.dataDir });
 }
 
 describe("a restored server", () => {
@@ -211,6 +224,46 @@ describe("sessions after a restore", () => {
     const restored = await startTestServer({ dataDir: server.dataDir });
     expect(await statusOf(restored, rider)).toBe(401);
     await signInRider(restored, rider.user.email);
+  });
+});
+
+describe("mails after a restore", () => {
+  const daysAgo = (days: number) => subDays(new Date(), days).toISOString();
+
+  it("are none that were sent since the backup, be it of a bike that the backup lacks", async () => {
+    const mail = await startMailServer();
+    const { smtpUrl } = mail;
+    const server = await startTestServer({ smtpUrl });
+    const { owner, mechanic, bikeId } = await clubOfFour(server);
+    server.store.users.markVerified(owner.user.id);
+    const backup = await backUp(server);
+    const added = newId();
+    const log = [
+      bikeEntry(added, { name: "Fern" }),
+      checkEntry(added, 12, 3, daysAgo(40)),
+      hoursEntry(added, 40, daysAgo(1)),
+    ];
+    const stop = { ...noteEntry(bikeId, "Hose is cracked", "stop"), at: daysAgo(0) };
+    await owner.sync(log);
+    await mechanic.sync([stop]);
+    await server.services.mailAllDue();
+    await server.mailer.sendDue();
+    const sent = () => mail.letters.map(({ headers }) => headers.subject).sort();
+    const before = sent();
+    expect(before).toEqual(
+      expect.arrayContaining(["Fern: delivery check overdue", "Moss: stop advised"]),
+    );
+
+    const restored = await restoreAndStart(server, backup, { smtpUrl });
+    await (await signInRider(restored, owner.user.email)).sync(log);
+    await (await signInRider(restored, mechanic.user.email)).sync([stop]);
+    await restored.services.mailAllDue();
+    await restored.mailer.sendDue();
+    expect(sent()).toEqual(before);
+    const again = { ...stop, id: newId() };
+    await (await signInRider(restored, mechanic.user.email)).sync([again]);
+    await restored.mailer.sendDue();
+    expect(sent()).toHaveLength(before.length + 1);
   });
 });
 
