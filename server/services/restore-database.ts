@@ -1,4 +1,4 @@
-import { copyFileSync, existsSync, mkdirSync, renameSync } from "node:fs";
+import { copyFileSync, existsSync, mkdirSync, renameSync, rmSync } from "node:fs";
 import path from "node:path";
 import { assertIntegrity, backupName, backupsDir } from "../db/back-up-database.ts";
 import { migrateDatabase } from "../db/migrate-database.ts";
@@ -22,15 +22,19 @@ function gather(file: string): void {
   }
 }
 
-/** Moves the present database out of the way; null where there is none. */
+/** A database in WAL mode, or one that is damaged, is up to three files. */
+const filesOf = (file: string) => ["", "-wal", "-shm"].map((part) => file + part);
+
+/** Copies the present database aside; null where there is none. */
 function setAsideDatabase(dataDir: string): string | null {
   const file = databaseFile(dataDir);
   if (!existsSync(file)) return null;
   gather(file);
   const aside = path.join(backupsDir(dataDir), backupName("before-restore"));
   mkdirSync(path.dirname(aside), { recursive: true });
-  for (const part of ["", "-wal", "-shm"])
-    if (existsSync(file + part)) renameSync(file + part, aside + part);
+  const copies = filesOf(aside);
+  for (const [index, part] of filesOf(file).entries())
+    if (existsSync(part)) copyFileSync(part, copies[index]!);
   return aside;
 }
 
@@ -55,17 +59,19 @@ function askSetAside<T>(setAside: string | null, ask: (database: Database) => T)
  * that they send their entries again; and what was erased since the backup, erased again. Sessions
  * and mails stay those of the database that was there: by the backup's, a session ended since would
  * be back, and a mail sent since would go out again. Where that database tells nothing, all sessions
- * have ended, and the mails are the backup's.
+ * have ended, and the mails are the backup's. All this is done to a copy, which then takes the
+ * database's place at once: a restore cut short has changed nothing.
  */
 export async function restoreDatabase(dataDir: string, backup: string) {
   assertIntegrity(backup);
   const setAside = setAsideDatabase(dataDir);
   const file = databaseFile(dataDir);
+  const readied = `${file}.restoring`;
   mkdirSync(dataDir, { recursive: true });
-  copyFileSync(backup, `${file}.restoring`);
-  renameSync(`${file}.restoring`, file);
+  for (const left of filesOf(readied)) rmSync(left, { force: true });
+  copyFileSync(backup, readied);
 
-  const database = openDatabase(file);
+  const database = openDatabase(readied);
   await migrateDatabase(database, backupsDir(dataDir));
   const store = createStore(database, dataDir);
   const kept = askSetAside(setAside, (before) => ({
@@ -80,5 +86,9 @@ export async function restoreDatabase(dataDir: string, backup: string) {
   const erasures = replayErasures(store);
   rebuildSummaries(store);
   database.$client.close();
+  gather(readied);
+  const [, ...journals] = filesOf(file);
+  for (const journal of journals) rmSync(journal, { force: true });
+  renameSync(readied, file);
   return { setAside, erasures, signedOut: kept === null };
 }

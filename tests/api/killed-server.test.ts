@@ -11,7 +11,7 @@ import path from "node:path";
 import { createInterface } from "node:readline";
 import { setTimeout as sleep } from "node:timers/promises";
 import { expect, it, onTestFinished } from "vitest";
-import { assertIntegrity, backupsDir } from "../../server/db/back-up-database.ts";
+import { assertIntegrity, backUpDatabase, backupsDir } from "../../server/db/back-up-database.ts";
 import { migrateDatabase, migrationsFolder } from "../../server/db/migrate-database.ts";
 import { databaseFile, openDatabase } from "../../server/db/open-database.ts";
 import { syncResponseSchema } from "../../shared/schemas/sync.ts";
@@ -32,8 +32,8 @@ interface Held {
   held: Promise<void>;
 }
 
-function spawnHeld(program: string, dataDir: string, holdAt: string): ChildProcess {
-  const args = ["--import", "tsx", "tests/helpers/held-program.ts", program];
+function spawnHeld(program: string[], dataDir: string, holdAt: string): ChildProcess {
+  const args = ["--import", "tsx", "tests/helpers/held-program.ts", ...program];
   const env = { ...process.env, PORT: "0", DATA_DIR: dataDir, LOG_LEVEL: "info", HOLD_AT: holdAt };
   const child = spawn(process.execPath, args, { env, stdio: ["ignore", "pipe", "ignore"] });
   onTestFinished(() => void child.kill("SIGKILL"));
@@ -59,7 +59,7 @@ function readPort(line: string): number | undefined {
 }
 
 async function startServer(dataDir: string, holdAt: string): Promise<Held> {
-  const child = spawnHeld("server/index.ts", dataDir, holdAt);
+  const child = spawnHeld(["server/index.ts"], dataDir, holdAt);
   const held = lineOf(child, readHeld).then(() => undefined);
   const port = await lineOf(child, readPort);
   return { process: child, url: `http://127.0.0.1:${port}`, held };
@@ -139,7 +139,7 @@ async function killAt(moment: Moment, dataDir: string, writer: Writer, delayMs: 
   const load = writer.load(server.url);
   if (moment === "before-commit" || moment === "after-commit") await server.held;
   else if (moment === "backup") {
-    const backup = spawnHeld("server/backup.ts", dataDir, "backup");
+    const backup = spawnHeld(["server/backup.ts"], dataDir, "backup");
     await lineOf(backup, readHeld);
     await sleep(delayMs);
     await kill(backup);
@@ -196,7 +196,7 @@ it.each(["before-commit", "after-commit", "backup"])(
   async (holdAt) => {
     const dataDir = temporaryDir();
     await firstVersion(dataDir);
-    const migrating = spawnHeld("server/index.ts", dataDir, holdAt);
+    const migrating = spawnHeld(["server/index.ts"], dataDir, holdAt);
     await lineOf(migrating, readHeld);
     await kill(migrating);
 
@@ -210,5 +210,30 @@ it.each(["before-commit", "after-commit", "backup"])(
       "old@club.example",
     ]);
     client.close();
+  },
+);
+
+it.each(["before-commit", "after-commit"])(
+  "leaves the database as it was when a restore is killed: %s",
+  { timeout: 60_000 },
+  async (holdAt) => {
+    const dataDir = temporaryDir();
+    const writer = createWriter();
+    const server = await startServer(dataDir, "none");
+    const empty = path.join(temporaryDir(), "empty.sqlite");
+    const database = openDatabase(databaseFile(dataDir));
+    await backUpDatabase(database.$client, empty);
+    database.$client.close();
+    await writer.enter(server.url, "sign-up");
+    await writer.send(server.url);
+    await kill(server.process);
+
+    const restoring = spawnHeld(["server/restore.ts", empty], dataDir, holdAt);
+    await lineOf(restoring, readHeld);
+    await kill(restoring);
+    const again = await startServer(dataDir, "none");
+    await writer.enter(again.url, "sign-in");
+    await kill(again.process);
+    assertNothingLost(dataDir, writer);
   },
 );
