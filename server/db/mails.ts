@@ -5,9 +5,10 @@ import { bikes, mails, users, type mailTopics } from "./schema.ts";
 
 export type MailTopic = (typeof mailTopics)[number];
 export type MailRow = typeof mails.$inferSelect;
-export type WaitingMail = Pick<MailRow, "id" | "topic" | "attempts" | "goodUntil"> & {
-  letter: Letter;
-};
+export type WaitingMail = Pick<
+  MailRow,
+  "id" | "topic" | "userId" | "bikeId" | "attempts" | "goodUntil"
+> & { letter: Letter };
 
 /** Nothing left to try, and nothing kept that could be read. */
 const settled = { letter: null, nextAttemptAt: null };
@@ -18,6 +19,8 @@ export function createMails(db: Database) {
     .select({
       id: mails.id,
       topic: mails.topic,
+      userId: mails.userId,
+      bikeId: mails.bikeId,
       attempts: mails.attempts,
       goodUntil: mails.goodUntil,
       letter: mails.letter,

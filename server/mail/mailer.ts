@@ -36,18 +36,28 @@ export const mailFolder = (dataDir: string) => path.join(dataDir, "mail");
  * was sent, and a mail server that is down stops nobody from signing up. What is to be sent stands
  * in the database first, in the transaction that causes it, and is tried until it is sent or of no
  * use any more, by this life of the server or the next. One whose sending was cut off by a crash
- * goes out again under the same Message-ID, by which mail programs know it.
+ * goes out again under the same Message-ID, by which mail programs know it. One about a bike goes
+ * to nobody who may no longer read that bike.
  */
-export function createMailer({ mails }: Pick<Store, "mails">, config: Config, log: Logger) {
+export function createMailer(
+  { mails }: Pick<Store, "mails">,
+  config: Config,
+  log: Logger,
+  mayRead: (userId: string, bikeId: string) => boolean,
+) {
   const sendLetter = config.smtpUrl
     ? smtpTransport(config.smtpUrl, config.mailFrom)
     : fileTransport(mailFolder(config.dataDir), config.mailFrom);
   const { hostname } = new URL(config.publicOrigin);
   let sending: Promise<void> | null = null;
 
+  const isOfUse = ({ goodUntil, userId, bikeId }: WaitingMail): boolean =>
+    goodUntil >= Date.now() && (userId === null || bikeId === null || mayRead(userId, bikeId));
+
   /** The next try is written down before this one: whatever happens, no letter goes out in a loop. */
-  async function send({ id, topic, letter, goodUntil, ...mail }: WaitingMail): Promise<void> {
-    if (goodUntil < Date.now()) return void mails.giveUp(id);
+  async function send(mail: WaitingMail): Promise<void> {
+    const { id, topic, letter, goodUntil } = mail;
+    if (!isOfUse(mail)) return void mails.giveUp(id);
     const attempts = mail.attempts + 1;
     const nextAttemptAt = Date.now() + waitMs(attempts);
     mails.postpone(id, attempts, nextAttemptAt);

@@ -103,6 +103,17 @@ describe("a delivery judged low", () => {
     expect(await told()).toEqual([]);
   });
 
+  it("is not told to whom the bike was withdrawn from before the mail could be sent", async () => {
+    const { mail, server, owner, bikeId, club, told, findLow } = await clubThatIsMailed();
+    mail.state.busy = true;
+    await findLow(owner);
+    expect(await told()).toEqual([]);
+    await withdraw(owner, bikeId, club.id);
+    mail.state.busy = false;
+    server.database.$client.exec("UPDATE mails SET next_attempt_at = 0 WHERE letter IS NOT NULL");
+    expect(await told()).toEqual([]);
+  });
+
   it("in a check copied from an old book is no news", async () => {
     const { owner, told, findLow } = await clubThatIsMailed();
     await findLow(owner, 20);
