@@ -245,7 +245,7 @@ test("A rider on a wide screen has the log beside the chart", async ({ page, rid
     const log = (await page.getByRole("region", { name: "Log" }).boundingBox())!;
     expect(log.x).toBeGreaterThan(drawn.x + drawn.width);
     expect(Math.abs(log.y - drawn.y)).toBeLessThan(100);
-  }).toPass({ timeout: 60_000 });
+  }).toPass();
 });
 
 for (const colorScheme of ["light", "dark"] as const)

@@ -1,18 +1,23 @@
 import AxeBuilder from "@axe-core/playwright";
 import { test as base, expect, type BrowserContext, type Page } from "@playwright/test";
 import { spawn, type ChildProcess } from "node:child_process";
+import { randomInt } from "node:crypto";
 import { once } from "node:events";
 import { mkdtemp, rm } from "node:fs/promises";
-import { createServer, type AddressInfo } from "node:net";
+import { createServer } from "node:net";
 import { tmpdir } from "node:os";
 import path from "node:path";
 
+/** Below those that the system gives to callers: nobody takes it while the server is stopped. */
 async function freePort(): Promise<number> {
-  const probe = createServer().listen(0, "127.0.0.1");
-  await once(probe, "listening");
-  const { port } = probe.address() as AddressInfo;
-  probe.close();
-  await once(probe, "close");
+  const port = randomInt(20_000, 32_000);
+  const probe = createServer();
+  try {
+    await once(probe.listen(port), "listening");
+  } catch {
+    return freePort();
+  }
+  await once(probe.close(), "close");
   return port;
 }
 

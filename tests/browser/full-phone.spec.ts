@@ -38,7 +38,6 @@ test("A rider whose phone is full keeps what is saved and what is typed, and sav
   rider,
   baseURL,
 }) => {
-  test.setTimeout(240_000);
   await rider.signUp();
   await openAs(rider, page);
   await waitUntilInstalled(page);

@@ -93,7 +93,7 @@ testAlone(
     await expect(card(page, "Moss")).toContainText("20.0 h to the next check");
     await expect(card(page, "Moss")).toContainText("Saved on this phone");
     await card(page, "Moss").getByRole("link", { name: "Moss" }).click();
-    await expect(page.getByText("2.99 ± 0.20 mL")).toBeVisible();
+    await expect(page.getByText("2.99 ± 0.20 mL").first()).toBeVisible();
     await expect(page.getByText("Saved on this phone")).toHaveCount(2);
     const bikeId = new URL(page.url()).pathname.split("/").at(-1)!;
 
