@@ -39,6 +39,8 @@ const anyStep: fc.Arbitrary<Step> = fc.oneof(
   { weight: 3, arbitrary: step({ does: does("strike"), device, year, pick }) },
   { weight: 10, arbitrary: step({ does: does("sync"), device, network }) },
   { weight: 2, arbitrary: step({ does: does("switch-account"), device }) },
+  { weight: 1, arbitrary: step({ does: does("sync-as-other"), device }) },
+  { weight: 1, arbitrary: step({ does: does("sign-out-and-in"), device }) },
   { weight: 2, arbitrary: step({ does: does("reload"), device, waiting }) },
   { weight: 1, arbitrary: step({ does: does("upgrade"), device }) },
   { weight: 1, arbitrary: step({ does: does("erase"), device, pick }) },

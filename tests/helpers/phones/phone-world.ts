@@ -1,6 +1,7 @@
 /** Three phones, two riders and a server, and what they can do to each other. */
 import { rmSync } from "node:fs";
 import path from "node:path";
+import { expect } from "vitest";
 import { backUpDatabase, backupsDir } from "../../../server/db/back-up-database.ts";
 import { eraseBike } from "../../../server/services/erase.ts";
 import { restoreDatabase } from "../../../server/services/restore-database.ts";
@@ -9,10 +10,10 @@ import { ApiError, NoNetworkError } from "../../../src/offline/errors.ts";
 import type { BikeRow } from "../../../src/offline/logbook/database.ts";
 import type { NewEntry } from "../../../src/offline/types.ts";
 import { bikeEntry, checkEntry, hoursEntry, newId, noteEntry, strikeEntry } from "../make-entry.ts";
-import { signUpRider, type Rider } from "../rider.ts";
+import { signInRider, signUpRider, type Rider } from "../rider.ts";
 import { startTestServer, type TestServer } from "../start-test-server.ts";
 import { networks, slowNetwork } from "./networks.ts";
-import { wiredPhone, type WiredPhone } from "./wired-phone.ts";
+import { wiredPhone, type Network, type WiredPhone } from "./wired-phone.ts";
 
 const DEVICES = 3;
 
@@ -21,6 +22,8 @@ export type Step =
   | { does: "write"; device: number; year: number; pick: number }
   | { does: "strike"; device: number; year: number; pick: number }
   | { does: "sync"; device: number; network: keyof typeof networks | "late" | "overtaken" }
+  | { does: "sync-as-other"; device: number }
+  | { does: "sign-out-and-in"; device: number }
   | { does: "reload"; device: number; waiting: "request" | "answer" }
   | { does: "upgrade"; device: number }
   | { does: "switch-account"; device: number }
@@ -62,16 +65,16 @@ export async function createWorld(): Promise<World> {
     erased: new Set(),
     backup: null,
   };
-  const wire = (rider: Rider, device: number) =>
-    wiredPhone(rider.user, {
+  const wire = ({ user }: Rider, index: number, device: number) =>
+    wiredPhone(user, {
       server: () => world.server,
-      cookie: () => rider.cookie,
+      cookie: () => world.riders[index]!.cookie,
       device: `${name}-device-${device}`,
     });
   for (let device = 0; device < DEVICES; device += 1)
     world.devices.push({
       signedIn: device % riders.length,
-      stores: riders.map((rider) => wire(rider, device)),
+      stores: riders.map((rider, index) => wire(rider, index, device)),
     });
   return world;
 }
@@ -147,6 +150,28 @@ async function syncOvertaken(phone: WiredPhone, holds: "request" | "answer"): Pr
   await first;
 }
 
+const withCookie =
+  (cookie: string): Network =>
+  (input, init) =>
+    fetch(input, { ...init, headers: { ...(init?.headers as Record<string, string>), cookie } });
+
+/** Another has signed in, and this account's page has not noticed yet. */
+async function syncAsOther(world: World, phone: WiredPhone): Promise<void> {
+  const other = world.riders.find(({ user }) => user.id !== phone.account.id)!;
+  await expect(phone.sync(withCookie(other.cookie))).rejects.toMatchObject({ status: 409 });
+}
+
+/** The session ends; what is written meanwhile stays, until its rider has signed in again. */
+async function signOutAndIn(world: World, phone: WiredPhone): Promise<void> {
+  const { server, riders } = world;
+  const index = riders.findIndex(({ user }) => user.id === phone.account.id);
+  const { user, cookie } = riders[index]!;
+  const headers = { origin: server.origin, cookie };
+  await fetch(new URL("/api/auth/sign-out", server.url), { method: "POST", headers });
+  await expect(phone.sync()).rejects.toMatchObject({ status: 401 });
+  riders[index] = await signInRider(server, user.email);
+}
+
 /** The page goes while it sends; its request still arrives, and the answer finds nobody. */
 async function reload(phone: WiredPhone, waiting: "request" | "answer"): Promise<void> {
   const { network, letThrough } = slowNetwork(waiting);
@@ -207,6 +232,8 @@ export async function perform(world: World, step: Step): Promise<void> {
   if (step.does === "write") return write(world, phone, step.pick, step.year);
   if (step.does === "strike") return strike(world, phone, step.pick, step.year);
   if (step.does === "erase") return erase(world, phone, step.pick);
+  if (step.does === "sync-as-other") return syncAsOther(world, phone);
+  if (step.does === "sign-out-and-in") return signOutAndIn(world, phone);
   if (step.does === "reload") return reload(phone, step.waiting);
   if (step.does === "upgrade") return upgrade(phone);
   if (step.does === "switch-account") {
