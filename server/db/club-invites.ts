@@ -23,6 +23,13 @@ export function createClubInvites(db: Database) {
         )
         .orderBy(asc(clubInvites.createdAt), asc(clubInvites.id))
         .all(),
+    idsOf: (clubId: string): string[] =>
+      db
+        .select({ id: clubInvites.id })
+        .from(clubInvites)
+        .where(eq(clubInvites.clubId, clubId))
+        .all()
+        .map(({ id }) => id),
     takeUse: (id: string) =>
       db
         .update(clubInvites)

@@ -3,7 +3,7 @@ import type { Store } from "../db/store.ts";
 import { lastOrganiser, notFound } from "../problems.ts";
 import { endMembership } from "./end-membership.ts";
 import { assertMayRemove, maySeeMember, membershipAs } from "./permissions.ts";
-import { revokeInvitesHeldBy } from "./revoke-invites.ts";
+import { revokeAllInvites } from "./revoke-invites.ts";
 import { recordTakenBack } from "./take-back.ts";
 
 /** The members of clubs, each for the account that asks. */
@@ -39,7 +39,7 @@ export function createClubMemberService(store: Store) {
 
     /**
      * Removes a member, or lets one leave; what that member shared is shared no more. Whoever was
-     * removed cannot come back by a link that was open then.
+     * removed cannot come back by a link that was open then: who holds which, nobody knows.
      */
     remove(accountId: string, clubId: string, userId: string): void {
       store.write(() => {
@@ -47,7 +47,7 @@ export function createClubMemberService(store: Store) {
         if (find(clubId, userId).organiser) assertOrganiserLeft(clubId, userId);
         endMembership(store, clubId, userId);
         const left = accountId === userId;
-        const inviteIds = left ? [] : revokeInvitesHeldBy(store, clubId, userId);
+        const inviteIds = left ? [] : revokeAllInvites(store, clubId);
         recordTakenBack(store, {
           members: [{ clubId, userId }],
           invites: inviteIds.map((inviteId) => ({ clubId, inviteId })),

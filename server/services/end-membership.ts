@@ -1,4 +1,5 @@
 import type { Store } from "../db/store.ts";
+import { revokeAllInvites } from "./revoke-invites.ts";
 
 /** Takes an account out of a club, and the account's bikes off the club's Line-up. */
 export function endMembership(store: Store, clubId: string, userId: string): void {
@@ -9,7 +10,7 @@ export function endMembership(store: Store, clubId: string, userId: string): voi
 
 /** The club with its members, invites and shares; of the mails with its links those not sent yet. */
 export function endClub(store: Store, clubId: string): void {
-  for (const { id } of store.clubInvites.liveOf(clubId, "")) store.mails.removeInvitation(id);
+  revokeAllInvites(store, clubId);
   store.clubs.remove(clubId);
 }
 

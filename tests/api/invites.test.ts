@@ -1,7 +1,7 @@
 import { addDays } from "date-fns";
 import { afterEach, describe, expect, it, vi } from "vitest";
 import { invitesResponseSchema } from "../../shared/schemas/club.ts";
-import { invite, join, makeClub } from "../helpers/club.ts";
+import { giveRoles, invite, join, makeClub } from "../helpers/club.ts";
 import { keepLog } from "../helpers/keep-log.ts";
 import { createPhone, signUpRider, type Rider } from "../helpers/rider.ts";
 import { startTestServer, type TestServer } from "../helpers/start-test-server.ts";
@@ -121,7 +121,7 @@ describe("an invite", () => {
 });
 
 describe("a member whom an organiser removed", () => {
-  async function clubAndRemoved() {
+  async function clubAndRider() {
     const { server, organiser, club } = await clubWithOrganiser();
     const rider = await signUpRider(server, "Rex");
     const open = await invite(organiser, club.id, { uses: 50 });
@@ -132,12 +132,13 @@ describe("a member whom an organiser removed", () => {
   }
 
   it("cannot come back by any link that was open, be it under another name", async () => {
-    const { server, organiser, club, rider, open, remove } = await clubAndRemoved();
+    const { server, organiser, club, rider, open, remove } = await clubAndRider();
     const email = rider.user.email.toUpperCase();
     const made = [
       open,
       await invite(organiser, club.id),
       await invite(organiser, club.id, { email }),
+      await invite(organiser, club.id, { email: "friend@club.example" }),
       await invite(organiser, club.id, { email: "all@club.example", uses: 9 }),
     ];
     await remove(organiser).expect(204);
@@ -148,22 +149,33 @@ describe("a member whom an organiser removed", () => {
     expect(await invitesOf(organiser, club.id)).toEqual([]);
   });
 
-  it("takes nobody else's invitation along", async () => {
-    const { server, organiser, club, remove } = await clubAndRemoved();
-    const { token } = await invite(organiser, club.id, { email: "friend@club.example" });
+  it("cannot come back by an invitation made for another as an organiser", async () => {
+    const { organiser, club, rider, remove } = await clubAndRider();
+    await giveRoles(organiser, club.id, rider, { organiser: true }).expect(200);
+    const { token } = await invite(rider, club.id, { email: "friend@club.example" });
     await remove(organiser).expect(204);
-    await join(await signUpRider(server), token);
+    await accept(rider, token).expect(404);
   });
 
-  it("is let in again by an invitation that is mailed afterwards", async () => {
-    const { organiser, club, rider, remove } = await clubAndRemoved();
+  it("cannot come back by one that was used before and has a use left", async () => {
+    const { server, organiser, club, remove, rider } = await clubAndRider();
+    await remove(rider).expect(204);
+    const two = await invite(organiser, club.id, { email: "pair@club.example", uses: 2 });
+    await join(rider, two.token);
+    await remove(organiser).expect(204);
+    await accept(rider, two.token).expect(404);
+    await expectDead(server, two.token);
+  });
+
+  it("is let in again by an invitation that is made afterwards", async () => {
+    const { organiser, club, rider, remove } = await clubAndRider();
     await remove(organiser).expect(204);
     const { token } = await invite(organiser, club.id, { email: rider.user.email });
     await join(rider, token);
   });
 
   it("is another than one who left, to whom the links stay open", async () => {
-    const { rider, open, remove } = await clubAndRemoved();
+    const { rider, open, remove } = await clubAndRider();
     await remove(rider).expect(204);
     await join(rider, open.token);
   });

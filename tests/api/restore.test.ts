@@ -147,18 +147,30 @@ describe("a restored club", () => {
   it("does not open again a link that was revoked since the backup", async () => {
     const server = await startTestServer();
     const { organiser, member, club, invited } = await clubOfFour(server);
-    const other = await invite(organiser, club.id);
     const kept = await invite(organiser, club.id, { email: "friend@club.example" });
     const backup = await backUp(server);
-    const path = `/api/clubs/${club.id}`;
-    await organiser.phone.delete(`${path}/invites/${other.invite.id}`).expect(204);
-    await organiser.phone.delete(`${path}/members/${member.user.id}`).expect(204);
+    const path = `/api/clubs/${club.id}/invites/${invited.invite.id}`;
+    await organiser.phone.delete(path).expect(204);
+    await member.phone.delete(`/api/clubs/${club.id}/members/${member.user.id}`).expect(204);
 
     const restored = await restoreAndStart(server, backup);
     const bob = await signInRider(restored, member.user.email);
     await bob.phone.post(`/api/invites/${invited.token}/accept`).expect(404);
-    await bob.phone.post(`/api/invites/${other.token}/accept`).expect(404);
-    await join(await signUpRider(restored), kept.token);
+    await join(bob, kept.token);
+  });
+
+  it("does not open a link again to who was removed since the backup, used up though it was", async () => {
+    const server = await startTestServer();
+    const { organiser, club, invited } = await clubOfFour(server);
+    const { token } = await invite(organiser, club.id);
+    const backup = await backUp(server);
+    const rex = await signUpRider(server, "Rex");
+    await join(rex, token);
+    await organiser.phone.delete(`/api/clubs/${club.id}/members/${rex.user.id}`).expect(204);
+
+    const stranger = await signUpRider(await restoreAndStart(server, backup), "Una");
+    for (const open of [token, invited.token])
+      await stranger.phone.post(`/api/invites/${open}/accept`).expect(404);
   });
 
   it("that was closed since the backup is closed", async () => {

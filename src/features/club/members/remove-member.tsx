@@ -28,8 +28,8 @@ export function RemoveMember({ club, member, onRemoved }: Props) {
             logs.
           </p>
           <p>
-            The club’s open links end, so that {member.name} cannot come back by one of them: make
-            new ones for others. An invitation mailed to one other person alone stays good.
+            All open invitations of the club end, so that {member.name} cannot come back by one of
+            them, those mailed to others too: make new ones for them.
           </p>
           {problem && <Notice tone="error" title={problem} />}
           <Button look="danger" wide disabled={busy} onClick={() => void submit()}>
