@@ -15,7 +15,7 @@ import { logRequests } from "./routes/log-requests.ts";
 import { createRateLimits } from "./routes/rate-limits.ts";
 import { securityHeaders } from "./routes/security-headers.ts";
 import { serveClient } from "./routes/serve-client.ts";
-import { accessTo } from "./services/permissions.ts";
+import { addressFor } from "./services/address-for.ts";
 import { createServices } from "./services/services.ts";
 
 /** Puts the server's parts together over a migrated database. */
@@ -24,12 +24,7 @@ export function createApp(config: Config, database: Database, log: Logger) {
   const store = createStore(database, config.dataDir);
   const sessions = createSessions(database, publicOrigin);
   const passwords = createPasswords(config.hashCost);
-  const mailer = createMailer(
-    store,
-    config,
-    log,
-    (userId, bikeId) => accessTo(store, userId, bikeId) !== null,
-  );
+  const mailer = createMailer(store, config, log, (mail) => addressFor(store, mail));
   const services = createServices({ store, passwords, sessions, mailer, publicOrigin });
 
   const app: Express = express();

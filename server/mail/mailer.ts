@@ -36,14 +36,14 @@ export const mailFolder = (dataDir: string) => path.join(dataDir, "mail");
  * was sent, and a mail server that is down stops nobody from signing up. What is to be sent stands
  * in the database first, in the transaction that causes it, and is tried until it is sent or of no
  * use any more, by this life of the server or the next. One whose sending was cut off by a crash
- * goes out again under the same Message-ID, by which mail programs know it. One about a bike goes
- * to nobody who may no longer read that bike.
+ * goes out again under the same Message-ID, by which mail programs know it. Where it goes, `addressFor`
+ * says as it is sent; null stands for nowhere.
  */
 export function createMailer(
   { mails }: Pick<Store, "mails">,
   config: Config,
   log: Logger,
-  mayRead: (userId: string, bikeId: string) => boolean,
+  addressFor: (mail: WaitingMail) => string | null,
 ) {
   const sendLetter = config.smtpUrl
     ? smtpTransport(config.smtpUrl, config.mailFrom)
@@ -51,18 +51,16 @@ export function createMailer(
   const { hostname } = new URL(config.publicOrigin);
   let sending: Promise<void> | null = null;
 
-  const isOfUse = ({ goodUntil, userId, bikeId }: WaitingMail): boolean =>
-    goodUntil >= Date.now() && (userId === null || bikeId === null || mayRead(userId, bikeId));
-
   /** The next try is written down before this one: whatever happens, no letter goes out in a loop. */
   async function send(mail: WaitingMail): Promise<void> {
     const { id, topic, letter, goodUntil } = mail;
-    if (!isOfUse(mail)) return void mails.giveUp(id);
+    const to = goodUntil < Date.now() ? null : addressFor(mail);
+    if (to === null) return void mails.giveUp(id);
     const attempts = mail.attempts + 1;
     const nextAttemptAt = Date.now() + waitMs(attempts);
     mails.postpone(id, attempts, nextAttemptAt);
     try {
-      await sendLetter(letter);
+      await sendLetter({ ...letter, to });
     } catch (error) {
       const { code, name } = error as Error & { code?: string };
       // The error's own text may hold the address.

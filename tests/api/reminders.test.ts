@@ -129,6 +129,19 @@ describe("a reminder", () => {
     expect(mail.about("Moss")).toEqual([]);
   });
 
+  it("is not sent to who turned reminders off while it waited", async () => {
+    const { server, rider, mail, remind } = await confirmedRider();
+    await addBike(rider, 16);
+    mail.state.busy = true;
+    await remind();
+    const wanted = { dueMails: false, stopMails: true };
+    await rider.phone.put("/api/account/reminders").send(wanted).expect(200);
+    mail.state.busy = false;
+    pass(1);
+    await server.mailer.sendDue();
+    expect(mail.about("delivery check")).toEqual([]);
+  });
+
   it("is sent once, though servers stop and start between", async () => {
     const { server, rider, mail } = await confirmedRider();
     await addBike(rider, 21);

@@ -37,7 +37,14 @@ async function clubThatIsMailed() {
     return mail.about("Fern: stop advised").flatMap(({ to }) => to).sort(); // prettier-ignore
   };
   const findLow = (who: Rider, days = 0) => who.sync([checkEntry(bikeId, 32, 2.4, daysAgo(days))]);
-  return { ...four, server, mail, bikeId, told, advised, findLow };
+  /** The mail server takes nothing while something happens; then all that waits is to be sent. */
+  async function outage(happens: () => Promise<unknown>): Promise<void> {
+    mail.state.busy = true;
+    await happens();
+    mail.state.busy = false;
+    server.database.$client.exec("UPDATE mails SET next_attempt_at = 0 WHERE letter IS NOT NULL");
+  }
+  return { ...four, server, mail, bikeId, told, advised, findLow, outage };
 }
 
 const emails = (...riders: Rider[]) => riders.map(({ user }) => user.email).sort();
@@ -104,14 +111,36 @@ describe("a delivery judged low", () => {
   });
 
   it("is not told to whom the bike was withdrawn from before the mail could be sent", async () => {
-    const { mail, server, owner, bikeId, club, told, findLow } = await clubThatIsMailed();
-    mail.state.busy = true;
-    await findLow(owner);
+    const { owner, bikeId, club, told, findLow, outage } = await clubThatIsMailed();
+    await outage(async () => {
+      await findLow(owner);
+      expect(await told()).toEqual([]);
+      await withdraw(owner, bikeId, club.id);
+    });
     expect(await told()).toEqual([]);
-    await withdraw(owner, bikeId, club.id);
-    mail.state.busy = false;
-    server.database.$client.exec("UPDATE mails SET next_attempt_at = 0 WHERE letter IS NOT NULL");
-    expect(await told()).toEqual([]);
+  });
+
+  it("is not told to who turned such mails off before the mail could be sent", async () => {
+    const { organiser, owner, mechanic, member, club, told, findLow, outage } =
+      await clubThatIsMailed();
+    await giveRoles(organiser, club.id, member, { mechanic: true }).expect(200);
+    await outage(async () => {
+      await findLow(owner);
+      expect(await told()).toEqual([]);
+      const wanted = { dueMails: true, stopMails: false };
+      await mechanic.phone.put("/api/account/reminders").send(wanted).expect(200);
+    });
+    expect(await told()).toEqual(emails(member));
+  });
+
+  it("goes to the address that its reader has by the time it can be sent", async () => {
+    const { server, owner, mechanic, told, findLow, outage } = await clubThatIsMailed();
+    await outage(async () => {
+      await findLow(owner);
+      expect(await told()).toEqual([]);
+      server.store.users.setEmail(mechanic.user.id, "mick@new.example");
+    });
+    expect(await told()).toEqual(["mick@new.example"]);
   });
 
   it("in a check copied from an old book is no news", async () => {
@@ -187,15 +216,14 @@ describe("a stop that somebody wrote", () => {
   it.each(["lifted", "struck"])(
     "is not told where it was %s before the mail could be sent, and again once it stands",
     async (how) => {
-      const { mail, server, owner, mechanic, bikeId, advised } = await clubThatIsMailed();
-      mail.state.busy = true;
+      const { owner, mechanic, bikeId, advised, outage } = await clubThatIsMailed();
       const note = advice(bikeId, "stop", 1);
-      await mechanic.sync([note]);
-      expect(await advised()).toEqual([]);
       const end = how === "lifted" ? advice(bikeId, "ride") : strikeEntry(bikeId, note.id);
-      await owner.sync([end]);
-      mail.state.busy = false;
-      server.database.$client.exec("UPDATE mails SET next_attempt_at = 0 WHERE letter IS NOT NULL");
+      await outage(async () => {
+        await mechanic.sync([note]);
+        expect(await advised()).toEqual([]);
+        await owner.sync([end]);
+      });
       expect(await advised()).toEqual([]);
       if (how === "lifted") await owner.sync([strikeEntry(bikeId, end.id)]);
       else await mechanic.sync([advice(bikeId)]);
