@@ -1,4 +1,4 @@
-import { and, desc, eq, gt, ne } from "drizzle-orm";
+import { and, desc, eq, gt, lte, ne } from "drizzle-orm";
 import type { Database } from "./open-database.ts";
 import { sessions, users } from "./schema.ts";
 
@@ -10,6 +10,7 @@ export function createSessionRows(db: Database) {
   const mine = (userId: string) => eq(sessions.userId, userId);
 
   return {
+    add: (session: SessionRow) => db.insert(sessions).values(session).run(),
     /** Those that have not run out; the last one seen comes first. */
     of: (userId: string, nowSeconds: number) =>
       db
@@ -26,6 +27,9 @@ export function createSessionRows(db: Database) {
         .delete(sessions)
         .where(and(mine(userId), eq(id, sessionId)))
         .run().changes === 1,
+    removeAnyones: (sessionId: string) => db.delete(sessions).where(eq(id, sessionId)).run(),
+    removeExpired: (nowSeconds: number) =>
+      db.delete(sessions).where(lte(sessions.expiresAt, nowSeconds)).run(),
     removeOthers: (userId: string, keptId: string) =>
       db
         .delete(sessions)

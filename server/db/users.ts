@@ -1,4 +1,4 @@
-import { eq, sql } from "drizzle-orm";
+import { and, eq, sql } from "drizzle-orm";
 import type { Database } from "./open-database.ts";
 import { mailedTokens, sessions, users } from "./schema.ts";
 
@@ -27,6 +27,13 @@ export function createUsers(db: Database) {
       db.update(users).set({ email }).where(eq(users.id, id)).run(),
     setPasswordHash: (id: string, passwordHash: string) =>
       db.update(users).set({ passwordHash }).where(eq(users.id, id)).run(),
+    /** Of the same password: one that was chosen meanwhile stays. */
+    replacePasswordHash: (id: string, last: string, passwordHash: string) =>
+      db
+        .update(users)
+        .set({ passwordHash })
+        .where(and(eq(users.id, id), eq(users.passwordHash, last)))
+        .run(),
     /** The account with its sessions and the links mailed to it. */
     remove(id: string): void {
       db.delete(sessions).where(eq(sessions.userId, id)).run();

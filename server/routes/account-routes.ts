@@ -38,9 +38,10 @@ export function createAccountRoutes({ services, sessions, limits }: ApiParts): R
     readJson,
     async (request, response) => {
       const accountId = accountIdOf(response);
-      await accounts.changePassword(accountId, parseBody(changePasswordSchema, request));
+      const typed = parseBody(changePasswordSchema, request);
+      const cookie = await accounts.changePassword(accountId, typed, request.headers);
       logEvent(request, "password-changed", accountId);
-      response.append("Set-Cookie", await sessions.begin(accountId, request.headers));
+      response.append("Set-Cookie", cookie);
       response.status(204).end();
     },
   );

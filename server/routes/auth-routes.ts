@@ -1,11 +1,10 @@
-import { Router, type Request, type Response } from "express";
+import { Router } from "express";
 import {
   requestPasswordResetSchema,
   resetPasswordSchema,
   signInSchema,
   signUpSchema,
   tokenSchema,
-  type User,
 } from "../../shared/schemas/auth.ts";
 import type { ApiParts } from "./api.ts";
 import { readJson } from "./guard-requests.ts";
@@ -16,25 +15,23 @@ import { accountIdOf, requireSession } from "./require-session.ts";
 export function createAuthRoutes({ services: { accounts }, sessions, limits }: ApiParts): Router {
   const router = Router();
 
-  async function answerSignedIn(request: Request, response: Response, status: number, user: User) {
-    response.append("Set-Cookie", await sessions.begin(user.id, request.headers));
-    response.status(status).json({ user });
-  }
-
   router.post("/auth/sign-up", readJson, limits.signUp, async (request, response) => {
     const user = await accounts.signUp(parseBody(signUpSchema, request));
     logEvent(request, "signed-up", user.id);
-    await answerSignedIn(request, response, 201, user);
+    response.append("Set-Cookie", sessions.begin(user.id, request.headers));
+    response.status(201).json({ user });
   });
 
   router.post("/auth/sign-in", readJson, ...limits.signIn, async (request, response) => {
-    const user = await accounts.signIn(parseBody(signInSchema, request));
+    const credentials = parseBody(signInSchema, request);
+    const { user, cookie } = await accounts.signIn(credentials, request.headers);
     logEvent(request, "signed-in", user.id);
-    await answerSignedIn(request, response, 200, user);
+    response.append("Set-Cookie", cookie);
+    response.json({ user });
   });
 
-  router.post("/auth/sign-out", async (request, response) => {
-    response.append("Set-Cookie", await sessions.end(request.headers.cookie));
+  router.post("/auth/sign-out", (request, response) => {
+    response.append("Set-Cookie", sessions.end(request.headers.cookie));
     logEvent(request, "signed-out");
     response.status(204).end();
   });

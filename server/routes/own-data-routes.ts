@@ -26,7 +26,7 @@ export function createOwnDataRoutes({ services, sessions, limits }: ApiParts): R
     const { password } = parseBody(deleteAccountSchema, request);
     await services.accounts.erase(accountIdOf(response), password);
     logEvent(request, "account-erased", accountIdOf(response));
-    response.append("Set-Cookie", await sessions.end(request.headers.cookie));
+    response.append("Set-Cookie", sessions.end(request.headers.cookie));
     response.status(204).end();
   });
 

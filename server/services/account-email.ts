@@ -42,10 +42,9 @@ export function createAccountEmail(parts: AccountParts) {
   }
 
   /** Tells both addresses. Until the new one's link is followed, nothing has changed. */
-  async function askForEmailChange(userId: string, { email, password }: ChangeEmail) {
-    const user = await confirmPassword(parts, userId, password);
-    if (email === user.email) throw wrongFields({ email: "This is your address already." });
-    store.write(() => {
+  const askForEmailChange = (userId: string, { email, password }: ChangeEmail) =>
+    confirmPassword(parts, userId, password, (user) => {
+      if (email === user.email) throw wrongFields({ email: "This is your address already." });
       if (isTaken(email, userId)) throw emailTaken();
       const issued = tokens.issue(userId, "change-email", email);
       if (!issued) throw tooMany(LINKS_RETRY_SECONDS);
@@ -54,7 +53,6 @@ export function createAccountEmail(parts: AccountParts) {
       mailer.queue({ ...mail, to: email, message });
       mailer.queue({ ...mail, to: user.email, message: emailChangeAskedMessage(publicOrigin) });
     });
-  }
 
   /** Links that were sent to the last address are good for nothing any more, and it is told. */
   function moveTo(email: string, user: UserRow): void {

@@ -19,13 +19,46 @@ export function findUser({ store }: Pick<AccountParts, "store">, userId: string)
   return user;
 }
 
-/** Whoever changes what lets people in types the password first: a phone left open is not enough. */
-export async function confirmPassword(parts: AccountParts, userId: string, password: string) {
-  const user = findUser(parts, userId);
-  if (!(await parts.passwords.passwordMatches(user.passwordHash, password)))
-    throw wrongFields({ password: "This is not your password." });
-  return user;
+/** A password that was typed, and the account it is to be the password of. */
+interface Typed {
+  password: string;
+  find: () => UserRow | undefined;
+  refusal: () => Error;
 }
+
+/**
+ * Does `act`, in a transaction, for whoever typed the account's password. Checking takes a while:
+ * a password that is another one by then is checked again.
+ */
+export async function actWithPassword<T>(
+  { store, passwords }: AccountParts,
+  { password, find, refusal }: Typed,
+  act: (user: UserRow) => T,
+): Promise<T> {
+  for (;;) {
+    const checked = find();
+    const matches = await passwords.passwordMatches(checked?.passwordHash ?? null, password);
+    if (!checked || !matches) throw refusal();
+    const acted = store.write(() => {
+      const user = find();
+      return user?.passwordHash === checked.passwordHash ? { answer: act(user) } : null;
+    });
+    if (acted) return acted.answer;
+  }
+}
+
+const notYourPassword = () => wrongFields({ password: "This is not your password." });
+
+/** Whoever changes what lets people in types the password first: a phone left open is not enough. */
+export const confirmPassword = <T>(
+  parts: AccountParts,
+  userId: string,
+  password: string,
+  act: (user: UserRow) => T,
+): Promise<T> => {
+  const find = () => findUser(parts, userId);
+  return actWithPassword(parts, { password, find, refusal: notYourPassword }, act);
+};
 
 const EASILY_GUESSED =
   "This is among the first that somebody would try. A few words in a row are better.";

@@ -1,5 +1,6 @@
 import type { ChangePassword } from "../../shared/schemas/account.ts";
 import { createMailedTokenService } from "../auth/mailed-token.ts";
+import type { Caller } from "../auth/session.ts";
 import type { UserRow } from "../db/users.ts";
 import { passwordChangedMessage, passwordResetMessage } from "../mail/messages.ts";
 import { deadLink } from "../problems.ts";
@@ -28,10 +29,14 @@ export function createAccountPassword(parts: AccountParts) {
     mailNews(parts, user, passwordChangedMessage(publicOrigin));
   }
 
-  async function changePassword(userId: string, typed: ChangePassword): Promise<void> {
-    const user = await confirmPassword(parts, userId, typed.password);
-    const passwordHash = await hashChosen(parts, user, typed.newPassword, "newPassword");
-    store.write(() => setPassword(user, passwordHash));
+  /** Answers the cookie of the one session that is there afterwards: the caller's. */
+  async function changePassword(userId: string, typed: ChangePassword, caller: Caller) {
+    const chosenBy = findUser(parts, userId);
+    const passwordHash = await hashChosen(parts, chosenBy, typed.newPassword, "newPassword");
+    return confirmPassword(parts, userId, typed.password, (user) => {
+      setPassword(user, passwordHash);
+      return sessions.begin(userId, caller);
+    });
   }
 
   function requestPasswordReset(email: string): void {

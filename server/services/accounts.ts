@@ -1,14 +1,22 @@
 import { randomUUID } from "node:crypto";
 import type { SignIn, SignUp, User } from "../../shared/schemas/auth.ts";
+import type { Caller } from "../auth/session.ts";
+import type { UserRow } from "../db/users.ts";
 import { emailTaken, wrongCredentials } from "../problems.ts";
 import { createAccountEmail } from "./account-email.ts";
-import { confirmPassword, findUser, hashChosen, type AccountParts } from "./account-parts.ts";
+import {
+  actWithPassword,
+  confirmPassword,
+  findUser,
+  hashChosen,
+  type AccountParts,
+} from "./account-parts.ts";
 import { createAccountPassword } from "./account-password.ts";
 import { eraseAccount } from "./erase.ts";
 import { shownUser } from "./shown-user.ts";
 
 export function createAccounts(parts: AccountParts) {
-  const { store, passwords } = parts;
+  const { store, passwords, sessions } = parts;
   const { users } = store;
   const { sendVerification, ...email } = createAccountEmail(parts);
 
@@ -23,19 +31,24 @@ export function createAccounts(parts: AccountParts) {
     return shownUser(user);
   }
 
-  async function signIn({ email, password }: SignIn): Promise<User> {
-    const user = users.findByEmail(email);
-    const matches = await passwords.passwordMatches(user?.passwordHash ?? null, password);
-    if (!user || !matches) throw wrongCredentials();
-    if (passwords.isOutdated(user.passwordHash))
-      users.setPasswordHash(user.id, await passwords.hashPassword(password));
-    return shownUser(user);
+  async function renewHash({ id, passwordHash }: UserRow, password: string): Promise<void> {
+    if (!passwords.isOutdated(passwordHash)) return;
+    users.replacePasswordHash(id, passwordHash, await passwords.hashPassword(password));
   }
 
-  async function erase(userId: string, password: string): Promise<void> {
-    await confirmPassword(parts, userId, password);
-    eraseAccount(store, userId);
+  async function signIn({ email, password }: SignIn, caller: Caller) {
+    const find = () => users.findByEmail(email);
+    const typed = { password, find, refusal: wrongCredentials };
+    const signedIn = await actWithPassword(parts, typed, (user) => ({
+      user,
+      cookie: sessions.begin(user.id, caller),
+    }));
+    await renewHash(signedIn.user, password);
+    return { user: shownUser(signedIn.user), cookie: signedIn.cookie };
   }
+
+  const erase = (userId: string, password: string): Promise<void> =>
+    confirmPassword(parts, userId, password, () => eraseAccount(store, userId));
 
   return {
     find: (id: string): User => shownUser(findUser(parts, id)),

@@ -53,7 +53,7 @@ async function makeTarget(server: TestServer, batch: number): Promise<FuzzTarget
 async function returned(server: TestServer, target: FuzzTarget): Promise<FuzzTarget> {
   const { userId } = target.ids;
   if (!server.store.users.find(userId!)) return makeTarget(server, 0);
-  const cookie = await createSessions(server.database, server.origin).begin(userId!, {});
+  const cookie = createSessions(server.database, server.origin).begin(userId!, {});
   return { ...target, cookie: cookie.split(";")[0]! };
 }
 
