@@ -2,18 +2,34 @@ import SQLite from "better-sqlite3";
 import { mkdirSync, renameSync } from "node:fs";
 import path from "node:path";
 
-/** Throws unless SQLite finds every page, index and reference of the file in order. */
-export function assertIntegrity(file: string): void {
+function lookInto(file: string, look: (copy: SQLite.Database) => void): void {
   const copy = new SQLite(file, { readonly: true, fileMustExist: true });
   try {
-    const found: unknown = copy.pragma("integrity_check", { simple: true });
-    if (found !== "ok") throw new Error(`${file} is damaged: ${String(found)}`);
-    const orphans = copy.pragma("foreign_key_check") as unknown[];
-    if (orphans.length > 0) throw new Error(`${file} holds ${orphans.length} rows of no parent.`);
+    look(copy);
   } finally {
     copy.close();
   }
 }
+
+/** Throws unless SQLite finds every page, index and reference of the file in order. */
+export const assertIntegrity = (file: string): void =>
+  lookInto(file, (copy) => {
+    const found: unknown = copy.pragma("integrity_check", { simple: true });
+    if (found !== "ok") throw new Error(`${file} is damaged: ${String(found)}`);
+    const orphans = copy.pragma("foreign_key_check") as unknown[];
+    if (orphans.length > 0) throw new Error(`${file} holds ${orphans.length} rows of no parent.`);
+  });
+
+/** There from the first version on. */
+const ownTables = ["__drizzle_migrations", "users", "bikes", "entries"];
+
+/** Throws unless the file is a database of ours: to SQLite an empty file is a sound one too. */
+export const assertOurs = (file: string): void =>
+  lookInto(file, (copy) => {
+    const tables = copy.prepare<[], string>("SELECT name FROM sqlite_schema").pluck().all();
+    if (!ownTables.every((name) => tables.includes(name)))
+      throw new Error(`${file} is no backup of Sumpless: it holds no accounts and logbooks.`);
+  });
 
 /** Out of WAL mode a database is one file, and stays one however it is looked at. */
 function intoOneFile(file: string): void {

@@ -1,6 +1,6 @@
 import { copyFileSync, existsSync, mkdirSync, renameSync, rmSync } from "node:fs";
 import path from "node:path";
-import { assertIntegrity, backupName, backupsDir } from "../db/back-up-database.ts";
+import { assertIntegrity, assertOurs, backupName, backupsDir } from "../db/back-up-database.ts";
 import { migrateDatabase } from "../db/migrate-database.ts";
 import { databaseFile, openDatabase, openReadOnly, type Database } from "../db/open-database.ts";
 import { createMails } from "../db/mails.ts";
@@ -64,6 +64,7 @@ function askSetAside<T>(setAside: string | null, ask: (database: Database) => T)
  */
 export async function restoreDatabase(dataDir: string, backup: string) {
   assertIntegrity(backup);
+  assertOurs(backup);
   const setAside = setAsideDatabase(dataDir);
   const file = databaseFile(dataDir);
   const readied = `${file}.restoring`;

@@ -1,3 +1,4 @@
+import SQLite from "better-sqlite3";
 import { subDays } from "date-fns";
 import { existsSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
@@ -300,6 +301,21 @@ describe("restoring", () => {
     await expect(restoring).rejects.toThrow("stop the server first");
     await signUpRider(server);
   }, 15_000);
+
+  it.each(["empty", "another program's"])("is refused from a file that is %s", async (whose) => {
+    const server = await startTestServer();
+    const rider = await signUpRider(server);
+    const file = path.join(temporaryDir(), "other.sqlite");
+    writeFileSync(file, "");
+    if (whose !== "empty") {
+      const other = new SQLite(file);
+      other.exec("CREATE TABLE users (id TEXT); INSERT INTO users VALUES ('a')");
+      other.close();
+    }
+    await server.stop();
+    await expect(restoreDatabase(server.dataDir, file)).rejects.toThrow("is no backup of Sumpless");
+    await signInRider(await startTestServer({ dataDir: server.dataDir }), rider.user.email);
+  });
 
   it("is refused from a damaged backup, and possible over a damaged database", async () => {
     const server = await startTestServer();
