@@ -37,9 +37,10 @@ export function createSharingRoutes({ services, sessions }: ApiParts): Router {
     .get((request, response) => {
       const wanted = parseShape(lineUpPageSchema, request.query);
       const page = services.lineUp(accountIdOf(response), request.params.clubId, wanted);
-      // Kept by the browser, and never used without asking whether it still holds.
-      response.set({ "Cache-Control": "private, no-cache", ETag: page.etag });
-      if (request.fresh) response.status(304).end();
+      response.set("ETag", page.etag);
+      // The phone keeps the board itself. Asking past all caches, it says no-cache too: to Express
+      // nothing would then ever be fresh.
+      if (request.get("If-None-Match")?.includes(page.etag)) response.status(304).end();
       else response.type("json").send(page.json());
     });
 

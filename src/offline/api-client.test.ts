@@ -3,7 +3,7 @@ import { createServer, type RequestListener, type Server } from "node:http";
 import type { AddressInfo } from "node:net";
 import { afterEach, describe, expect, it } from "vitest";
 import { z } from "zod";
-import { apiRequest } from "./api-client.ts";
+import { apiNewer, apiRequest } from "./api-client.ts";
 import { ApiError, NoNetworkError } from "./errors.ts";
 
 const schema = z.object({ bikes: z.array(z.string()) });
@@ -106,5 +106,30 @@ describe("a request to the server", () => {
     const headers = { "content-type": "text/html", "retry-after": "9" };
     const error = await failureOf(await serve(answer(413, headers, "<h1>Too large</h1>")));
     expect(error).toMatchObject({ name: "NoNetworkError", status: 413, retryAfterMs: 9_000 });
+  });
+});
+
+describe("asking for what is newer", () => {
+  afterEach(() => {
+    server.closeAllConnections();
+    server.close();
+  });
+
+  const board: RequestListener = (request, response) =>
+    request.headers["if-none-match"] === '"2"'
+      ? response.writeHead(304).end()
+      : response.writeHead(200, { ...asJson, etag: '"2"' }).end('{"bikes":["a"]}');
+
+  it("answers it with its tag, and nothing where the tag's answer still holds", async () => {
+    const url = await serve(board);
+    const newer = { etag: '"2"', content: { bikes: ["a"] } };
+    expect(await apiNewer(url, schema, null)).toEqual(newer);
+    expect(await apiNewer(url, schema, '"1"')).toEqual(newer);
+    expect(await apiNewer(url, schema, '"2"')).toBeNull();
+  });
+
+  it("takes a 304 that nobody asked for as no network", async () => {
+    const url = await serve(answer(304, {}));
+    await expect(apiNewer(url, schema, null)).rejects.toBeInstanceOf(NoNetworkError);
   });
 });

@@ -12,8 +12,8 @@ export interface ApiRequest<T> {
   /** Left out where the answer has no body. */
   schema?: AnswerSchema<T>;
   timeoutMs?: number;
-  /** The browser may keep the answer, and asks each time whether it still holds. */
-  revalidates?: boolean;
+  /** Of the answer that is here already: where it still holds, it is not sent again. */
+  etag?: string | null;
   fetch?: typeof fetch;
 }
 
@@ -23,11 +23,12 @@ const TIMEOUT_MS = 30_000;
 const requestInit = (request: ApiRequest<unknown>): RequestInit => ({
   method: request.method ?? "GET",
   redirect: "error",
-  cache: request.revalidates ? "no-cache" : "no-store",
+  cache: "no-store",
   signal: AbortSignal.timeout(request.timeoutMs ?? TIMEOUT_MS),
   headers: {
     accept: "application/json",
     ...(request.body === undefined ? {} : { "content-type": "application/json" }),
+    ...(request.etag ? { "if-none-match": request.etag } : {}),
   },
   ...(request.body === undefined ? {} : { body: JSON.stringify(request.body) }),
 });
@@ -63,8 +64,15 @@ async function answerOf<T>(path: string, request: ApiRequest<T>): Promise<Respon
   const response = await send(path, requestInit(request)).catch((cause: unknown) => {
     throw new NoNetworkError(undefined, { cause });
   });
-  if (!response.ok || response.redirected) throw await failure(response);
+  const holds = response.status === 304 && Boolean(request.etag);
+  if ((!response.ok && !holds) || response.redirected) throw await failure(response);
   return response;
+}
+
+async function contentOf<T>(response: Response, schema: AnswerSchema<T>): Promise<T> {
+  const parsed = schema.safeParse(await json(response));
+  if (parsed.success) return parsed.data;
+  throw new NoNetworkError({ status: response.status, retryAfterMs: null });
 }
 
 /** A file that the server makes: what it answers counts only if it is of that type. */
@@ -80,8 +88,16 @@ export async function apiFile(path: string, type: string): Promise<Blob> {
  */
 export async function apiRequest<T = void>(path: string, request: ApiRequest<T> = {}): Promise<T> {
   const response = await answerOf(path, request);
-  if (!request.schema) return undefined as T;
-  const parsed = request.schema.safeParse(await json(response));
-  if (parsed.success) return parsed.data;
-  throw new NoNetworkError({ status: response.status, retryAfterMs: null });
+  return request.schema ? contentOf(response, request.schema) : (undefined as T);
+}
+
+/** Asks only for what is newer than the answer of this `etag`: null where that one still holds. */
+export async function apiNewer<T>(
+  path: string,
+  schema: AnswerSchema<T>,
+  etag: string | null,
+): Promise<{ etag: string | null; content: T } | null> {
+  const response = await answerOf(path, { etag });
+  if (response.status === 304) return null;
+  return { etag: response.headers.get("etag"), content: await contentOf(response, schema) };
 }

@@ -1,7 +1,6 @@
 /** The calls to `/api/clubs` and `/api/invites`. */
 import {
   clubResponseSchema,
-  clubsResponseSchema,
   inviteOfTokenSchema,
   invitesResponseSchema,
   membersResponseSchema,
@@ -15,9 +14,6 @@ import { apiRequest } from "../../offline/index.ts";
 import { FieldErrors } from "../../ui/use-submit.ts";
 
 const clubApi = (clubId: string) => `/api/clubs/${clubId}`;
-
-export const readClubs = async () =>
-  (await apiRequest("/api/clubs", { schema: clubsResponseSchema })).clubs;
 
 export async function makeClub(name: string) {
   const typed = newClubSchema.safeParse({ name: name.trim() });

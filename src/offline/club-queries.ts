@@ -1,0 +1,61 @@
+/**
+ * What this phone keeps of the server's word on clubs. The sync asks for it again, and so do the
+ * screens. Every key begins with `clubs`. Not part of the first load.
+ */
+import { queryOptions } from "@tanstack/react-query";
+import {
+  clubsResponseSchema,
+  lineUpResponseSchema,
+  MAX_LINE_UP_PAGE,
+  type LineUpRow,
+} from "../../shared/schemas/club.ts";
+import { apiNewer, apiRequest } from "./api-client.ts";
+
+const kept = { networkMode: "always", meta: { persist: true } } as const;
+
+/** The clubs this account is in, with what it is there. */
+export const clubsQuery = queryOptions({
+  queryKey: ["clubs"],
+  queryFn: async () => (await apiRequest("/api/clubs", { schema: clubsResponseSchema })).clubs,
+  ...kept,
+});
+
+/** A club's board, under the tag by which the server tells whether it has changed. */
+export interface LineUp {
+  etag: string | null;
+  bikes: LineUpRow[];
+}
+
+function readPage(clubId: string, after: string | null, etag: string | null) {
+  const query = new URLSearchParams({
+    limit: String(MAX_LINE_UP_PAGE),
+    ...(after === null ? {} : { after }),
+  });
+  const path = `/api/clubs/${clubId}/line-up?${query.toString()}`;
+  return apiNewer(path, lineUpResponseSchema, etag);
+}
+
+/**
+ * The whole board, page by page, unless it is as it was. It may change in between: a bike met twice
+ * counts as met last, and the first page's tag then brings the board anew the next time.
+ */
+async function readLineUp(clubId: string, last: LineUp | undefined): Promise<LineUp> {
+  const first = await readPage(clubId, null, last?.etag ?? null);
+  if (!first) return last!;
+  const bikes = new Map<string, LineUpRow>();
+  let page = first.content;
+  for (;;) {
+    for (const bike of page.bikes) bikes.set(bike.bikeId, bike);
+    if (page.next === null || page.bikes.length === 0) break;
+    page = (await readPage(clubId, page.next, null))!.content;
+  }
+  return { etag: first.etag, bikes: [...bikes.values()] };
+}
+
+/** The bikes shared with a club, for its mechanics. */
+export const lineUpQuery = (clubId: string) =>
+  queryOptions({
+    queryKey: ["clubs", clubId, "line-up"],
+    queryFn: ({ client, queryKey }) => readLineUp(clubId, client.getQueryData<LineUp>(queryKey)),
+    ...kept,
+  });
