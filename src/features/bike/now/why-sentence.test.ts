@@ -34,7 +34,8 @@ describe("whySentence", () => {
   it("compares nothing while settling, or where nothing was delivered", () => {
     const settling = { verdict: "settling", ratio: null, uRatio: null };
     expect(say(settling)).toMatch(/is the baseline/);
-    expect(say({ ...settling, action: "repeat" })).toMatch(/already be tired/);
+    expect(say({ ...settling, action: "repeat", flags: ["below-usual"] })).toMatch(/be tired/);
+    expect(say({ ...settling, action: "repeat", flags: ["reads-high"] })).toMatch(/far above/);
     expect(say({ verdict: "low", action: "stop", ratio: 0, flags: ["no-delivery"] })).toBe(
       "Nothing was delivered.",
     );

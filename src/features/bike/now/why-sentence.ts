@@ -1,6 +1,7 @@
 import { flagSentences } from "../../../../shared/delivery/flags.ts";
 import type { CheckSummary } from "../../../../shared/schemas/summary.ts";
 import { formatPercent, GIVE_OR_TAKE } from "../../../ui/format-quantity.ts";
+import { settlingSentence } from "../../../ui/settling-sentence.ts";
 
 interface Judged extends Pick<CheckSummary, "verdict" | "action" | "flags"> {
   ratio: number | null;
@@ -13,9 +14,7 @@ export function whySentence(judged: Judged | null, actLimit: number): string {
   const { verdict, action, ratio, uRatio } = judged;
   if (judged.flags.includes("no-delivery")) return flagSentences["no-delivery"];
   if (verdict === "settling" || ratio === null || uRatio === null)
-    return action === "ride"
-      ? "The first check is the baseline that later ones are held to."
-      : "The first check gave so little that the pump may already be tired.";
+    return settlingSentence(judged);
   const delivers = `The pump delivers ${formatPercent(ratio)} of its baseline, give or take ${formatPercent(GIVE_OR_TAKE * uRatio)}`;
   const limit = formatPercent(actLimit);
   if (verdict === "low") return `${delivers}: below the limit of ${limit}.`;

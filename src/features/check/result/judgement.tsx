@@ -4,6 +4,7 @@ import type { BikeRecord } from "../../../offline/index.ts";
 import { ActionLine } from "../../../ui/action-line.tsx";
 import { certaintySentence } from "../../../ui/certainty-sentence.ts";
 import { Column } from "../../../ui/column.tsx";
+import { settlingSentence } from "../../../ui/settling-sentence.ts";
 import { VerdictMark } from "../../../ui/verdict-mark.tsx";
 import { CheckFigures } from "./check-figures.tsx";
 import { CheckFlags } from "./check-flags.tsx";
@@ -47,10 +48,4 @@ export function Judgement({ details, check, flags, body, hoseMaybeOff, fills }: 
       </div>
     </>
   );
-}
-
-function settlingSentence({ action }: CheckSummary): string {
-  return action === "ride"
-    ? "There is nothing to compare with yet: this check is the baseline that later ones are held to."
-    : "There is nothing to compare with yet, and the first check gave little: make sure before it becomes the baseline.";
 }
