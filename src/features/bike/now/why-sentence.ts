@@ -13,8 +13,7 @@ export function whySentence(judged: Judged | null, actLimit: number): string {
   if (!judged) return "Make a delivery check before you rely on the pump.";
   const { verdict, action, ratio, uRatio } = judged;
   if (judged.flags.includes("no-delivery")) return flagSentences["no-delivery"];
-  if (verdict === "settling" || ratio === null || uRatio === null)
-    return settlingSentence(judged);
+  if (verdict === "settling" || ratio === null || uRatio === null) return settlingSentence(judged);
   const delivers = `The pump delivers ${formatPercent(ratio)} of its baseline, give or take ${formatPercent(GIVE_OR_TAKE * uRatio)}`;
   const limit = formatPercent(actLimit);
   if (verdict === "low") return `${delivers}: below the limit of ${limit}.`;
