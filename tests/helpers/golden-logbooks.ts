@@ -1,5 +1,6 @@
+import { expect } from "vitest";
 import type { LogEntry } from "../../shared/schemas/entry.ts";
-import { logbook } from "./logbook-in-words.ts";
+import { logbook, syringe5 } from "./logbook-in-words.ts";
 
 /**
  * Logbooks whose summaries were worked by hand from docs/measurement.md, so that a fault which phone
@@ -26,6 +27,164 @@ function struckCheck() {
   const book = moss().check(12, [3]).check(32, [1.2]);
   return book.strike(book.lastId, "Read from the wrong end").entries;
 }
+
+const four = (ml: number) => [ml, ml, ml, ml];
+const near = (value: number) => expect.closeTo(value, 6) as number;
+const newSyringe5 = { ...syringe5, id: "five-new" };
+
+/**
+ * Sessions of four runs, a fill a run, each with u² = 0.04/24 + (0.02·V)²/4 + (0.0041663·V)²:
+ * 0.05199, 0.05159, 0.05120 and 0.05081 mL at 15 °C for 3.00, 2.94, 2.88 and 2.82. At 10, 30, 50 and
+ * 70 h their line falls by 0.003·0.99639 mL an hour, u = 0.0514/√(30² + 10² + 10² + 30²) about. It
+ * meets 0.85·3.00 = 2.55 at 10 + 0.45/0.003 = 160 h. The last digits and the roots of Fieller's
+ * equation are numpy's, by inverting the normal equations.
+ */
+const decline = (book: ReturnType<typeof logbook>) =>
+  book.check(10, four(3)).check(30, four(2.94)).check(50, four(2.88)).check(70, four(2.82));
+const declineTrend = {
+  perHour: near(-0.002989164),
+  uPerHour: near(0.001149268),
+  reachesLimitAtHours: near(160),
+  range: { low: near(112.342842), high: near(367.153037) },
+};
+
+const trendLogbooks: GoldenLogbook[] = [
+  {
+    title: "checks a declining pump halfway to where it may be low at the earliest",
+    // 70 + (112.343 − 70)/2 = 91.171, before the interval's 110. r 0.94, u 0.0236: Φ(−3.8).
+    entries: decline(logbook().bike({ name: "Moss", hasScreen: true })).entries,
+    expected: {
+      verdict: "holding",
+      action: "ride",
+      trend: declineTrend,
+      due: {
+        atHours: near(91.171421),
+        inHours: near(21.171421),
+        reason:
+          "Delivery is declining: checked again 21.2 h after the last check, halfway to where it may be low.",
+      },
+      flags: [],
+    },
+    pLow: 0.0001,
+  },
+  {
+    title: "keeps to the interval where that ends sooner",
+    entries: decline(moss()).entries,
+    expected: {
+      trend: declineTrend,
+      due: { atHours: 90, reason: "Delivery is holding: 20 h after the last check." },
+    },
+  },
+  {
+    title: "measures a renewed pump's decline by its own baseline",
+    entries: decline(moss().check(5, four(3.4)).work(9, ["pump-renewed"], true)).entries,
+    expected: { trend: declineTrend },
+  },
+  {
+    title: "measures the decline by the earlier baseline where a new one could not replace it",
+    // 2.74/3 = 0.913 is dropping, so 3.00 stays: 2.55 is met at 30 + (2.74 − 2.55)/0.004 = 77.5 h.
+    entries: moss()
+      .check(10, four(3))
+      .work(30, ["screen-cleaned"], true)
+      .check(30, four(2.74))
+      .check(50, four(2.66))
+      .check(70, four(2.58)).entries,
+    expected: {
+      trend: {
+        perHour: near(-0.003985552),
+        uPerHour: near(0.001760486),
+        reachesLimitAtHours: near(77.5),
+        range: { low: near(62.621834), high: near(153.302946) },
+      },
+    },
+  },
+  {
+    title: "does not call a fall declining that its uncertainty explains",
+    // One run each: slope −0.000996, u 0.002266.
+    entries: moss().check(10, [3]).check(30, [2.98]).check(50, [2.96]).check(70, [2.94]).entries,
+    expected: {
+      trend: {
+        perHour: near(-0.000996388),
+        uPerHour: near(0.002266458),
+        reachesLimitAtHours: null,
+        range: null,
+      },
+      due: { atHours: 90 },
+    },
+  },
+  {
+    title: "widens a trend's uncertainties by the scatter about it",
+    // χ²/ν = 4.3639: u(slope) = 0.00081908·√4.3639, and the covariance 4.3639 times as large.
+    entries: moss()
+      .check(10, four(3.2))
+      .check(30, four(2.95))
+      .check(50, four(3.05))
+      .check(70, four(2.75))
+      .check(90, four(2.8)).entries,
+    expected: {
+      trend: {
+        perHour: near(-0.004954757),
+        uPerHour: near(0.001711055),
+        reachesLimitAtHours: near(95.885818),
+        range: { low: near(74.898028), high: near(159.623723) },
+      },
+      flags: ["trend-scatter"],
+    },
+  },
+  {
+    title: "sees no trend in two sessions",
+    entries: moss().check(10, four(3)).check(30, four(2.8)).entries,
+    expected: { trend: null },
+  },
+  {
+    title: "sees no trend within 10 h",
+    entries: moss().check(10, four(3)).check(14, four(2.8)).check(19.9, four(2.6)).entries,
+    expected: { trend: null },
+  },
+  {
+    title: "sees one over 10 h",
+    // Slope −0.04·0.99639; 2.55 is met at 10 + 0.45/0.04 = 21.25 h.
+    entries: moss().check(10, four(3)).check(15, four(2.8)).check(20, four(2.6)).entries,
+    expected: { trend: { perHour: near(-0.039855523), reachesLimitAtHours: near(21.25) } },
+  },
+  {
+    title: "counts both scales in the trend where there are two syringes",
+    // ISO 7886-1: 4 % of V, so 0.0693·0.99639 mL at 3.00. The same decline, no longer surely one.
+    entries: moss()
+      .check(10, four(3))
+      .check(30, four(2.94))
+      .check(50, four(2.88), { syringe: newSyringe5 })
+      .check(70, four(2.82), { syringe: newSyringe5 }).entries,
+    expected: {
+      trend: {
+        perHour: near(-0.002989164),
+        uPerHour: near(0.001887337),
+        reachesLimitAtHours: null,
+        range: null,
+      },
+      due: { atHours: 90 },
+    },
+    // r 0.94 as before, its u with both scales 0.0387: Φ(−2.325).
+    pLow: 0.01,
+  },
+  {
+    title: "leaves a session at doubted hours out of the trend",
+    // The line of the first three; 700 was typed for 70.0.
+    entries: moss()
+      .check(10, four(3))
+      .check(30, four(2.94))
+      .check(50, four(2.88))
+      .check(700, four(2.82)).entries,
+    expected: {
+      trend: {
+        perHour: near(-0.002989164),
+        uPerHour: near(0.00182412),
+        reachesLimitAtHours: null,
+      },
+      due: { atHours: 70 },
+    },
+  },
+];
 
 export const goldenLogbooks: GoldenLogbook[] = [
   {
@@ -207,6 +366,7 @@ export const goldenLogbooks: GoldenLogbook[] = [
     entries: moss().check(10, [0]).entries,
     expected: { verdict: "low", action: "stop", pLow: 1, flags: ["no-delivery"] },
   },
+  ...trendLogbooks,
 ];
 
 /** The first check of the first golden logbook, mL a run at 15 °C. */
