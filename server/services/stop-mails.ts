@@ -55,14 +55,18 @@ function tell(parts: MailParts, news: StopNews, compose: (about: AboutStop) => M
 
 /**
  * Tells owner and mechanics that a bike's delivery is judged *stop*, once for each session so
- * judged. To be called in the transaction that stores the entry which made it so.
+ * judged. Its author is who wrote the lowest of the session's checks, which is low by itself. To be
+ * called in the transaction that stores the entry which made it so.
  */
-export function mailStop(parts: MailParts, summary: Summary, authorId: string): void {
+export function mailStop(parts: MailParts, summary: Summary): void {
   const { bikeId, name: bikeName, action } = summary;
   const session = lastSession(summary);
   const [first, last] = [session[0], session.at(-1)];
   if (action !== "stop" || !first || !last) return;
-  const authorName = parts.store.users.find(authorId)?.name ?? "";
+  const { store } = parts;
+  const lowest = session.reduce((low, check) => (check.perRunMl < low.perRunMl ? check : low));
+  const authorId = store.entries.find(lowest.entryId)?.authorId ?? "";
+  const authorName = store.users.find(authorId)?.name ?? "a former member";
   const check = { topic: "stop", entryId: first.entryId, at: last.at } as const;
   tell(parts, { bikeId, bikeName, authorId, ...check }, (about) =>
     stopMessage({ ...about, authorName, ratio: last.ratio }),

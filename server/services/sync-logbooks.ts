@@ -13,7 +13,7 @@ export function syncLogbooks(
 ): SyncResponse {
   if (request.account !== undefined && request.account !== accountId) throw otherAccount();
   const results = pushEntries(parts.store, accountId, request.entries, ({ summary, advice }) => {
-    mailStop(parts, summary, accountId);
+    mailStop(parts, summary);
     mailStopAdvice(parts, summary, advice);
   });
   const { epoch, ...pulled } = pullEntries(parts.store, accountId, request);

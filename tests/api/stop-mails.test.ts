@@ -143,6 +143,24 @@ describe("a delivery judged low", () => {
     expect(await told()).toEqual(["mick@new.example"]);
   });
 
+  it("is not told to who found it, whatever others write after", async () => {
+    const { owner, mechanic, bikeId, told, findLow } = await clubThatIsMailed();
+    await findLow(mechanic, 1);
+    await owner.sync([hoursEntry(bikeId, 32.5, daysAgo(0))]);
+    expect(await told()).toEqual(emails(owner));
+  });
+
+  it("is told under the name of who found it, though another's entry made it stand", async () => {
+    const { owner, mechanic, mail, bikeId, told, findLow } = await clubThatIsMailed();
+    const held = checkEntry(bikeId, 32, 3.2, daysAgo(1));
+    await owner.sync([held]);
+    await findLow(mechanic);
+    expect(await told()).toEqual([]);
+    await owner.sync([strikeEntry(bikeId, held.id)]);
+    expect(await told()).toEqual(emails(owner));
+    expect(mail.about("Fern: delivery low")[0]!.words).toContain("After an entry by Mick,");
+  });
+
   it("in a check copied from an old book is no news", async () => {
     const { owner, told, findLow } = await clubThatIsMailed();
     await findLow(owner, 20);
