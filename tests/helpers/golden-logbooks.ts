@@ -186,6 +186,118 @@ const trendLogbooks: GoldenLogbook[] = [
   },
 ];
 
+const ruleLogbooks: GoldenLogbook[] = [
+  {
+    title: "points out oil over 10 °C warmer or colder than at the baseline",
+    entries: moss()
+      .check(10, [3], { oilTempC: 20 })
+      .check(30, [3], { oilTempC: 30 })
+      .check(50, [3], { oilTempC: 30.5 })
+      .check(70, [3], { oilTempC: 10 })
+      .check(90, [3], { oilTempC: 9.5 }).entries,
+    expected: {
+      checks: [
+        { flags: [] },
+        { flags: [] },
+        { flags: ["temperature-differs"] },
+        { flags: [] },
+        { flags: ["temperature-differs"] },
+      ],
+    },
+  },
+  {
+    title: "counts both scales where a syringe was replaced by its like",
+    // 4 % of V on each side, /√3: u = 0.9·√(0.0357² + 0.0231² + 0.0340² + 0.0231²) = 0.0537.
+    // Without the session's own 0.0357 still 0.0425, and (0.9 − 0.85)/0.0425 < 1.645: never settled.
+    entries: moss().check(10, [3]).check(30, [2.7], { syringe: newSyringe5 }).entries,
+    expected: {
+      verdict: "dropping",
+      action: "repeat",
+      flags: ["baseline-cannot-settle", "syringe-differs"],
+    },
+    pLow: 0.1758,
+  },
+  {
+    title: "never takes two unknown syringes for one",
+    // 5 % of V on each side, /√3: u = 0.0580.
+    entries: moss().check(10, [3], { syringe: null }).check(30, [2.7], { syringe: null }).entries,
+    expected: {
+      verdict: "dropping",
+      flags: ["syringe-unknown", "baseline-cannot-settle", "syringe-differs"],
+    },
+    pLow: 0.1944,
+  },
+  {
+    title: "says that something spoiled a reading, where something did",
+    entries: moss()
+      .check(10, [3], { spoilers: ["bubbles"] })
+      .check(30, [3], { spoilers: [] }).entries,
+    expected: { checks: [{ flags: ["spoiled"] }, { flags: [] }] },
+  },
+  {
+    title: "says that the last check could not be counted, and keeps to the one before",
+    entries: moss()
+      .check(10, [2.9])
+      .check(29, [], { runs: [{ startMl: 0, endMl: 1, void: true }] }).entries,
+    expected: {
+      verdict: "settling",
+      checks: [{}],
+      flags: ["check-not-counted"],
+      due: { atHours: 30, inHours: 1 },
+    },
+  },
+  {
+    title: "says it of the last check only",
+    entries: moss()
+      .check(10, [3])
+      .check(29, [], { runs: [{ startMl: 0, endMl: 1, void: true }] })
+      .check(30, [2.95]).entries,
+    expected: { verdict: "holding", checks: [{}, {}], flags: [] },
+  },
+  {
+    title: "counts on from a check up to an hour above the hours now",
+    entries: moss().check(32, [3]).hours(30.9).hours(31).entries,
+    expected: { hours: { now: 31 }, due: { atHours: 52, inHours: 21 }, flags: [] },
+  },
+  {
+    title: "is due now where the meter shows over an hour less than at the check",
+    // The second reading agrees with the first, so both count.
+    entries: moss().check(32, [3]).hours(30.8).hours(30.9).entries,
+    expected: {
+      hours: { now: 30.9 },
+      due: { atHours: 30.9, inHours: 0 },
+      flags: ["hours-below-session"],
+    },
+  },
+  {
+    title: "watches no further than a bike's own stop limit",
+    // 2.9/3 = 0.9667, u 0.0470: Φ((0.95 − 0.9667)/0.0470) = 0.3616 for both; for 0.92 it were 0.16.
+    entries: logbook().bike({ name: "Moss", actDrop: 0.05 }).check(10, [3]).check(30, [2.9])
+      .entries,
+    expected: {
+      verdict: "holding",
+      action: "repeat",
+      checks: [{}, { pDropping: expect.closeTo(0.36156, 4) as number }],
+    },
+    pLow: 0.3616,
+  },
+  {
+    title: "lets a new series begin with whatever an updated controller gives",
+    entries: moss()
+      .check(10, [3])
+      .work(30, ["controller-updated"], true)
+      .check(30, [2.5])
+      .check(50, [2.5]).entries,
+    expected: {
+      verdict: "holding",
+      action: "ride",
+      due: { atHours: 70 },
+      series: [{ startedBy: "first-check" }, { startedBy: "work" }],
+      checks: [{}, { verdict: "settling", action: "ride", flags: [] }, { ratio: 1 }],
+    },
+  },
+];
+
 export const goldenLogbooks: GoldenLogbook[] = [
   {
     title: "counts what is left of the interval over a meter change",
@@ -367,6 +479,7 @@ export const goldenLogbooks: GoldenLogbook[] = [
     expected: { verdict: "low", action: "stop", pLow: 1, flags: ["no-delivery"] },
   },
   ...trendLogbooks,
+  ...ruleLogbooks,
 ];
 
 /** The first check of the first golden logbook, mL a run at 15 °C. */
