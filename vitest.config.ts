@@ -36,6 +36,12 @@ export default defineConfig({
       },
       {
         plugins: [react()],
+        // The router's CommonJS entry asks for an ES module, which `vmForks` cannot give it.
+        resolve: {
+          alias: {
+            "react-router-dom": `${import.meta.dirname}/node_modules/react-router-dom/dist/index.mjs`,
+          },
+        },
         test: {
           ...patience,
           name: "client",

@@ -1,5 +1,7 @@
 import { expect, test } from "vitest";
+import { summariseLogbook } from "../../../../shared/logbook/summarise-logbook.ts";
 import { entrySchema } from "../../../../shared/schemas/entry.ts";
+import { logbook } from "../../../../tests/helpers/logbook-in-words.ts";
 import { causes, workBody } from "./causes.ts";
 
 test("looks for the cheap and likely causes first", () => {
@@ -38,4 +40,12 @@ test("makes an entry that the log takes, whatever is ticked", () => {
     ),
   };
   expect(entrySchema.safeParse(entry).success).toBe(true);
+});
+
+test("makes no entry that says the hose is back on, whatever is ticked", () => {
+  const all = causes.map(({ id }) => id);
+  const book = logbook().bike({ name: "Bike" }).check(12, [3], { closedOut: false });
+  book.work(12, workBody(all, true).items, true);
+  const { flags } = summariseLogbook({ ownerId: "owner", entries: book.entries });
+  expect(flags).toContain("not-closed-out");
 });

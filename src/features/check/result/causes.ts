@@ -14,7 +14,8 @@ export const causes: readonly Cause[] = [
   { id: "warm", line: "Repeated warm, with a charged battery", item: "other" },
   { id: "tank", line: "Oil level and tank vent looked at", item: "other" },
   { id: "screen", line: "Screen or filter cleaned", item: "screen-cleaned" },
-  { id: "air", line: "Air leak looked for, clips seated, line bled", item: "line-bled" },
+  // Not `line-bled`: that stands for a close-out, and would say that the hose is back on.
+  { id: "air", line: "Air leak looked for, clips seated, line bled", item: "other" },
   { id: "hose", line: "Kinked or swollen hose renewed", item: "hose-renewed" },
   { id: "volts", line: "Connector, earth and volts under load looked at", item: "other" },
   {

@@ -32,6 +32,7 @@ interface Props {
 export function ResultPage({ bike: { record, log }, reading }: Props) {
   const { entryId } = useParams();
   const { bikeId, access, details, summary, advice } = record;
+  const paths = stepPaths(bikeId);
   const { hoseMaybeOff } = useOpenDraft(record);
   const line = log.filter(isCheck).find(({ entry }) => entry.id === entryId);
   const check = summary.checks.find((one) => one.entryId === entryId);
@@ -53,12 +54,17 @@ export function ResultPage({ bike: { record, log }, reading }: Props) {
       back={back}
       action={
         <>
+          {hoseMaybeOff && (
+            <ButtonLink look="primary" wide to={paths.closeOut}>
+              Close it out
+            </ButtonLink>
+          )}
           {repeats && (
-            <ButtonLink look="primary" wide to={stepPaths(bikeId).start}>
+            <ButtonLink look={hoseMaybeOff ? "quiet" : "primary"} wide to={paths.start}>
               Repeat the check
             </ButtonLink>
           )}
-          <ButtonLink look={repeats ? "quiet" : "primary"} wide to={home.to}>
+          <ButtonLink look={hoseMaybeOff || repeats ? "quiet" : "primary"} wide to={home.to}>
             To the {home.label}
           </ButtonLink>
         </>
@@ -71,9 +77,7 @@ export function ResultPage({ bike: { record, log }, reading }: Props) {
       {isStop(advice) && <StopAdvised advice={advice} />}
       {hoseMaybeOff && (
         <Notice tone="error" title="Hose may be off: do not start">
-          <ButtonLink look="danger" to={stepPaths(bikeId).closeOut}>
-            Close it out
-          </ButtonLink>
+          <p>Close the check out before anything else.</p>
         </Notice>
       )}
       {check ? (
@@ -89,7 +93,7 @@ export function ResultPage({ bike: { record, log }, reading }: Props) {
         <NotCounted body={entry.body} sequence={details.sequence} />
       )}
       {check && isLast && (check.action !== "ride" || check.verdict === "dropping") && (
-        <WhatNext record={record} check={entry} />
+        <WhatNext record={record} check={entry} hoseMaybeOff={hoseMaybeOff} />
       )}
       <NextDue summary={summary} details={details} />
     </Page>

@@ -22,10 +22,12 @@ const draftSchema = z.object({
 interface Props {
   record: BikeRecord;
   check: LogEntryOf<"check">;
+  /** The close-out comes first: nothing is written down before it. */
+  hoseMaybeOff: boolean;
 }
 
 /** Where to look for the cause, in order; what was done becomes one entry of work. */
-export function WhatNext({ record, check }: Props) {
+export function WhatNext({ record, check, hoseMaybeOff }: Props) {
   const { bikeId, summary } = record;
   const live = useLiveDraft(bikeId, FORM, draftSchema);
   // What was ticked after an earlier check, and never written down, is of that check.
@@ -74,7 +76,13 @@ export function WhatNext({ record, check }: Props) {
       )}
       <ProblemList errors={errors} problem={problem} />
       {written && <p role="status">Written in the log: saved on this phone.</p>}
-      {ids.length > 0 && (
+      {hoseMaybeOff && (
+        <p className="font-bold">
+          Close the check out first. What you tick here is kept; it can be written in the log once
+          that is done.
+        </p>
+      )}
+      {ids.length > 0 && !hoseMaybeOff && (
         <Button look="primary" disabled={busy} onClick={() => void submit()}>
           Write it in the log
         </Button>
