@@ -33,6 +33,8 @@ export function createClubInviteService({ store, mailer, publicOrigin }: MailPar
     add: (accountId: string, clubId: string, { email, uses, days }: NewInvite) =>
       write((): { invite: Invite; url: string } => {
         const club = membershipAs(store, accountId, clubId, "organiser");
+        // The letter holds the club's name, which may be any words: not from whom nobody knows.
+        const mailTo = store.users.find(accountId)?.verified ? email : undefined;
         const token = randomBytes(16).toString("base64url");
         const url = linkTo(publicOrigin, mailedPages.join, token);
         const now = new Date();
@@ -41,17 +43,17 @@ export function createClubInviteService({ store, mailer, publicOrigin }: MailPar
           id: randomUUID(),
           clubId,
           hash: hashToken(token),
-          email: email ?? null,
+          email: mailTo ?? null,
           usesLeft: uses,
           createdAt: now.toISOString(),
           expiresAt: expires.toISOString(),
         };
         clubInvites.removeExpired(clubId, invite.createdAt);
         clubInvites.add(invite);
-        if (email !== undefined)
+        if (mailTo !== undefined)
           mailer.queue({
             topic: "invitation",
-            to: email,
+            to: mailTo,
             occasion: invite.id,
             goodUntil: expires.getTime(),
             message: invitationMessage(club.name, url, days),

@@ -60,7 +60,7 @@ export const MAX_INVITE_USES = 500;
 export const MAX_INVITE_DAYS = 90;
 
 export const newInviteSchema = z.strictObject({
-  /** Sends the link there too. */
+  /** Sends the link there too, if the organiser's own address is confirmed. */
   email: z.email("This does not look like an e-mail address.").max(254).optional(),
   uses: z
     .int("How many may join must be a whole number.")
@@ -75,6 +75,7 @@ export const newInviteSchema = z.strictObject({
 });
 export const inviteSchema = z.object({
   id: z.string(),
+  /** Where it was mailed to; null where it was not. */
   email: z.string().nullable(),
   usesLeft: z.int(),
   createdAt: z.string(),
@@ -168,6 +169,7 @@ export type Club = z.infer<typeof clubSchema>;
 export type Member = z.infer<typeof memberSchema>;
 export type MemberRoles = z.infer<typeof memberRolesSchema>;
 export type NewInvite = z.infer<typeof newInviteSchema>;
+export type NewInviteResponse = z.infer<typeof newInviteResponseSchema>;
 export type Invite = z.infer<typeof inviteSchema>;
 export type Share = z.infer<typeof shareSchema>;
 export type LineUpPage = z.infer<typeof lineUpPageSchema>;

@@ -3,6 +3,7 @@ import { afterEach, describe, expect, it, vi } from "vitest";
 import { invitesResponseSchema } from "../../shared/schemas/club.ts";
 import { giveRoles, invite, join, makeClub } from "../helpers/club.ts";
 import { keepLog } from "../helpers/keep-log.ts";
+import { mailedToken, newestMail } from "../helpers/mailed-token.ts";
 import { createPhone, signUpRider, type Rider } from "../helpers/rider.ts";
 import { startTestServer, type TestServer } from "../helpers/start-test-server.ts";
 
@@ -102,10 +103,26 @@ describe("an invite", () => {
     expect(Object.keys((answer.body as { errors: object }).errors)).toEqual([field]);
   });
 
+  it("is mailed once the organiser's own address is confirmed, and a link until then", async () => {
+    const { server, organiser, club } = await clubWithOrganiser();
+    const token = await mailedToken(server, "Confirm your e-mail address");
+    const email = "friend@club.example";
+    const unmailed = await invite(organiser, club.id, { email });
+    expect(unmailed.invite.email).toBeNull();
+    await join(await signUpRider(server), unmailed.token);
+    await server.mailer.sendDue();
+    expect(server.mails().join()).not.toContain(club.name);
+
+    await organiser.phone.post("/api/auth/verify-email").send({ token }).expect(200);
+    expect((await invite(organiser, club.id, { email })).invite.email).toBe(email);
+    expect(await newestMail(server, "You are asked to join Moor Riders")).toContain(`To: ${email}`);
+  });
+
   it("is kept as a hash, and its token stands in no log", async () => {
     const { log, text } = keepLog("trace");
     const server = await startTestServer({}, log);
     const organiser = await signUpRider(server, "Olga");
+    server.store.users.markVerified(organiser.user.id);
     const club = await makeClub(organiser);
     const { token } = await invite(organiser, club.id, { email: "friend@club.example" });
     await join(await signUpRider(server), token);

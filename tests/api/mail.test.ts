@@ -131,6 +131,7 @@ describe("an invitation", () => {
     const { about, smtpUrl } = await startMailServer();
     const server = await startTestServer({ smtpUrl });
     const organiser = await signUpRider(server, "Olga");
+    server.store.users.markVerified(organiser.user.id);
     const club = await makeClub(organiser, "Moor & <Fen> Riders");
     await invite(organiser, club.id, { email: "friend@club.example" });
     await server.mailer.sendDue();
@@ -147,6 +148,7 @@ describe("an invitation", () => {
     const { about, state, smtpUrl } = await startMailServer();
     const server = await startTestServer({ smtpUrl });
     const organiser = await signUpRider(server, "Olga");
+    server.store.users.markVerified(organiser.user.id);
     const club = await makeClub(organiser);
     state.busy = true;
     const made = await invite(organiser, club.id, { email: "friend@club.example" });

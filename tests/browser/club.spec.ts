@@ -14,6 +14,7 @@ import {
   waitUntilDrafted,
   waitUntilInstalled,
 } from "./fixtures.ts";
+import { mailedLink } from "./mailed-link.ts";
 import { logLines } from "./open-bike.ts";
 
 const daysAgo = (days: number) => new Date(Date.now() - days * 86_400_000).toISOString();
@@ -324,6 +325,19 @@ test("An organiser revokes, removes, and cannot leave a club without an organise
   await expect(page.getByText("At least one may join.")).toBeVisible();
   await expect(page.getByText("This does not look like an e-mail address.")).toBeVisible();
   await page.getByRole("textbox", { name: "How many may join by it" }).fill("1");
+  await page.getByLabel("E-mail it to").fill("fenn@moor.example");
+  await page.getByRole("button", { name: "Make the invitation" }).click();
+  await expect(page.getByText("It was not mailed")).toBeVisible();
+  await expect(page.getByRole("textbox", { name: "Link" })).toHaveValue(/join\?token=/);
+  await expectAccessible(page);
+  await page.getByRole("link", { name: "Confirm my address" }).click();
+  await expect(page.getByText("This address is not confirmed yet")).toBeVisible();
+  await page.goto(await mailedLink(server, "Confirm your e-mail address", odo.email));
+  await page.getByRole("button", { name: "Yes, this is my address" }).click();
+  await expect(page.getByText("Confirmed, thank you")).toBeVisible();
+
+  await page.goto(`/clubs/${club.id}/members`);
+  await open.getByRole("button", { name: "Invite" }).click();
   await page.getByLabel("E-mail it to").fill("fenn@moor.example");
   await page.getByRole("button", { name: "Make the invitation" }).click();
   await expect(page.getByText("It is on its way to fenn@moor.example")).toBeVisible();

@@ -17,8 +17,8 @@ export function AddressState() {
   return (
     <div className="mt-2 flex flex-col gap-2">
       <p>
-        This address is not confirmed yet, and no reminders are sent to it. Follow the link in the
-        mail that you were sent.
+        This address is not confirmed yet: no reminders are sent to it, and no invitations to a club
+        are mailed for you. Follow the link in the mail that you were sent.
       </p>
       {!sent && (
         <Button disabled={busy} onClick={() => void submit()}>

@@ -1,5 +1,10 @@
 import { useState } from "react";
-import { MAX_INVITE_DAYS, MAX_INVITE_USES, type Club } from "../../../../shared/schemas/club.ts";
+import {
+  MAX_INVITE_DAYS,
+  MAX_INVITE_USES,
+  type Club,
+  type NewInviteResponse,
+} from "../../../../shared/schemas/club.ts";
 import { Button } from "../../../ui/button.tsx";
 import { Form } from "../../../ui/form.tsx";
 import { NumberField } from "../../../ui/number-field.tsx";
@@ -21,21 +26,21 @@ export function InviteSheet({ club, onClose }: Props) {
   const [uses, setUses] = useState("1");
   const [days, setDays] = useState("14");
   const [email, setEmail] = useState("");
-  const [url, setUrl] = useState<string | null>(null);
+  const [made, setMade] = useState<NewInviteResponse | null>(null);
   const askAnew = useAskAnew();
   const { submit, busy, errors, problem } = useSubmit(async () => {
-    const made = await makeInvite(club.id, {
+    const answer = await makeInvite(club.id, {
       email: email.trim() || undefined,
       uses: parseDecimal(uses) ?? NaN,
       days: parseDecimal(days) ?? NaN,
     });
     await askAnew();
-    setUrl(made.url);
+    setMade(answer);
   });
-  if (url)
+  if (made)
     return (
       <Sheet key="made" title={`Join ${club.name}`} onClose={onClose}>
-        <MadeInvite url={url} sentTo={email.trim()} />
+        <MadeInvite made={made} wantedMailed={email.trim() !== ""} />
       </Sheet>
     );
   return (
