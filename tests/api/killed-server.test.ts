@@ -213,6 +213,36 @@ it.each(["before-commit", "after-commit", "backup"])(
   },
 );
 
+async function backUp(dataDir: string): Promise<string> {
+  const file = path.join(temporaryDir(), "kept.sqlite");
+  const { $client } = openDatabase(databaseFile(dataDir));
+  await backUpDatabase($client, file);
+  $client.close();
+  return file;
+}
+
+it("starts no server while a restore runs", { timeout: 60_000 }, async () => {
+  const dataDir = temporaryDir();
+  const writer = createWriter();
+  const server = await startServer(dataDir, "none");
+  await writer.enter(server.url, "sign-up");
+  await kill(server.process);
+
+  const restoring = spawnHeld(
+    ["server/restore.ts", await backUp(dataDir)],
+    dataDir,
+    "before-commit",
+  );
+  await lineOf(restoring, readHeld);
+  const meanwhile = spawnHeld(["server/index.ts"], dataDir, "none");
+  const started = lineOf(meanwhile, readPort);
+  expect(await Promise.race([started, once(meanwhile, "exit")])).toEqual([1, null]);
+  await kill(restoring);
+  const again = await startServer(dataDir, "none");
+  await writer.enter(again.url, "sign-in");
+  await kill(again.process);
+});
+
 it.each(["before-commit", "after-commit"])(
   "leaves the database as it was when a restore is killed: %s",
   { timeout: 60_000 },
@@ -220,10 +250,7 @@ it.each(["before-commit", "after-commit"])(
     const dataDir = temporaryDir();
     const writer = createWriter();
     const server = await startServer(dataDir, "none");
-    const empty = path.join(temporaryDir(), "empty.sqlite");
-    const database = openDatabase(databaseFile(dataDir));
-    await backUpDatabase(database.$client, empty);
-    database.$client.close();
+    const empty = await backUp(dataDir);
     await writer.enter(server.url, "sign-up");
     await writer.send(server.url);
     await kill(server.process);

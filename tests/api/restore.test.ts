@@ -1,6 +1,6 @@
 import SQLite from "better-sqlite3";
 import { subDays } from "date-fns";
-import { existsSync, rmSync, writeFileSync } from "node:fs";
+import { existsSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import { describe, expect, it } from "vitest";
 import { assertIntegrity, backUpDatabase, backupsDir } from "../../server/db/back-up-database.ts";
@@ -225,19 +225,24 @@ describe("sessions after a restore", () => {
     expect(await statusOf(restored, rider)).toBe(401);
   });
 
-  it.each(["damaged", "gone"])("are none where the database that was there is %s", async (how) => {
-    const server = await startTestServer();
-    const rider = await signUpRider(server);
-    const backup = await backUp(server);
-    await server.stop();
-    const file = databaseFile(server.dataDir);
-    if (how === "gone") rmSync(file);
-    else writeFileSync(file, "no database any more, whatever it was before");
-    expect(await restoreDatabase(server.dataDir, backup)).toMatchObject({ signedOut: true });
-    const restored = await startTestServer({ dataDir: server.dataDir });
-    expect(await statusOf(restored, rider)).toBe(401);
-    await signInRider(restored, rider.user.email);
-  });
+  it.each(["damaged", "damaged in part", "gone"])(
+    "are none where the database that was there is %s",
+    async (how) => {
+      const server = await startTestServer();
+      const rider = await signUpRider(server);
+      const backup = await backUp(server);
+      await server.stop();
+      const file = databaseFile(server.dataDir);
+      if (how === "gone") rmSync(file);
+      else if (how === "damaged in part")
+        writeFileSync(file, readFileSync(file).fill(7, 4096, 3 * 4096));
+      else writeFileSync(file, "no database any more, whatever it was before");
+      expect(await restoreDatabase(server.dataDir, backup)).toMatchObject({ signedOut: true });
+      const restored = await startTestServer({ dataDir: server.dataDir });
+      expect(await statusOf(restored, rider)).toBe(401);
+      await signInRider(restored, rider.user.email);
+    },
+  );
 });
 
 describe("mails after a restore", () => {
@@ -301,6 +306,23 @@ describe("restoring", () => {
     await expect(restoring).rejects.toThrow("stop the server first");
     await signUpRider(server);
   }, 15_000);
+
+  it("lets no server go on that has opened the database before", async () => {
+    const server = await startTestServer();
+    const backup = await backUp(server);
+    await server.stop();
+    const waiting = new SQLite(databaseFile(server.dataDir));
+    await restoreDatabase(server.dataDir, backup);
+    expect(() => waiting.pragma("journal_mode=WAL")).toThrow("readonly");
+    waiting.close();
+  });
+
+  it("is refused from the database itself", async () => {
+    const server = await startTestServer();
+    await server.stop();
+    const restoring = restoreDatabase(server.dataDir, databaseFile(server.dataDir));
+    await expect(restoring).rejects.toThrow("is the database itself");
+  });
 
   it.each(["empty", "another program's"])("is refused from a file that is %s", async (whose) => {
     const server = await startTestServer();
