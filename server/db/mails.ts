@@ -1,4 +1,4 @@
-import { and, asc, eq, isNotNull, isNull, lt, lte, ne, sql } from "drizzle-orm";
+import { and, asc, eq, isNotNull, isNull, lt, lte, or, sql } from "drizzle-orm";
 import type { Letter } from "../mail/letter.ts";
 import type { Database } from "./open-database.ts";
 import { bikes, mails, users, type mailTopics } from "./schema.ts";
@@ -9,6 +9,12 @@ export type WaitingMail = Pick<
   MailRow,
   "id" | "topic" | "userId" | "bikeId" | "attempts" | "goodUntil"
 > & { letter: Letter };
+
+/** What a mail is about. */
+export interface Occasion {
+  id: number;
+  occasion: string;
+}
 
 /** Nothing left to try, and nothing kept that could be read. */
 const settled = { letter: null, nextAttemptAt: null };
@@ -66,17 +72,27 @@ export function createMails(db: Database) {
           and(isNull(mails.userId), eq(mails.topic, "invitation"), eq(mails.occasion, inviteId)),
         )
         .run(),
-    /** What still waits to be sent about a bike, but for one occasion. */
-    withdrawAbout: (bikeId: string, topic: MailTopic, occasion: string) =>
+    /** What a bike's readers were, or are to be, told of; what a restore left unnamed may be of it too. */
+    occasionsAbout: (bikeId: string, topic: MailTopic): Occasion[] =>
       db
-        .delete(mails)
+        .select({ id: mails.id, occasion: mails.occasion })
+        .from(mails)
+        .where(and(or(eq(mails.bikeId, bikeId), isNull(mails.bikeId)), eq(mails.topic, topic)))
+        .all()
+        .map(({ id, occasion }) => ({ id, occasion: occasion ?? "" })),
+    setOccasion: ({ id, occasion }: Occasion) => change(id, { occasion }),
+    /** Forgets what still waits to be sent about a bike, but for what holds as before. */
+    withdrawAbout(bikeId: string, topic: MailTopic, holds: (occasion: string) => boolean): void {
+      const waitingAbout = db
+        .select({ id: mails.id, occasion: mails.occasion })
+        .from(mails)
         .where(
-          and(
-            ...[eq(mails.bikeId, bikeId), eq(mails.topic, topic)],
-            ...[ne(mails.occasion, occasion), isNotNull(mails.nextAttemptAt)],
-          ),
+          and(eq(mails.bikeId, bikeId), eq(mails.topic, topic), isNotNull(mails.nextAttemptAt)),
         )
-        .run(),
+        .all();
+      for (const { id, occasion } of waitingAbout)
+        if (!holds(occasion ?? "")) db.delete(mails).where(eq(mails.id, id)).run();
+    },
     removeAbout: (bikeId: string) => db.delete(mails).where(eq(mails.bikeId, bikeId)).run(),
     removeTo: (userId: string) => db.delete(mails).where(eq(mails.userId, userId)).run(),
     all: (): MailRow[] => db.select().from(mails).all(),

@@ -16,8 +16,9 @@ interface StopNews {
   bikeId: string;
   bikeName: string;
   topic: MailTopic;
-  /** Of the check, or of the note. */
-  entryId: string;
+  /** The id of the note, or those of the session's checks. */
+  occasion: string;
+  /** Of the last check, or of the note. */
   at: string;
   /** Knows already, and is not written to. */
   authorId: string;
@@ -38,12 +39,12 @@ function tell(parts: MailParts, news: StopNews, compose: (about: AboutStop) => M
   const now = new Date();
   if (differenceInDays(now, news.at) > NEWS_DAYS) return;
   const { store, mailer } = parts;
-  const { bikeId, bikeName, topic, entryId } = news;
+  const { bikeId, bikeName, topic, occasion } = news;
   const ownerId = store.bikes.ownerOf(bikeId);
   const ownerName = store.users.find(ownerId ?? "")?.name ?? null;
   for (const { id: userId, email } of readersOf(store, news)) {
     mailer.queue({
-      ...{ topic, userId, bikeId, to: email, occasion: entryId },
+      ...{ topic, userId, bikeId, to: email, occasion },
       goodUntil: addDays(now, NEWS_DAYS).getTime(),
       message: compose({
         ...aboutBike(parts, { bikeId, bikeName, userId }, "stopMails"),
@@ -54,21 +55,39 @@ function tell(parts: MailParts, news: StopNews, compose: (about: AboutStop) => M
 }
 
 /**
+ * Whether a mail was written of one of these checks, which are a session. All of them are then known,
+ * so that the session is, whichever of them is struck.
+ */
+function isTold({ mails }: Store, bikeId: string, checkIds: string[]): boolean {
+  const told = mails
+    .occasionsAbout(bikeId, "stop")
+    .filter(({ occasion }) => checkIds.some((id) => occasion.includes(id)));
+  for (const { id, occasion } of told) {
+    const further = checkIds.filter((checkId) => !occasion.includes(checkId));
+    mails.setOccasion({ id, occasion: [occasion, ...further].join(" ") });
+  }
+  return told.length > 0;
+}
+
+/**
  * Tells owner and mechanics that a bike's delivery is judged *stop*, once for each session so
- * judged. Its author is who wrote the lowest of the session's checks, which is low by itself. To be
- * called in the transaction that stores the entry which made it so.
+ * judged; what still waits to be sent of one that is so judged no more is not sent. Its author is
+ * who wrote the lowest of the session's checks, which is low by itself. To be called in the
+ * transaction that stores the entry which made it so.
  */
 export function mailStop(parts: MailParts, summary: Summary): void {
-  const { bikeId, name: bikeName, action } = summary;
-  const session = lastSession(summary);
-  const [first, last] = [session[0], session.at(-1)];
-  if (action !== "stop" || !first || !last) return;
   const { store } = parts;
+  const { bikeId, name: bikeName, action } = summary;
+  const session = action === "stop" ? lastSession(summary) : [];
+  const checkIds = session.map(({ entryId }) => entryId);
+  store.mails.withdrawAbout(bikeId, "stop", (told) => checkIds.some((id) => told.includes(id)));
+  const last = session.at(-1);
+  if (!last || isTold(store, bikeId, checkIds)) return;
   const lowest = session.reduce((low, check) => (check.perRunMl < low.perRunMl ? check : low));
   const authorId = store.entries.find(lowest.entryId)?.authorId ?? "";
   const authorName = store.users.find(authorId)?.name ?? "a former member";
-  const check = { topic: "stop", entryId: first.entryId, at: last.at } as const;
-  tell(parts, { bikeId, bikeName, authorId, ...check }, (about) =>
+  const news = { topic: "stop", occasion: checkIds.join(" "), at: last.at } as const;
+  tell(parts, { bikeId, bikeName, authorId, ...news }, (about) =>
     stopMessage({ ...about, authorName, ratio: last.ratio }),
   );
 }
@@ -84,10 +103,10 @@ export function mailStopAdvice(
 ): void {
   const topic = "stop-advice";
   const stop = advice?.body.advice === "stop" ? advice : null;
-  parts.store.mails.withdrawAbout(bikeId, topic, stop?.id ?? "");
+  parts.store.mails.withdrawAbout(bikeId, topic, (told) => told === stop?.id);
   if (!stop?.author) return;
-  const { id: entryId, at, author, body } = stop;
-  const note = { topic, entryId, at, authorId: author.id } as const;
+  const { id: occasion, at, author, body } = stop;
+  const note = { topic, occasion, at, authorId: author.id } as const;
   tell(parts, { bikeId, bikeName, ...note }, (about) =>
     stopAdviceMessage({ ...about, authorName: author.name, text: body.text }),
   );

@@ -143,6 +143,48 @@ describe("a delivery judged low", () => {
     expect(await told()).toEqual(["mick@new.example"]);
   });
 
+  it("is told once a session, though the check it was told of is struck", async () => {
+    const { owner, mechanic, bikeId, told } = await clubThatIsMailed();
+    const low = (hours: number) => checkEntry(bikeId, hours, 2.4, daysAgo(0));
+    const [first, second] = [low(32), low(32.5)];
+    await owner.sync([first]);
+    await owner.sync([second]);
+    await owner.sync([strikeEntry(bikeId, first.id)]);
+    expect(await told()).toEqual(emails(mechanic));
+    await owner.sync([strikeEntry(bikeId, second.id)]);
+    await owner.sync([low(32.8)]);
+    expect(await told()).toEqual(emails(mechanic, mechanic));
+  });
+
+  it.each(["struck", "repeated and held", "followed by a check that holds"])(
+    "is not told where it was %s before the mail could be sent",
+    async (how) => {
+      const { owner, bikeId, told, outage } = await clubThatIsMailed();
+      const low = checkEntry(bikeId, 32, 2.4, daysAgo(2));
+      await outage(async () => {
+        await owner.sync([low]);
+        expect(await told()).toEqual([]);
+        await owner.sync([
+          how === "struck"
+            ? strikeEntry(bikeId, low.id)
+            : checkEntry(bikeId, how.startsWith("repeated") ? 32.5 : 34, 3.2, daysAgo(1)),
+        ]);
+      });
+      expect(await told()).toEqual([]);
+    },
+  );
+
+  it("is told by the mail that waits where another low check of the session stands", async () => {
+    const { owner, mechanic, bikeId, told, outage } = await clubThatIsMailed();
+    const [first, second] = [32, 32.5].map((at) => checkEntry(bikeId, at, 2.4, daysAgo(0)));
+    await outage(async () => {
+      await owner.sync([first, second]);
+      expect(await told()).toEqual([]);
+      await owner.sync([strikeEntry(bikeId, first!.id)]);
+    });
+    expect(await told()).toEqual(emails(mechanic));
+  });
+
   it("is not told to who found it, whatever others write after", async () => {
     const { owner, mechanic, bikeId, told, findLow } = await clubThatIsMailed();
     await findLow(mechanic, 1);
