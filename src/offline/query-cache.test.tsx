@@ -2,6 +2,8 @@ import { useQuery } from "@tanstack/react-query";
 import { PersistQueryClientProvider } from "@tanstack/react-query-persist-client";
 import { cleanup, render, screen, waitFor } from "@testing-library/react";
 import { afterEach, describe, expect, it, vi } from "vitest";
+import { rememberAccount } from "./account.ts";
+import { eraseFromPhone } from "./erase-from-phone.ts";
 import { createReadCache } from "./query-cache.ts";
 
 interface Question {
@@ -35,6 +37,7 @@ function FailingClubs() {
 
 /** Opens the app as `accountId`, asking the questions. */
 function open(accountId: string, ...questions: Question[]) {
+  rememberAccount({ id: accountId, name: "Ada", email: "ada@club.example" });
   const cache = createReadCache(accountId);
   return render(
     <PersistQueryClientProvider {...cache}>
@@ -51,6 +54,9 @@ async function openAndClose(accountId: string, ...questions: Question[]): Promis
   await waitFor(() => expect(localStorage.getItem(key)).toContain("queries"), { timeout: 3_000 });
   cleanup();
 }
+
+/** The cache writes a second behind. */
+const pastTheThrottle = () => new Promise((resolve) => setTimeout(resolve, 1_500));
 
 const clubs = { name: "clubs", persist: true };
 const logbook = { name: "logbook", persist: false };
@@ -86,6 +92,14 @@ describe("the read cache", () => {
     cleanup();
     open("e", clubs);
     await screen.findByText("clubs: five");
+  });
+
+  it("writes nothing more of an account that was taken off the phone", async () => {
+    open("f", { ...clubs, answer: "six" });
+    await screen.findByText("clubs: six");
+    await eraseFromPhone();
+    await pastTheThrottle();
+    expect(Object.keys(localStorage).filter((key) => key.includes("-f"))).toEqual([]);
   });
 
   it("may be damaged, with no loss but its own", async () => {

@@ -8,6 +8,7 @@ import type {
   PersistedClient,
   PersistQueryClientOptions,
 } from "@tanstack/react-query-persist-client";
+import { rememberedAccount } from "./account.ts";
 
 /** A Line-up looked at before leaving must still be there after a week without a network. */
 const KEPT_MS = 14 * 24 * 60 * 60 * 1000;
@@ -27,9 +28,17 @@ export interface ReadCache {
 }
 
 /** localStorage throws on touch where the browser forbids it. */
-function storage(): Storage | null {
+function storageOf(accountId: string | null) {
   try {
-    return window.localStorage;
+    const storage = window.localStorage;
+    return {
+      getItem: (key: string) => storage.getItem(key),
+      removeItem: (key: string) => storage.removeItem(key),
+      /** Writes come a second late: by then the account may have been taken off this phone. */
+      setItem(key: string, text: string) {
+        if ((rememberedAccount()?.id ?? null) === accountId) storage.setItem(key, text);
+      },
+    };
   } catch {
     return null;
   }
@@ -53,7 +62,7 @@ export function createReadCache(accountId: string | null): ReadCache {
     client: new QueryClient({ defaultOptions: { queries: { gcTime: KEPT_MS, retry: 1 } } }),
     persistOptions: {
       persister: createSyncStoragePersister({
-        storage: storage(),
+        storage: storageOf(accountId),
         key: `sumpless-read-${accountId ?? "nobody"}`,
         serialize,
       }),

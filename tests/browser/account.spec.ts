@@ -182,9 +182,15 @@ test("A rider can leave a phone with nothing on it", async ({ page, rider }) => 
   await signIn(page, rider.email);
   await expect(page.getByRole("region", { name: "Moss" })).toBeVisible();
   await page.getByRole("link", { name: "Account" }).click();
+  const settings = () => page.evaluate(() => JSON.stringify([localStorage, sessionStorage]));
+  await expect.poll(settings).toContain(`sumpless-read-${rider.id}`);
+  await page.getByRole("checkbox", { name: /^A check falls due/ }).click();
   await page.getByRole("button", { name: "Leave, and clear this phone" }).click();
   await expect(page.getByText("nothing of yours is kept on this phone")).toBeVisible();
   await expect.poll(() => logbooksOn(page)).toEqual([]);
+  // The read cache writes a second behind.
+  await page.waitForTimeout(1_500);
+  for (const trace of [rider.id, rider.email]) expect(await settings()).not.toContain(trace);
   await signIn(page, rider.email);
   await expect(page.getByRole("region", { name: "Moss" })).toBeVisible();
 });
