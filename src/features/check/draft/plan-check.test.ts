@@ -59,3 +59,16 @@ test("plans nothing until something is known of what the pump gives", () => {
   const plan = planCheck(newBike, { ...bike, sequence: null }, syringe(5, 0.2));
   expect(plan).toMatchObject({ expectedMl: null, runs: null, unfit: null });
 });
+
+test("takes what the first run gave where nothing else is known: twice the runs at a first check", () => {
+  const own = { seconds: 45, rhythm: "steady", nominalMl: null } as const;
+  const plan = planCheck(newBike, { ...bike, sequence: own, readMl: 1 }, syringe(5, 0.2));
+  expect(plan).toMatchObject({ expectedMl: 1, runs: 6, fills: 2, makesBaseline: true });
+  const nothing = planCheck(newBike, { ...bike, sequence: own, readMl: 0 }, syringe(5, 0.2));
+  expect(nothing.runs).toBeNull();
+});
+
+test("holds to what is known of the pump, whatever the first run gave", () => {
+  const plan = planCheck(newBike, { ...bike, sequence: short, readMl: 1 }, syringe(5, 0.2));
+  expect(plan.expectedMl).toBe(3);
+});

@@ -38,15 +38,23 @@ export function expectedMl(summary: Summary, sequence: Sequence | null): number 
 
 /**
  * How many runs today's check needs with a syringe, and which barrel would do where that one will
- * not. A check that makes the baseline is asked for twice the runs. `atHours` are lifetime hours.
+ * not. A check that makes the baseline is asked for twice the runs. `atHours` are lifetime hours;
+ * `readMl`, what the runs of this check gave so far, counts where nothing else is known.
  */
 export function planCheck(
   summary: Summary,
-  bike: { sequence: Sequence | null; actDrop: number; atHours: number | null },
+  bike: {
+    sequence: Sequence | null;
+    actDrop: number;
+    atHours: number | null;
+    readMl?: number | null;
+  },
   syringe: Barrel | null,
 ): CheckPlan {
   const baseline = summary.series.at(-1)?.baseline ?? null;
-  const expected = expectedMl(summary, bike.sequence);
+  const { readMl = null } = bike;
+  const expected =
+    expectedMl(summary, bike.sequence) ?? (readMl !== null && readMl > 0 ? readMl : null);
   const plan = (barrel: Barrel) =>
     planRuns({
       expectedMl: expected ?? 0,

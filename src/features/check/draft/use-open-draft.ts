@@ -29,9 +29,10 @@ function openCheck(
   const sequence = details.sequence ?? draft.sequence;
   const shown = parseHours(draft.hoursText);
   const atHours = shown === null ? null : shown + summary.hours.displayOffset;
-  const bike = { sequence, actDrop: details.actDrop, atHours };
+  const readMl = meanReadMl(draft);
+  const bike = { sequence, actDrop: details.actDrop, atHours, readMl };
   const plan = planCheck(summary, bike, draft.syringe);
-  const nextMl = meanReadMl(draft) ?? plan.expectedMl;
+  const nextMl = readMl ?? plan.expectedMl;
   return {
     record,
     sequence,

@@ -9,9 +9,12 @@ import { addRun, beginQuick, type QuickDraft } from "../quick/quick-draft.ts";
 
 export const STATION_FORM = "station-check";
 
-/** How many runs a bike needs with the station's syringe. */
-export const planStation = ({ summary, details }: BikeRecord, syringe: Syringe): CheckPlan =>
-  planCheck(summary, { ...details, atHours: summary.hours.now }, syringe);
+/** How many runs a bike needs with the station's syringe, and what those read so far tell of it. */
+export const planStation = (
+  { summary, details }: BikeRecord,
+  syringe: Syringe,
+  readMl: number | null = null,
+): CheckPlan => planCheck(summary, { ...details, atHours: summary.hours.now, readMl }, syringe);
 
 /** All runs stand ready to be filled in, the barrel emptied wherever one more would not fit. */
 export function beginStation(record: BikeRecord, syringe: Syringe, at: string): QuickDraft {

@@ -8,7 +8,7 @@ import { isStop, StopAdvised } from "../../../ui/stop-advised.tsx";
 import { TextArea } from "../../../ui/text-area.tsx";
 import { Tick } from "../../../ui/tick.tsx";
 import { CautionsLine } from "../cautions.tsx";
-import { isClosedOut } from "../draft/check-draft.ts";
+import { isClosedOut, meanReadMl } from "../draft/check-draft.ts";
 import { planSentence } from "../draft/plan-sentence.ts";
 import { useLiveDraft, type LiveDraft } from "../draft/use-live-draft.ts";
 import { HoursPart } from "../hours-part.tsx";
@@ -35,7 +35,7 @@ function Fields({ syringe, live, ...station }: Props & { live: LiveDraft<QuickDr
   const { record } = bike;
   const check = useStationCheck(station, syringe, live);
   const { draft, edit, patch, entry, errors, submit, busy, problem } = check;
-  const plan = planStation(record, syringe);
+  const plan = planStation(record, syringe, meanReadMl(draft));
   return (
     <Page
       title={queued.name}
