@@ -203,7 +203,13 @@ describe("a delivery judged low", () => {
     expect(mail.about("Fern: delivery low")[0]!.words).toContain("After an entry by Mick,");
   });
 
-  it("in a check copied from an old book is no news", async () => {
+  it("in a mechanic's check is told to the owner, however late it comes", async () => {
+    const { owner, mechanic, told, findLow } = await clubThatIsMailed();
+    await findLow(mechanic, 20);
+    expect(await told()).toEqual(emails(owner));
+  });
+
+  it("in a check that the owner copied from an old book is no news", async () => {
     const { owner, told, findLow } = await clubThatIsMailed();
     await findLow(owner, 20);
     expect(await told()).toEqual([]);
@@ -291,7 +297,16 @@ describe("a stop that somebody wrote", () => {
     },
   );
 
-  it("and copied from an old book, or another advice, is told to nobody", async () => {
+  it.each([
+    ["weeks late", daysAgo(20)],
+    ["of a phone whose clock says 1970", "1970-01-01T00:00:09.000Z"],
+  ])("in a mechanic's note %s is told to the owner", async (_, at) => {
+    const { owner, mechanic, bikeId, advised } = await clubThatIsMailed();
+    await mechanic.sync([{ ...advice(bikeId), at }]);
+    expect(await advised()).toEqual(emails(owner));
+  });
+
+  it("and copied by the owner from an old book, or another advice, is told to nobody", async () => {
     const { mechanic, owner, bikeId, advised } = await clubThatIsMailed();
     await owner.sync([advice(bikeId, "stop", 20)]);
     await mechanic.sync([advice(bikeId, "ride")]);
