@@ -23,6 +23,8 @@ export const flagSentences = {
     "Far above the baseline: a doubled run, another sequence, or a baseline that was low.",
   "against-previous-baseline":
     "Judged against the baseline before this one too: a new baseline cannot hide a fault.",
+  "judged-with-earlier":
+    "The hours do not show over an hour of riding since the check before: judged with it too, the worse stands.",
   "baseline-cannot-settle": "This baseline cannot settle it; treat the delivery as low.",
   "check-not-counted": "The last check could not be counted.",
   "hours-doubtful":

@@ -3,8 +3,10 @@ import type { Limits } from "../delivery/judge.ts";
 import type { Baseline } from "../schemas/summary.ts";
 import { baselineIndex, baselineOf, lastOf, poolSessions } from "./baseline-of.ts";
 import type { Series, Session } from "./baseline-series.ts";
+import { evidenceStart } from "./evidence-start.ts";
 import {
   isFaulty,
+  isMilder,
   judgeAgainst,
   judgeFirst,
   nothingDelivered,
@@ -33,7 +35,8 @@ export interface JudgedSeries {
  * controller was renewed or the sequence changed, it is also held to the baseline before, and the
  * worse verdict stands. While that finds it dropping or low, the earlier baseline stays the
  * reference for the series' later sessions and for the next series: a fault cannot be hidden by
- * starting anew, once or repeatedly.
+ * starting anew, once or repeatedly. Nor by repeating a check at odd hours: a session is judged
+ * alone and together with those before that it may truly be one with, and the worst stands.
  */
 export function judgeSeries(allSeries: readonly Series[], limits: Limits): JudgedSeries[] {
   let earlier: Baseline | null = null;
@@ -49,27 +52,52 @@ function judgeOneSeries(series: Series, earlier: Baseline | null, limits: Limits
   const baseline = baselineOf(series);
   const pooled = poolSessions(series.sessions);
   const first = baselineIndex(pooled);
-  const against = (held: Baseline, index: number) =>
-    judgeAgainst(held, series.sessions[index]!, pooled[index]!, limits);
-  const cannotReplace = earlier !== null && (first < 0 || isFaulty(against(earlier, first)));
+  const cannotReplace =
+    earlier !== null &&
+    (first < 0 || isFaulty(judgeAgainst(earlier, series.sessions[first]!, pooled[first]!, limits)));
 
-  const sessions = series.sessions.map((checks, index): JudgedSession => {
-    const volume = pooled[index]!;
-    let judged: Judged;
-    if (baseline && index > first) judged = against(baseline, index);
-    else judged = volume.perRunMl > 0 ? judgeFirst(checks, volume) : nothingDelivered();
-    if (earlier && (index <= first || cannotReplace)) {
-      const held = against(earlier, index);
+  /** What the sessions from `start` to `index` say together of the last of them. */
+  const judgeTogether = (start: number, index: number): Judged => {
+    const checks = joined(series.sessions.slice(start, index + 1));
+    const volume = poolSessions([checks])[0]!;
+    const asFirst = () => (volume.perRunMl > 0 ? judgeFirst(checks, volume) : nothingDelivered());
+    const reachesFirst = start <= first;
+    let judged =
+      baseline && index > first ? judgeAgainst(baseline, checks, volume, limits) : asFirst();
+    if (reachesFirst && index > first) judged = worse(judged, asFirst());
+    if (earlier && (reachesFirst || cannotReplace)) {
+      const held = judgeAgainst(earlier, checks, volume, limits);
       judged = worse(judged, { ...held, flags: [...held.flags, "against-previous-baseline"] });
     }
     if (volume.disagrees) judged.flags.push("session-disagrees");
-    return {
-      checks,
-      atHours: lastOf(checks).atHours,
-      hoursCount: checks.some((check) => check.hoursCount),
-      pooled: volume,
-      judged,
-    };
-  });
+    return judged;
+  };
+
+  /** Alone, and with every earlier session that it may truly be one with: the worst stands. */
+  const judgeSession = (index: number): Judged => {
+    let judged = judgeTogether(index, index);
+    const furthest = evidenceStart(series.sessions, index);
+    for (let start = index - 1; start >= furthest; start--) {
+      const together = judgeTogether(start, index);
+      if (isMilder(judged, together)) {
+        together.flags.push("judged-with-earlier");
+        judged = worse(together, judged);
+      }
+    }
+    return judged;
+  };
+
+  const sessions = series.sessions.map((checks, index): JudgedSession => ({
+    checks,
+    atHours: lastOf(checks).atHours,
+    hoursCount: checks.some((check) => check.hoursCount),
+    pooled: pooled[index]!,
+    judged: judgeSession(index),
+  }));
   return { series, baseline, reference: cannotReplace ? earlier : baseline, sessions };
+}
+
+function joined(sessions: readonly Session[]): Session {
+  const [first, ...more] = sessions.flat();
+  return [first!, ...more];
 }

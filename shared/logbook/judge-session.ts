@@ -23,11 +23,15 @@ export type Judged = Pick<
 const VERDICT_RANK = { settling: 0, holding: 1, dropping: 2, low: 3 } as const;
 const ACTION_RANK: Record<Action, number> = { ride: 0, repeat: 1, stop: 2 };
 
+// Settling is no better than holding: there is nothing yet to be better than.
+const verdictRank = ({ verdict }: Judged) => Math.max(VERDICT_RANK.holding, VERDICT_RANK[verdict]);
+
+export const isMilder = (a: Judged, b: Judged) =>
+  verdictRank(a) < verdictRank(b) || ACTION_RANK[a.action] < ACTION_RANK[b.action];
+
 /** The worse verdict stands, with the worse action of the two. */
 export function worse(a: Judged, b: Judged): Judged {
-  // Settling is no better than holding: there is nothing yet to be better than.
-  const rank = (judged: Judged) => Math.max(VERDICT_RANK.holding, VERDICT_RANK[judged.verdict]);
-  const verdict = rank(b) > rank(a) ? b : a;
+  const verdict = verdictRank(b) > verdictRank(a) ? b : a;
   const action = ACTION_RANK[b.action] > ACTION_RANK[a.action] ? b.action : a.action;
   return { ...verdict, action, flags: [...new Set([...a.flags, ...b.flags])] };
 }

@@ -2,12 +2,12 @@ import type { LogEntry } from "../schemas/entry.ts";
 import type { DoubtfulReading } from "../schemas/summary.ts";
 import { effectiveTime } from "./effective-order.ts";
 
-const HOUR_MS = 3_600_000;
+export const HOUR_MS = 3_600_000;
 const WEEK_MS = 7 * 24 * HOUR_MS;
 /** Hours a week are taken from the readings of this long before the last one. */
 const USE_WINDOW_MS = 8 * WEEK_MS;
 /** Meters show tenths: two readings may seem this much further apart than the clock, in hours. */
-const DISPLAY_SLACK_HOURS = 0.2;
+export const DISPLAY_SLACK_HOURS = 0.2;
 /** Differences of added decimals below this are rounding. */
 const ROUNDING_HOURS = 1e-6;
 

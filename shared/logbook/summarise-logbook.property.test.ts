@@ -2,7 +2,7 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import { arbitraryLogbook, OWNER } from "../../tests/helpers/arbitrary-logbook.ts";
 import { logbook } from "../../tests/helpers/logbook-in-words.ts";
-import { actions, type LogEntry } from "../schemas/entry.ts";
+import { actions, verdicts, type LogEntry, type WorkItem } from "../schemas/entry.ts";
 import { summarySchema } from "../schemas/summary.ts";
 import { standingEntries } from "./standing-entries.ts";
 import { summariseLogbook } from "./summarise-logbook.ts";
@@ -140,16 +140,61 @@ describe("a plain life of checks", () => {
       RUNS,
     );
   });
+});
 
-  it("does not ride on by repeating a low check until one pleases", () => {
-    // Pooled evidence: k checks of 2.4 mL and one of 3.0 weigh as their weighted mean.
-    const book = lifeOf([[3], [2.4]]);
-    expect(summarise(book.entries).action).toBe("stop");
-    expect(summarise(book.check(30.2, [3]).entries).action).not.toBe("ride");
-    const stubborn = lifeOf([[3], [2.4]])
-      .check(30.1, [2.4])
-      .check(30.2, [2.4])
-      .check(30.3, [3]);
-    expect(summarise(stubborn.entries).action).toBe("stop");
+const ml = fc.integer({ min: 15, max: 40 }).map((n) => n / 10);
+/** What may be typed where the meter shows 150. */
+const typed = fc.oneof(
+  fc.constantFrom(15, 141, 150.4, 151.2, 158, 1_500, 9_000),
+  fc.integer({ min: 1_400, max: 1_600 }).map((n) => n / 10),
+);
+
+/** One to three series, each of a check or two, 20 h apart. */
+const earlierSeries = fc.array(
+  fc.record({
+    checks: fc.array(ml, { minLength: 1, maxLength: 2 }),
+    item: fc.constantFrom<WorkItem>("pump-renewed", "screen-cleaned"),
+  }),
+  { minLength: 1, maxLength: 3 },
+);
+
+/** A life whose last check is repeated every five minutes, read at the hours given. */
+function repeating(
+  earlier: { checks: number[]; item: WorkItem }[],
+  startsSeries: boolean,
+  repeats: { ml: number; hours: number }[],
+) {
+  const at = (days: number, minutes = 0) =>
+    new Date(Date.UTC(2026, 2, 1 + days, 9, minutes)).toISOString();
+  const book = logbook().bike({ name: "Moss" }, null, at(0));
+  earlier.forEach(({ checks, item }, i) => {
+    if (i > 0) book.work(40 * i, [item], true, at(40 * i));
+    checks.forEach((one, j) => book.check(40 * i + 20 * j, [one], {}, at(40 * i + 20 * j)));
+  });
+  if (startsSeries) book.work(149, ["screen-cleaned"], true, at(180));
+  repeats.forEach((one, i) => book.check(one.hours, [one.ml], {}, at(181, 5 * i)));
+  const { verdict, action } = summarise(book.entries);
+  return { verdict: verdicts.indexOf(verdict), action: harshness(action) };
+}
+
+describe("a check repeated until it pleases", () => {
+  const first = fc.record({ ml, hours: fc.constantFrom(150, 9_000) });
+  const repeats = fc.array(fc.record({ ml, hours: typed }), { minLength: 1, maxLength: 8 });
+
+  it("is never judged milder than all its evidence pooled, whatever hours are typed", () => {
+    fc.assert(
+      fc.property(earlierSeries, fc.boolean(), first, repeats, (earlier, starts, one, more) => {
+        const all = [one, ...more];
+        const odd = repeating(earlier, starts, all);
+        const pooled = repeating(
+          earlier,
+          starts,
+          all.map((check) => ({ ...check, hours: 150 })),
+        );
+        expect(odd.action).toBeGreaterThanOrEqual(pooled.action);
+        expect(odd.verdict).toBeGreaterThanOrEqual(pooled.verdict);
+      }),
+      RUNS,
+    );
   });
 });

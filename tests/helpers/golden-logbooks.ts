@@ -298,6 +298,24 @@ const ruleLogbooks: GoldenLogbook[] = [
   },
 ];
 
+/** A low check at 32 h, made again five minutes later. */
+const repeatedAt = (hours: number) =>
+  moss()
+    .check(12, [3])
+    .check(32, [2.4], {}, "2026-04-01T09:00:00.000Z")
+    .check(hours, [2.95], {}, "2026-04-01T09:05:00.000Z").entries;
+
+// Alone, 2.95 mL is holding. Weights 1/0.009071 and 1/0.010299: mean 2.6576, ratio 0.8859,
+// u = 0.8859·√(0.02613² + 0.03403²) = 0.0380, Φ(−0.943) = 0.173. χ² = 15.6 > 3.84: they disagree.
+// Perfect runs would leave u = 0.8859·0.03403 and Φ(−1.19) = 0.117 > 0.05: that baseline settles nothing.
+const repeatedAtOddHours = {
+  verdict: "dropping",
+  action: "repeat",
+  checks: [{}, { verdict: "low", action: "stop" }, { verdict: "dropping", action: "repeat" }],
+  due: { atHours: 32, inHours: 0 },
+  flags: ["baseline-cannot-settle", "session-disagrees", "judged-with-earlier", "hours-doubtful"],
+};
+
 export const goldenLogbooks: GoldenLogbook[] = [
   {
     title: "counts what is left of the interval over a meter change",
@@ -446,6 +464,18 @@ export const goldenLogbooks: GoldenLogbook[] = [
     title: "leaves them alone for a check at 320 too, which is judged all the same",
     entries: moss().check(12, [3]).check(320, [2.95]).entries,
     expected: { verdict: "holding", due: { atHours: 32, inHours: 20 } },
+  },
+  {
+    title: "does not ride on where a low check is repeated at an hour too far on",
+    entries: repeatedAt(33.2),
+    expected: repeatedAtOddHours,
+    pLow: 0.173,
+  },
+  {
+    title: "nor where it is repeated at an hour before",
+    entries: repeatedAt(23),
+    expected: repeatedAtOddHours,
+    pLow: 0.173,
   },
   {
     title: "forgets a struck check",
