@@ -69,6 +69,16 @@ export function createEntries(db: Database) {
   return {
     find: (id: string): EntryRow | undefined => byId.get({ id }),
     add: (entry: Omit<EntryRow, "rev">) => insert.run(entry),
+    /**
+     * Every phone that has an entry of this account is sent it again: each gets a new `rev`, of the
+     * one counter, in the order they had.
+     */
+    sendAgain(authorId: string): void {
+      const written = eq(entries.authorId, authorId);
+      const rows = db.select().from(entries).where(written).orderBy(asc(entries.rev)).all();
+      db.delete(entries).where(written).run();
+      for (const { rev: _rev, ...entry } of rows) insert.run(entry);
+    },
     countOf: (bikeId: string): number => countOfBike.get({ bikeId })?.rows ?? 0,
     /** Ascending by `rev`. */
     ofBike: (bikeId: string, afterRev = 0, limit = -1): StoredEntry[] =>

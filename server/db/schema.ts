@@ -78,7 +78,10 @@ export const bikes = sqliteTable(
   (table) => [index("bikes_owner").on(table.ownerId)],
 );
 
-/** Append only: rows are added, and leave only when their whole bike is erased. */
+/**
+ * Append only: rows are added, and leave only when their whole bike is erased. They get another
+ * `rev` when their author's account is.
+ */
 export const entries = sqliteTable(
   "entries",
   {

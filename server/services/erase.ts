@@ -20,6 +20,8 @@ function eraseRows(store: Store, { bikeIds, entryIds, accountId }: Erasure): voi
     store.mails.removeTo(accountId);
     store.reminders.removeOf(accountId);
     store.users.remove(accountId);
+    // What is left in the logs of others: phones have it with the name.
+    store.entries.sendAgain(accountId);
   }
   store.erasedIds.add([...bikeIds, ...entryIds]);
 }

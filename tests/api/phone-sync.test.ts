@@ -6,8 +6,16 @@ import { eraseBike } from "../../server/services/erase.ts";
 import { restoreDatabase } from "../../server/services/restore-database.ts";
 import { ApiError, NoNetworkError } from "../../src/offline/errors.ts";
 import type { NewEntry } from "../../src/offline/types.ts";
-import { bikeEntry, checkEntry, hoursEntry, newId, smallLog } from "../helpers/make-entry.ts";
-import { signUpRider, type Rider } from "../helpers/rider.ts";
+import { clubOfFour } from "../helpers/club.ts";
+import {
+  bikeEntry,
+  checkEntry,
+  hoursEntry,
+  newId,
+  noteEntry,
+  smallLog,
+} from "../helpers/make-entry.ts";
+import { PASSWORD, signUpRider, type Rider } from "../helpers/rider.ts";
 import { startTestServer, type TestServer } from "../helpers/start-test-server.ts";
 import { wiredPhone, type Network, type WiredPhone } from "../helpers/phones/wired-phone.ts";
 
@@ -38,6 +46,37 @@ beforeEach(async () => {
   server = await startTestServer();
   rider = await signUpRider(server);
   bikeId = newId();
+});
+
+describe("a phone that has what an erased account wrote", () => {
+  it("shows it without the name, once it has synced, and is otherwise as it was", async () => {
+    const { owner, mechanic, bikeId } = await clubOfFour(server);
+    const phone = phoneOf(owner);
+    await mechanic.sync([checkEntry(bikeId, 40, 3), noteEntry(bikeId, "Loose hose", "stop")]);
+    await phone.sync();
+    const kept = async () => {
+      const database = await phone.open();
+      return JSON.stringify([await database.getAll("entries"), await database.getAll("bikes")]);
+    };
+    const before = (await phone.bike(bikeId))!;
+    expect(before.record.advice?.author?.name).toBe("Mick");
+
+    await mechanic.phone.delete("/api/account").send({ password: PASSWORD }).expect(204);
+    await phone.sync();
+    const after = (await phone.bike(bikeId))!;
+    expect(after.record.advice?.author?.name).toBe("Former member");
+    expect(await kept()).not.toContain("Mick");
+    const lines = ({ log }: typeof after) => log.map(({ entry, state }) => [entry.id, state]);
+    expect(lines(after)).toEqual(lines(before));
+    expect(after.record.summary).toEqual(before.record.summary);
+    expect(await owner.summary(bikeId)).toEqual(before.record.summary);
+
+    const known = Object.fromEntries((await phone.bikes()).map((bike) => [bike.bikeId, bike.rev]));
+    expect((await owner.sync([], { known })).bikes).toEqual([]);
+    const next = hoursEntry(bikeId, 41);
+    const pulled = (await owner.sync([next], { known })).bikes;
+    expect(pulled.flatMap(({ entries }) => entries.map(({ id }) => id))).toEqual([next.id]);
+  });
 });
 
 describe("two phones of one rider", () => {
