@@ -19,7 +19,8 @@ export function createDueBikes(db: Database) {
       and(
         eq(mails.bikeId, lineUpFacts.bikeId),
         eq(mails.topic, "due"),
-        gt(mails.queuedAt, placeholder("remindedSince")),
+        // One that waited for the mail server is news from when it was sent.
+        gt(sql`coalesce(${mails.sentAt}, ${mails.queuedAt})`, placeholder("remindedSince")),
       ),
     );
   const found = db

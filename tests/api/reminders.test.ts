@@ -86,6 +86,21 @@ describe("a reminder", () => {
     expect(await remind()).toHaveLength(2);
   });
 
+  it("leaves a week's quiet after one that the mail server took late", async () => {
+    const { rider, mail, remind } = await confirmedRider();
+    const bikeId = await addBike(rider, 16);
+    mail.state.busy = true;
+    await remind();
+    mail.state.busy = false;
+    pass(6);
+    expect(await remind()).toHaveLength(1);
+    await rider.sync([hoursEntry(bikeId, 33, daysAgo(0))]);
+    pass(2);
+    expect(await remind()).toHaveLength(1);
+    pass(6);
+    expect(await remind()).toHaveLength(2);
+  });
+
   it("begins anew after the next check", async () => {
     const { rider, remind } = await confirmedRider();
     const bikeId = await addBike(rider, 16);
