@@ -32,7 +32,7 @@ testAlone(
     const line = logLines(page).first();
     await expect(line).toContainText("Saved on this phone");
     await expect(line.getByText(/^Name/)).toHaveText(
-      /^Name: Fern · Year: 2021 · Meter shows 12:30 · Interval: 30\sh · Screen: yes · Low from: 12\.5\s% under the baseline$/,
+      /^Name: Fern · Year: 2021 · Meter shows 12:30 · Interval: 30\sh · Screen: yes · Delivery low from: 12\.5\s% under the baseline$/,
     );
     await expect(page.getByText(/30:00\sh/)).toBeVisible();
 

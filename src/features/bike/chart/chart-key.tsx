@@ -20,8 +20,10 @@ export function ChartKey({ model }: { model: ChartModel }) {
           </Item>
         ))}
       <Item drawn={<Level look="baseline" />}>Baseline</Item>
-      <Item drawn={<Level look="watch" />}>Dropping below {formatPercent(model.watchLimit)}</Item>
-      <Item drawn={<Level look="act" />}>Low below {formatPercent(model.actLimit)}</Item>
+      <Item drawn={<Level look="watch" />}>
+        Delivery dropping below {formatPercent(model.watchLimit)}
+      </Item>
+      <Item drawn={<Level look="act" />}>Delivery low below {formatPercent(model.actLimit)}</Item>
       <Item drawn={<path d="M-3 -8h6m-3 0v16m-3 0h6" stroke="var(--ink)" strokeWidth="1.5" />}>
         Give or take: 19 of 20 lie within
       </Item>

@@ -15,7 +15,7 @@ describe("entryFacts", () => {
     expect(factsOf((book) => book.bike({ name: "Moss", sequence, actDrop: 0.125 }))).toEqual([
       "Name: Moss",
       "Sequence: 30 s, one fast rate",
-      "Low from: 12.5 % under the baseline",
+      "Delivery low from: 12.5 % under the baseline",
     ]);
     expect(
       factsOf((book) => book.bike({ intervalHours: null, hasScreen: null, sequence: null })),

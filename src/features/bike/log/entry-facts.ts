@@ -103,8 +103,8 @@ export function patchFacts(patch: BikePatch): string[] {
       `Interval: ${intervalHours === null ? "the usual" : `${intervalHours}\u00a0h`}`,
     hasScreen !== undefined && `Screen: ${screenWords(hasScreen)}`,
     sequence !== undefined && `Sequence: ${sequence ? sequenceWords(sequence) : "not known"}`,
-    limit("Dropping from", watchDrop),
-    limit("Low from", actDrop),
+    limit("Delivery dropping from", watchDrop),
+    limit("Delivery low from", actDrop),
     retired !== undefined && (retired ? "Retired" : "Brought back"),
   );
 }
