@@ -84,7 +84,7 @@ testAlone(
     await expectStep(page, "Read the level, run 1", '"endText":"2.9"');
     await button(page, "That is the level").click();
 
-    await expectStep(page, "1 run read");
+    await expectStep(page, "1 of 2 runs read");
     await page.getByText("A usual kind").click();
     await expectStep(page, "1 of 2 runs read", '"nominalMl":3');
     await expect(page.getByText(/One more run like this would make it/)).toBeVisible();
