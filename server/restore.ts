@@ -11,7 +11,7 @@ try {
     file,
   );
   if (setAside) console.log(`The database that was there is now ${setAside}`);
-  if (erasures > 0) console.log(`Erased again what was erased since: ${erasures}`);
+  if (erasures > 0) console.log(`Done again what erased.jsonl tells of: ${erasures}`);
   if (signedOut)
     console.log("Everyone is signed out, and mails may go out twice: no sound database was there.");
   console.log("Restored. The phones will send what is missing.");

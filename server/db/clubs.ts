@@ -1,4 +1,4 @@
-import { asc, eq, inArray, sql } from "drizzle-orm";
+import { asc, eq, inArray, notInArray, sql } from "drizzle-orm";
 import type { Database } from "./open-database.ts";
 import { bikeShares, clubInvites, clubMembers, clubs } from "./schema.ts";
 
@@ -17,6 +17,14 @@ export function createClubs(db: Database) {
     all: (): ClubRow[] => db.select().from(clubs).orderBy(asc(clubs.name), asc(clubs.id)).all(),
     find: (id: string): ClubRow | undefined =>
       db.select().from(clubs).where(eq(clubs.id, id)).get(),
+    withoutOrganiser(): string[] {
+      const organisers = db
+        .select({ clubId: clubMembers.clubId })
+        .from(clubMembers)
+        .where(eq(clubMembers.organiser, true));
+      const found = db.select({ id: clubs.id }).from(clubs).where(notInArray(clubs.id, organisers));
+      return found.all().map(({ id }) => id);
+    },
     /** To be called in the transaction that changes what the club's Line-up shows. */
     touch: (id: string) => db.update(clubs).set(raised).where(eq(clubs.id, id)).run(),
     touchAllOf: (bikeId: string) => touchAllOf.run({ bikeId }),

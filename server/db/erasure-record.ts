@@ -2,6 +2,12 @@ import { appendFileSync, existsSync, readFileSync } from "node:fs";
 import path from "node:path";
 import { z } from "zod";
 
+const givenRolesSchema = z.strictObject({
+  ...{ clubId: z.string(), userId: z.string() },
+  ...{ organiser: z.boolean(), mechanic: z.boolean() },
+});
+export type GivenRoles = z.infer<typeof givenRolesSchema>;
+
 const erasureSchema = z.strictObject({
   erasedAt: z.string(),
   accountId: z.string().optional(),
@@ -11,6 +17,8 @@ const erasureSchema = z.strictObject({
   clubIds: z.array(z.string()).optional(),
   members: z.array(z.strictObject({ clubId: z.string(), userId: z.string() })).optional(),
   invites: z.array(z.strictObject({ clubId: z.string(), inviteId: z.string() })).optional(),
+  /** As they are from then on, given ones too: the last line about a member holds. */
+  roles: z.array(givenRolesSchema).optional(),
   shares: z.array(z.strictObject({ clubId: z.string(), bikeId: z.string() })).optional(),
 });
 export type Erasure = z.infer<typeof erasureSchema>;
@@ -27,7 +35,7 @@ function parseLine(line: string): Erasure | null {
 /**
  * What was erased or taken back, one line each, in a file that backups do not hold and a restore does
  * not touch: an older backup must not bring back what someone asked to have erased, nor share again
- * what is shared no more.
+ * what is shared no more, nor give back a role that was taken.
  */
 export function createErasureRecord(dataDir: string) {
   const file = path.join(dataDir, "erased.jsonl");

@@ -34,6 +34,7 @@ export function createClubMemberService(store: Store) {
         if (!member.organiser) assertOrganiserLeft(clubId, userId);
         const { organiser, mechanic } = member;
         store.clubMembers.setRoles(clubId, userId, { organiser, mechanic });
+        recordTakenBack(store, { roles: [{ clubId, userId, organiser, mechanic }] });
         return member;
       }),
 

@@ -1,3 +1,4 @@
+import type { GivenRoles } from "../db/erasure-record.ts";
 import type { Store } from "../db/store.ts";
 import { revokeAllInvites } from "./revoke-invites.ts";
 
@@ -15,14 +16,19 @@ export function endClub(store: Store, clubId: string): void {
 }
 
 /**
- * Takes out a member whom nobody can hold back. A club whose last organiser goes is passed on: to
- * the mechanic who has been in it longest, else to the member. One with nobody left ends.
+ * Clubs whose last organiser is gone are passed on: to the mechanic who has been in it longest, else
+ * to the member. One with nobody left ends. Answers the roles so given.
  */
-export function leaveClub(store: Store, clubId: string, userId: string): void {
-  const others = store.clubMembers.membersOf(clubId).filter(({ id }) => id !== userId);
-  const heir = others.find(({ mechanic }) => mechanic) ?? others[0];
-  if (!heir) return endClub(store, clubId);
-  if (!others.some(({ organiser }) => organiser))
-    store.clubMembers.setRoles(clubId, heir.id, { organiser: true });
-  endMembership(store, clubId, userId);
+export function passOnClubs(store: Store): GivenRoles[] {
+  return store.clubs.withoutOrganiser().flatMap((clubId) => {
+    const members = store.clubMembers.membersOf(clubId);
+    const heir = members.find(({ mechanic }) => mechanic) ?? members[0];
+    if (!heir) {
+      endClub(store, clubId);
+      return [];
+    }
+    const roles = { organiser: true, mechanic: heir.mechanic };
+    store.clubMembers.setRoles(clubId, heir.id, roles);
+    return [{ clubId, userId: heir.id, ...roles }];
+  });
 }

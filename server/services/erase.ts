@@ -1,6 +1,6 @@
 import type { Erasure } from "../db/erasure-record.ts";
 import type { Store } from "../db/store.ts";
-import { leaveClub } from "./end-membership.ts";
+import { endMembership, passOnClubs } from "./end-membership.ts";
 import { assertOwner } from "./permissions.ts";
 import { takeBackAgain } from "./take-back.ts";
 
@@ -16,7 +16,7 @@ function eraseRows(store: Store, { bikeIds, entryIds, accountId }: Erasure): voi
     store.bikes.remove(bikeId);
   }
   if (accountId !== undefined) {
-    for (const { id } of store.clubMembers.clubsOf(accountId)) leaveClub(store, id, accountId);
+    for (const { id } of store.clubMembers.clubsOf(accountId)) endMembership(store, id, accountId);
     store.mails.removeTo(accountId);
     store.reminders.removeOf(accountId);
     store.users.remove(accountId);
@@ -37,7 +37,7 @@ const erasureOf = (store: Store, bikeIds: string[], accountId?: string): Erasure
 function erase(store: Store, bikeIds: string[], accountId?: string): void {
   const erasure = erasureOf(store, bikeIds, accountId);
   eraseRows(store, erasure);
-  store.erasureRecord.append(erasure);
+  store.erasureRecord.append({ ...erasure, roles: passOnClubs(store) });
 }
 
 export function eraseBike(store: Store, accountId: string, bikeId: string): void {
@@ -60,6 +60,7 @@ export function replayErasures(store: Store): number {
       eraseRows(store, erasure);
       takeBackAgain(store, erasure);
     }
+    passOnClubs(store);
   });
   return erasures.length;
 }

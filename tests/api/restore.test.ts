@@ -7,6 +7,7 @@ import { assertIntegrity, backUpDatabase, backupsDir } from "../../server/db/bac
 import { databaseFile } from "../../server/db/open-database.ts";
 import { restoreDatabase } from "../../server/services/restore-database.ts";
 import { rebuildSummaries } from "../../server/services/summarise-bike.ts";
+import { clubsResponseSchema } from "../../shared/schemas/club.ts";
 import { clubOfFour, giveRoles, invite, join, lineUp, share, withdraw } from "../helpers/club.ts";
 import { startMailServer } from "../helpers/mail-server.ts";
 import {
@@ -17,7 +18,7 @@ import {
   noteEntry,
   smallLog,
 } from "../helpers/make-entry.ts";
-import { createPhone, PASSWORD, signInRider, signUpRider } from "../helpers/rider.ts";
+import { createPhone, PASSWORD, signInRider, signUpRider, type Rider } from "../helpers/rider.ts";
 import { startTestServer, temporaryDir, type TestServer } from "../helpers/start-test-server.ts";
 
 async function backUp({ database, dataDir }: TestServer): Promise<string> {
@@ -172,6 +173,62 @@ describe("a restored club", () => {
     const stranger = await signUpRider(await restoreAndStart(server, backup), "Una");
     for (const open of [token, invited.token])
       await stranger.phone.post(`/api/invites/${open}/accept`).expect(404);
+  });
+
+  const clubsOf = async ({ phone }: Rider) =>
+    clubsResponseSchema.parse((await phone.get("/api/clubs").expect(200)).body).clubs;
+
+  it("does not give back a role that was taken since the backup", async () => {
+    const server = await startTestServer();
+    const { organiser, mechanic, member, club } = await clubOfFour(server);
+    await giveRoles(organiser, club.id, member, { organiser: true }).expect(200);
+    const backup = await backUp(server);
+    await giveRoles(organiser, club.id, mechanic, { mechanic: false }).expect(200);
+    await giveRoles(organiser, club.id, member, { organiser: false }).expect(200);
+
+    const restored = await restoreAndStart(server, backup);
+    for (const { user } of [mechanic, member]) {
+      const rider = await signInRider(restored, user.email);
+      expect(await clubsOf(rider)).toMatchObject([{ organiser: false, mechanic: false }]);
+    }
+  });
+
+  it("keeps a role that was given again before the backup was made", async () => {
+    const server = await startTestServer();
+    const { organiser, mechanic, club } = await clubOfFour(server);
+    await giveRoles(organiser, club.id, mechanic, { mechanic: false }).expect(200);
+    await giveRoles(organiser, club.id, mechanic, { mechanic: true }).expect(200);
+    const restored = await restoreAndStart(server, await backUp(server));
+    const mick = await signInRider(restored, mechanic.user.email);
+    expect(await clubsOf(mick)).toMatchObject([{ organiser: false, mechanic: true }]);
+  });
+
+  it("keeps the organiser to whom it had come before the backup was made", async () => {
+    const server = await startTestServer();
+    const { organiser, mechanic, member, club } = await clubOfFour(server);
+    await giveRoles(organiser, club.id, mechanic, { organiser: false }).expect(200);
+    await organiser.phone.delete("/api/account").send({ password: PASSWORD }).expect(204);
+    await giveRoles(mechanic, club.id, member, { organiser: true }).expect(200);
+    const restored = await restoreAndStart(server, await backUp(server));
+    const mick = await signInRider(restored, mechanic.user.email);
+    expect(await clubsOf(mick)).toMatchObject([{ organiser: true, mechanic: true }]);
+  });
+
+  it("comes to its mechanic where its organisers since the backup are not in it", async () => {
+    const server = await startTestServer();
+    const { organiser, mechanic, owner, club, invited } = await clubOfFour(server);
+    const backup = await backUp(server);
+    const rex = await signUpRider(server, "Rex");
+    await join(rex, invited.token);
+    await giveRoles(organiser, club.id, rex, { organiser: true }).expect(200);
+    await giveRoles(rex, club.id, organiser, { organiser: false }).expect(200);
+
+    const restored = await restoreAndStart(server, backup);
+    const organises = async ({ user }: Rider) =>
+      (await clubsOf(await signInRider(restored, user.email)))[0]!.organiser;
+    expect(await organises(organiser)).toBe(false);
+    expect(await organises(mechanic)).toBe(true);
+    expect(await organises(owner)).toBe(false);
   });
 
   it("that was closed since the backup is closed", async () => {
