@@ -14,6 +14,9 @@ try {
   if (erasures > 0) console.log(`Done again what erased.jsonl tells of: ${erasures}`);
   if (signedOut)
     console.log("Everyone is signed out, and mails may go out twice: no sound database was there.");
+  console.log(
+    "Passwords and addresses are the backup's; links mailed to accounts before are void.",
+  );
   console.log("Restored. The phones will send what is missing.");
 } catch (error) {
   console.error(error instanceof Error ? error.message : error);

@@ -21,6 +21,7 @@ export function createMailedTokens(db: Database) {
         .get()?.live ?? 0,
     removeOf: (userId: string, purposes: readonly TokenPurpose[] = tokenPurposes) =>
       db.delete(mailedTokens).where(of(userId, purposes)).run(),
+    removeAll: () => db.delete(mailedTokens).run(),
     removeExpired: (now: number) =>
       db.delete(mailedTokens).where(lte(mailedTokens.expiresAt, now)).run(),
   };

@@ -81,6 +81,7 @@ async function ready(dataDir: string, readied: string, setAside: string | null) 
   }));
   store.write(() => {
     createSessionRows(database).replaceAll(kept?.sessions ?? []);
+    store.mailedTokens.removeAll();
     if (kept) store.mails.replaceAll(kept.mails);
   });
   store.epoch.renew();
@@ -101,10 +102,13 @@ function assertOther(backup: string, file: string): void {
  * that they send their entries again; and what was erased since the backup, erased again. Sessions
  * and mails stay those of the database that was there: by the backup's, a session ended since would
  * be back, and a mail sent since would go out again. Where that database tells nothing, all sessions
- * have ended, and the mails are the backup's. All this is done to a copy, which then takes the
- * database's place at once: a restore cut short has changed nothing. The database that was there is
- * held until then, so that no server takes entries into it that would be gone. One that waited for it
- * cannot go on: SQLite writes to no file that was moved away.
+ * have ended, and the mails are the backup's. Links mailed before are void: one of the backup's may
+ * have been used since.
+ *
+ * All this is done to a copy, which then takes the database's place at once: a restore cut short has
+ * changed nothing. The database that was there is held until then, so that no server takes entries
+ * into it that would be gone. One that waited for it cannot go on: SQLite writes to no file that was
+ * moved away.
  */
 export async function restoreDatabase(dataDir: string, backup: string) {
   const file = databaseFile(dataDir);

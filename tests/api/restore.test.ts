@@ -9,6 +9,7 @@ import { restoreDatabase } from "../../server/services/restore-database.ts";
 import { rebuildSummaries } from "../../server/services/summarise-bike.ts";
 import { clubsResponseSchema } from "../../shared/schemas/club.ts";
 import { clubOfFour, giveRoles, invite, join, lineUp, share, withdraw } from "../helpers/club.ts";
+import { mailedToken } from "../helpers/mailed-token.ts";
 import { startMailServer } from "../helpers/mail-server.ts";
 import {
   bikeEntry,
@@ -300,6 +301,28 @@ describe("sessions after a restore", () => {
       await signInRider(restored, rider.user.email);
     },
   );
+});
+
+describe("a link mailed before a restore", () => {
+  it("is void, that by which a password or an address was changed since the backup too", async () => {
+    const server = await startTestServer();
+    const [ann, bob] = [await signUpRider(server), await signUpRider(server, "Bob")];
+    const [{ email }, phone] = [ann.user, createPhone(server)];
+    await phone.post("/api/auth/request-password-reset").send({ email }).expect(204);
+    const used = await mailedToken(server, "Choose a new password");
+    const asked = { email: "thief@club.example", password: PASSWORD };
+    await bob.phone.post("/api/account/email").send(asked).expect(204);
+    const voided = await mailedToken(server, "Confirm your new e-mail address");
+    const backup = await backUp(server);
+    const reset = { token: used, password: "nine valves and a spare" };
+    await phone.post("/api/auth/reset-password").send(reset).expect(204);
+    const change = { password: PASSWORD, newPassword: "nine valves and a spare" };
+    await bob.phone.post("/api/account/password").send(change).expect(204);
+
+    const stranger = createPhone(await restoreAndStart(server, backup));
+    await stranger.post("/api/auth/reset-password").send(reset).expect(422);
+    await stranger.post("/api/auth/verify-email").send({ token: voided }).expect(422);
+  });
 });
 
 describe("mails after a restore", () => {
