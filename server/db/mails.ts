@@ -1,7 +1,8 @@
 import { and, asc, eq, isNotNull, isNull, lt, lte, or, sql } from "drizzle-orm";
 import type { Letter } from "../mail/letter.ts";
 import type { Database } from "./open-database.ts";
-import { bikes, mails, users, type mailTopics } from "./schema.ts";
+import { bikes, mails, type mailTopics } from "./schema.ts";
+import { accountIds } from "./users.ts";
 
 export type MailTopic = (typeof mailTopics)[number];
 export type MailRow = typeof mails.$inferSelect;
@@ -101,13 +102,7 @@ export function createMails(db: Database) {
      * the occasion is remembered all the same, for when its phone brings it.
      */
     replaceAll(rows: MailRow[]): void {
-      const accounts = new Set(
-        db
-          .select({ id: users.id })
-          .from(users)
-          .all()
-          .map(({ id }) => id),
-      );
+      const accounts = accountIds(db);
       const there = new Set(
         db
           .select({ id: bikes.id })

@@ -2,6 +2,9 @@ import { eq, sql } from "drizzle-orm";
 import type { Reminders } from "../../shared/schemas/reminders.ts";
 import type { Database } from "./open-database.ts";
 import { reminders } from "./schema.ts";
+import { accountIds } from "./users.ts";
+
+type ReminderRow = typeof reminders.$inferSelect;
 
 const all: Reminders = { dueMails: true, stopMails: true };
 
@@ -20,6 +23,13 @@ export function createReminders(db: Database) {
         .values({ userId, ...wanted })
         .onConflictDoUpdate({ target: reminders.userId, set: wanted })
         .run(),
+    all: (): ReminderRow[] => db.select().from(reminders).all(),
+    /** Those and no others, of accounts that there are. */
+    replaceAll(rows: ReminderRow[]): void {
+      const accounts = accountIds(db);
+      db.delete(reminders).run();
+      for (const row of rows) if (accounts.has(row.userId)) db.insert(reminders).values(row).run();
+    },
     removeOf: (userId: string) => db.delete(reminders).where(eq(reminders.userId, userId)).run(),
   };
 }

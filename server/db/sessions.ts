@@ -1,6 +1,7 @@
 import { and, desc, eq, gt, lte, ne } from "drizzle-orm";
 import type { Database } from "./open-database.ts";
-import { sessions, users } from "./schema.ts";
+import { sessions } from "./schema.ts";
+import { accountIds } from "./users.ts";
 
 export type SessionRow = typeof sessions.$inferSelect;
 
@@ -40,13 +41,7 @@ export function createSessionRows(db: Database) {
     all: (): SessionRow[] => db.select().from(sessions).all(),
     /** Those and no others, of accounts that there are. */
     replaceAll(rows: SessionRow[]): void {
-      const accounts = new Set(
-        db
-          .select({ id: users.id })
-          .from(users)
-          .all()
-          .map(({ id }) => id),
-      );
+      const accounts = accountIds(db);
       db.delete(sessions).run();
       for (const row of rows) if (accounts.has(row.userId)) db.insert(sessions).values(row).run();
     },

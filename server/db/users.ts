@@ -7,6 +7,11 @@ export type UserRow = typeof users.$inferSelect;
 /** Two spellings of an address that differ by case alone are one address. */
 const sameEmail = sql`lower(${users.email}) = lower(${sql.placeholder("email")})`;
 
+export const accountIds = (db: Database): Set<string> => {
+  const rows = db.select({ id: users.id }).from(users).all();
+  return new Set(rows.map(({ id }) => id));
+};
+
 export function createUsers(db: Database) {
   const byId = db
     .select()

@@ -4,6 +4,7 @@ import { assertIntegrity, assertOurs, backupName, backupsDir } from "../db/back-
 import { migrateDatabase } from "../db/migrate-database.ts";
 import { databaseFile, openDatabase, openReadOnly, type Database } from "../db/open-database.ts";
 import { createMails } from "../db/mails.ts";
+import { createReminders } from "../db/reminders.ts";
 import { createSessionRows } from "../db/sessions.ts";
 import { createStore } from "../db/store.ts";
 import { replayErasures } from "./erase.ts";
@@ -77,12 +78,16 @@ async function ready(dataDir: string, readied: string, setAside: string | null) 
   const store = createStore(database, dataDir);
   const kept = askSetAside(setAside, (before) => ({
     sessions: createSessionRows(before).all(),
+    reminders: createReminders(before).all(),
     mails: createMails(before).all(),
   }));
   store.write(() => {
     createSessionRows(database).replaceAll(kept?.sessions ?? []);
     store.mailedTokens.removeAll();
-    if (kept) store.mails.replaceAll(kept.mails);
+    if (kept) {
+      store.reminders.replaceAll(kept.reminders);
+      store.mails.replaceAll(kept.mails);
+    }
   });
   store.epoch.renew();
   const erasures = replayErasures(store);
@@ -99,11 +104,11 @@ function assertOther(backup: string, file: string): void {
 
 /**
  * Puts a backup in the database's place and readies it to be healed by the phones: a new epoch, so
- * that they send their entries again; and what was erased since the backup, erased again. Sessions
- * and mails stay those of the database that was there: by the backup's, a session ended since would
- * be back, and a mail sent since would go out again. Where that database tells nothing, all sessions
- * have ended, and the mails are the backup's. Links mailed before are void: one of the backup's may
- * have been used since.
+ * that they send their entries again; and what was erased since the backup, erased again. Sessions,
+ * mails and who wants them stay those of the database that was there: by the backup's, a session
+ * ended since would be back, a mail sent since would go out again, and one unsubscribed from too.
+ * Where that database tells nothing, all sessions have ended, and the rest is the backup's. Links
+ * mailed before are void: one of the backup's may have been used since.
  *
  * All this is done to a copy, which then takes the database's place at once: a restore cut short has
  * changed nothing. The database that was there is held until then, so that no server takes entries

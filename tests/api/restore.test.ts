@@ -8,6 +8,7 @@ import { databaseFile } from "../../server/db/open-database.ts";
 import { restoreDatabase } from "../../server/services/restore-database.ts";
 import { rebuildSummaries } from "../../server/services/summarise-bike.ts";
 import { clubsResponseSchema } from "../../shared/schemas/club.ts";
+import type { Reminders } from "../../shared/schemas/reminders.ts";
 import { clubOfFour, giveRoles, invite, join, lineUp, share, withdraw } from "../helpers/club.ts";
 import { mailedToken } from "../helpers/mailed-token.ts";
 import { startMailServer } from "../helpers/mail-server.ts";
@@ -326,6 +327,26 @@ describe("a link mailed before a restore", () => {
 });
 
 describe("mails after a restore", () => {
+  it("are those that each account wants now", async () => {
+    const server = await startTestServer();
+    const [ann, bob] = [await signUpRider(server), await signUpRider(server, "Bob")];
+    const wants = ({ phone }: Rider, reminders: Reminders) =>
+      phone.put("/api/account/reminders").send(reminders).expect(200);
+    await wants(bob, { dueMails: false, stopMails: false });
+    const backup = await backUp(server);
+    await wants(ann, { dueMails: false, stopMails: true });
+    await wants(bob, { dueMails: true, stopMails: false });
+    await wants(await signUpRider(server, "Una"), { dueMails: false, stopMails: false });
+
+    const restored = await restoreAndStart(server, backup);
+    const wanted = async ({ user }: Rider) => {
+      const { phone } = await signInRider(restored, user.email);
+      return (await phone.get("/api/account/reminders")).body as unknown;
+    };
+    expect(await wanted(ann)).toEqual({ reminders: { dueMails: false, stopMails: true } });
+    expect(await wanted(bob)).toEqual({ reminders: { dueMails: true, stopMails: false } });
+  });
+
   const daysAgo = (days: number) => subDays(new Date(), days).toISOString();
 
   it("are none that were sent since the backup, be it of a bike that the backup lacks", async () => {
