@@ -1,3 +1,4 @@
+import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import type { Run } from "../schemas/entry.ts";
 import { measureDelivery } from "./measure-delivery.ts";
@@ -80,6 +81,49 @@ describe("measureDelivery", () => {
     const two = measure(runsEach(3, 3), coarse);
     expect(one.delivery?.uScaleMl).toBeCloseTo(0.12 / Math.sqrt(3), 9);
     expect(two.delivery?.uScaleMl).toBeCloseTo(0.12 / Math.sqrt(3), 9);
+  });
+
+  describe("within one fill", () => {
+    const barrel = { id: "large", label: "100 mL", capacityMl: 100, graduationMl: 0.2 };
+    /** Runs that go on in one barrel. */
+    const goingOn = (volumes: number[]) => {
+      let level = 0;
+      return volumes.map((volume) => ({ startMl: level, endMl: (level += volume) }));
+    };
+    const graduations = fc.constantFrom(0.1, 0.2, 0.5, 1);
+    const ofRuns = (volumes: number[], graduationMl: number) =>
+      measure(goingOn(volumes), { ...barrel, graduationMl });
+
+    it("never widens u by more runs of the same", () => {
+      const volume = fc.integer({ min: 1, max: 60 }).map((n) => n / 10);
+      fc.assert(
+        fc.property(volume, fc.integer({ min: 1, max: 9 }), graduations, (ml, runs, marks) => {
+          const of = (n: number) => ofRuns(Array<number>(n).fill(ml), marks).delivery!;
+          const [fewer, more] = [of(runs), of(runs + 1)];
+          expect(more.fills).toBe(1);
+          expect(more.uMl).toBeLessThan(fewer.uMl);
+          expect(more.components.readingMl).toBeLessThan(fewer.components.readingMl);
+          expect(more.components.repeatabilityMl).toBeLessThan(fewer.components.repeatabilityMl);
+          expect(more.components.temperatureMl).toBeCloseTo(fewer.components.temperatureMl, 12);
+        }),
+      );
+    });
+
+    it("never widens u, as a part of the delivery, by another run, unless the runs scatter", () => {
+      const volumes = fc.array(
+        fc.integer({ min: 200, max: 240 }).map((n) => n / 100),
+        { minLength: 2, maxLength: 10 },
+      );
+      fc.assert(
+        fc.property(volumes, graduations, (all, marks) => {
+          const more = ofRuns(all, marks);
+          fc.pre(!more.flags.includes("runs-scatter"));
+          const fewer = ofRuns(all.slice(0, -1), marks);
+          const part = ({ delivery }: typeof more) => delivery!.uMl / delivery!.perRunMl;
+          expect(part(more)).toBeLessThan(part(fewer));
+        }),
+      );
+    });
   });
 
   it("points out a level above the last mark", () => {
