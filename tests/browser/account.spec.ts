@@ -5,6 +5,7 @@ import {
   expect,
   expectAccessible,
   expectNoSidewaysScroll,
+  inTopBar,
   openAs,
   Rider,
   setLetters,
@@ -12,6 +13,7 @@ import {
   signUp,
   test,
   testAlone,
+  waitUntilSent,
 } from "./fixtures.ts";
 import { mailedLink } from "./mailed-link.ts";
 
@@ -20,7 +22,7 @@ const NEW_PASSWORD = "another pump altogether";
 const password = (page: Page, label: string) => page.getByLabel(label, { exact: true });
 
 async function open(page: Page, link: string): Promise<void> {
-  await page.getByRole("link", { name: "Account" }).click();
+  await inTopBar(page, "Account").click();
   await page.getByRole("link", { name: link }).click();
   await expect(page.getByRole("heading", { level: 1 })).toBeFocused();
 }
@@ -44,7 +46,7 @@ testAlone(
   "A rider can confirm an address, and then move to another one",
   async ({ page, rider, server }) => {
     await signUp(page, rider.email);
-    await page.getByRole("link", { name: "Account" }).click();
+    await inTopBar(page, "Account").click();
     await expect(page.getByText("not confirmed yet")).toBeVisible();
     await page.getByRole("button", { name: "Send the link again" }).click();
     await expect(page.getByText("A link is on its way")).toBeVisible();
@@ -65,7 +67,7 @@ testAlone(
     await page.goto(await mailedLink(server, "Confirm your new e-mail address"));
     await page.getByRole("button", { name: "Yes, this is my address" }).click();
     await expect(page.getByText("Confirmed, thank you")).toBeVisible();
-    await page.getByRole("link", { name: "Account" }).click();
+    await inTopBar(page, "Account").click();
     await expect(page.getByText("wren@fell.example")).toBeVisible();
     await expect(page.getByText("not confirmed yet")).toBeHidden();
   },
@@ -157,6 +159,7 @@ test("A rider can delete the account, data taken along first, and nothing is lef
   await rider.push([bikeEntry(bikeId)]);
   await signIn(page, rider.email);
   await expect(page.getByRole("region", { name: "Moss" })).toBeVisible();
+  await waitUntilSent(page);
   await open(page, "Delete the account");
   expect((await saved(page, "Save everything")).text).toContain(bikeId);
   const erase = page.getByRole("button", { name: "Delete the account and its bikes" });
@@ -181,7 +184,8 @@ test("A rider can leave a phone with nothing on it", async ({ page, rider }) => 
   await rider.push([bikeEntry(newId())]);
   await signIn(page, rider.email);
   await expect(page.getByRole("region", { name: "Moss" })).toBeVisible();
-  await page.getByRole("link", { name: "Account" }).click();
+  await waitUntilSent(page);
+  await inTopBar(page, "Account").click();
   const settings = () => page.evaluate(() => JSON.stringify([localStorage, sessionStorage]));
   await expect.poll(settings).toContain(`sumpless-read-${rider.id}`);
   await page.getByRole("checkbox", { name: /^A check falls due/ }).click();

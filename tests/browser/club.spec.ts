@@ -5,6 +5,7 @@ import {
   expect,
   expectAccessible,
   expectNoSidewaysScroll,
+  inTopBar,
   openAs,
   Rider,
   setLetters,
@@ -29,7 +30,7 @@ const knownBike = (bikeId: string, name: string) => [
 ];
 
 async function openTestDay(page: Page): Promise<void> {
-  await page.getByRole("link", { name: "Clubs" }).click();
+  await inTopBar(page, "Clubs").click();
   await page.getByRole("link", { name: "Test day" }).click();
   await expect(page.getByRole("heading", { name: "Test day" })).toBeVisible();
 }
@@ -61,7 +62,7 @@ testAlone(
   "A rider joins by a link and shares a bike; a mechanic checks it with no signal until it is withdrawn",
   async ({ page, browser, rider, server }) => {
     await signUp(page, rider.email, "Maud");
-    await page.getByRole("link", { name: "Clubs" }).click();
+    await inTopBar(page, "Clubs").click();
     await page.getByRole("button", { name: "Make a club" }).click();
     await page.getByLabel("Name of the club").fill("Moor Riders");
     await page.getByRole("button", { name: "Make the club" }).click();
@@ -150,16 +151,16 @@ testAlone(
     await card(wren, "Moor Riders").getByRole("button", { name: "Withdraw it" }).click();
     await expect(card(wren, "Moor Riders")).toContainText("Not shared");
 
-    await page.unroute("**/api/sync");
+    await page.unrouteAll({ behavior: "wait" });
     await page.getByRole("button", { name: "Send and fetch now" }).click();
     await expect(page.getByRole("heading", { name: "This bike is not here" })).toBeVisible();
-    await page.getByRole("link", { name: "Account" }).click();
+    await inTopBar(page, "Account").click();
     await page.getByText("Not sent yet: 1").click();
     await expect(page.getByText("This bike does not take entries from you")).toBeVisible();
     const file = page.waitForEvent("download");
     await page.getByRole("button", { name: "Save these as a file" }).click();
     expect((await file).suggestedFilename()).toMatch(/^sumpless-not-sent-/);
-    await page.getByRole("link", { name: "Clubs" }).click();
+    await inTopBar(page, "Clubs").click();
     await page.getByRole("link", { name: "Line-up" }).click();
     await expect(page.getByText("No bike is shared with the club yet")).toBeVisible();
     await context.close();
@@ -368,7 +369,7 @@ test("An organiser revokes, removes, and cannot leave a club without an organise
 test("A rider says which reminders to get", async ({ page, rider }) => {
   await rider.signUp();
   await openAs(rider, page);
-  await page.getByRole("link", { name: "Account" }).click();
+  await inTopBar(page, "Account").click();
   const due = page.getByRole("checkbox", { name: /^A check falls due/ });
   await expect(due).toBeChecked();
   await due.click();

@@ -214,6 +214,10 @@ export async function openAs(rider: Rider, page: Page, pathname = "/"): Promise<
   await page.goto(pathname);
 }
 
+/** A link of the bar at the top; the page below may have one of the same name, once it is there. */
+export const inTopBar = (page: Page, name: "Account" | "Clubs") =>
+  page.getByRole("banner").getByRole("link", { name });
+
 /** Waits until the service worker has everything that the app needs with no network. */
 export const waitUntilInstalled = (page: Page) =>
   page.evaluate(async () => {

@@ -1,7 +1,7 @@
 import { readFile } from "node:fs/promises";
 import { bikeEntry, newId, noteEntry } from "../helpers/make-entry.ts";
 import { clubOf, member, share } from "./club-scene.ts";
-import { expect, expectAccessible, openAs, test, waitUntilSent } from "./fixtures.ts";
+import { expect, expectAccessible, inTopBar, openAs, test, waitUntilSent } from "./fixtures.ts";
 import { putInStore } from "./open-bike.ts";
 import { logLine, saveNote, sendNow, writeNote } from "./write-notes.ts";
 
@@ -21,7 +21,7 @@ test("A mechanic can discard what a withdrawn bike no longer takes, and is asked
   await page.route("**/api/sync", (route) => route.abort());
   await writeNote(page, "Screen half blocked");
   await wren.call("DELETE", `/api/bikes/${bikeId}/shares/${club.id}`);
-  await page.unroute("**/api/sync");
+  await page.unrouteAll({ behavior: "wait" });
   await sendNow(page);
   const bar = page.getByRole("status").filter({ hasText: "1 not accepted" });
   await expect(bar).toBeVisible();
@@ -71,6 +71,6 @@ test("A rider who writes a refused entry anew is told of it no more", async ({
   await saveNote(page);
   await expect(logLine(page, "Chain oiled")).toHaveCount(2);
   await expect(page.getByText(/^All sent/)).toBeVisible();
-  await page.getByRole("link", { name: "Account" }).click();
+  await inTopBar(page, "Account").click();
   await expect(page.getByText("Every entry has been sent.")).toBeVisible();
 });

@@ -3,6 +3,7 @@ import {
   expect,
   expectAccessible,
   expectNoSidewaysScroll,
+  inTopBar,
   openAs,
   Rider,
   setLetters,
@@ -125,7 +126,7 @@ testAlone(
     await expect(card(page, "Moss")).toContainText("Saved on this phone");
     await expect(page.getByText(/^Offline · 1 entry waits since/)).toBeVisible();
 
-    await page.getByRole("link", { name: "Account" }).click();
+    await inTopBar(page, "Account").click();
     await page.getByRole("button", { name: "Sign out" }).click();
     await expect(page.getByRole("dialog", { name: "1 entry is not sent yet" })).toBeVisible();
     await page.getByRole("button", { name: "Sign out, keep them here" }).click();
@@ -227,7 +228,7 @@ test("A rider's choice of theme outlives a reload", async ({ page, rider }) => {
   const ground = () =>
     page.evaluate(() => getComputedStyle(document.documentElement).backgroundColor);
   const light = await ground();
-  await page.getByRole("link", { name: "Account" }).click();
+  await inTopBar(page, "Account").click();
   await page.getByText("Dark", { exact: true }).click();
   await expect.poll(ground).not.toBe(light);
   const dark = await ground();

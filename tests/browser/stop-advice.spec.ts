@@ -1,7 +1,7 @@
 import { bikeEntry, checkEntry, newId, noteEntry } from "../helpers/make-entry.ts";
 import { daysAgo, withBaseline } from "./check-scene.ts";
 import { clubOf, member, share } from "./club-scene.ts";
-import { expect, expectAccessible, openAs, test } from "./fixtures.ts";
+import { expect, expectAccessible, inTopBar, openAs, test } from "./fixtures.ts";
 import { sendNow } from "./write-notes.ts";
 
 test("A mechanic at the station reads that a stop still stands, however good the check", async ({
@@ -19,7 +19,7 @@ test("A mechanic at the station reads that a stop still stands, however good the
   await share(wren, bikeId, club);
 
   await openAs(odo, page);
-  await page.getByRole("link", { name: "Clubs" }).click();
+  await inTopBar(page, "Clubs").click();
   await page.getByRole("link", { name: "Test day" }).click();
   await page.getByRole("button", { name: "Add a syringe" }).click();
   await page.getByRole("dialog").getByRole("radio", { name: /^5 mL/ }).check();

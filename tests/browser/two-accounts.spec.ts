@@ -3,6 +3,7 @@ import type { SyncRequest, SyncResponse } from "../../shared/schemas/sync.ts";
 import { bikeEntry, newId } from "../helpers/make-entry.ts";
 import {
   expect,
+  inTopBar,
   openAs,
   Rider,
   test,
@@ -75,7 +76,7 @@ test.describe("on one phone", () => {
     });
     await writeNote(page, "Smokes when cold");
     await expect.poll(() => notesOnServer(rider)).toEqual(["Smokes when cold"]);
-    await page.getByRole("link", { name: "Account" }).click();
+    await inTopBar(page, "Account").click();
     await page.getByRole("button", { name: "Sign out" }).click();
     await expect(page.getByRole("dialog", { name: "1 entry is not sent yet" })).toBeVisible();
     await page.getByRole("button", { name: "Sign out, keep them here" }).click();
@@ -87,7 +88,7 @@ test.describe("on one phone", () => {
     const arrived = page.waitForResponse((response) => carriesNote(response.request()));
     deliver();
     await arrived;
-    await page.getByRole("link", { name: "Account" }).click();
+    await inTopBar(page, "Account").click();
     await expect(page.getByText("Every entry has been sent.")).toBeVisible();
     expect(await logbookOf(page, other.id)).toBe(before);
     expect(before).not.toMatch(/Heather|Smokes when cold/);
@@ -96,7 +97,7 @@ test.describe("on one phone", () => {
     await expect(page.getByText("Heather")).toHaveCount(0);
     expect(await logbookOf(page, rider.id)).toMatch(/Smokes when cold.*"unsentSince"/);
 
-    await page.getByRole("link", { name: "Account" }).click();
+    await inTopBar(page, "Account").click();
     await page.getByRole("button", { name: "Sign out" }).click();
     await fillSignIn(page, rider.email);
     await card(page, "Heather").getByRole("link", { name: "Heather" }).click();
@@ -136,7 +137,7 @@ test.describe("on one phone", () => {
     await page.goto("/account");
     await expect(page.getByText("Not sent yet: 1")).toBeVisible();
 
-    await page.unroute("**/api/sync");
+    await page.unrouteAll({ behavior: "wait" });
     await sendNow(page);
     await waitUntilSent(page);
     await page.goto(bike);

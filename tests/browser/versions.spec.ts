@@ -7,7 +7,7 @@ import type { StoredEntry } from "../../shared/schemas/entry.ts";
 import type { SyncRequest, SyncResponse } from "../../shared/schemas/sync.ts";
 import { earlierChunks } from "../../scripts/earlier-chunks.ts";
 import { hoursEntry, newId } from "../helpers/make-entry.ts";
-import { expect, openAs, test, testAlone, waitUntilSent } from "./fixtures.ts";
+import { expect, inTopBar, openAs, test, testAlone, waitUntilSent } from "./fixtures.ts";
 import { logLines } from "./open-bike.ts";
 import { addBike, card, logLine, notesOnServer, sendNow, writeNote } from "./write-notes.ts";
 
@@ -78,7 +78,7 @@ testAlone(
     await expect(page.getByLabel("Name", { exact: true })).toHaveValue("Heather");
     await page.getByRole("button", { name: "Save the bike" }).click();
     await expect(card(page, "Heather")).toBeVisible();
-    await page.getByRole("link", { name: "Account" }).click();
+    await inTopBar(page, "Account").click();
     await expect(page.getByText("Every entry has been sent.")).toBeVisible();
     expect(got.length).toBeGreaterThan(1);
     expect(got.filter((name) => name.startsWith("next-"))).toEqual([]);
@@ -129,7 +129,7 @@ test("A rider with an older version keeps what a newer one wrote, and is judged 
   await page.goto(bike);
   const foreign = logLines(page).filter({ hasText: "Written by a newer version of the app" });
   await expect(foreign).toHaveCount(2);
-  await page.unroute("**/api/sync");
+  await page.unrouteAll({ behavior: "wait" });
 
   await writeNote(page, "Chain oiled");
   await expect(logLine(page, "Chain oiled")).toContainText("Sent");
@@ -165,7 +165,7 @@ test("A rider with a newer version keeps what an older server does not know, unt
   await page.reload();
   await expect(logLine(page, "Chain oiled")).toContainText("Not accepted");
 
-  await page.unroute("**/api/sync");
+  await page.unrouteAll({ behavior: "wait" });
   await sendNow(page);
   await expect(logLine(page, "Chain oiled")).toContainText("Sent");
   expect(await notesOnServer(rider)).toEqual(["Chain oiled"]);
