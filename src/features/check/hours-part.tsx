@@ -1,4 +1,5 @@
 import type { BikeRecord } from "../../offline/index.ts";
+import { AskAboutGain } from "../../ui/ask-about-gain.tsx";
 import { DateTimeField } from "../../ui/date-time-field.tsx";
 import { Fold } from "../../ui/fold.tsx";
 import { formatHours } from "../../ui/format-hours.ts";
@@ -31,6 +32,7 @@ export function HoursPart({ record, value, onChange, errors }: Props) {
         value={value.hoursText}
         onChange={(hoursText) => onChange({ hoursText })}
       />
+      <AskAboutGain hours={record.summary.hours} text={value.hoursText} at={value.at} />
       <Fold title={`When: ${formatWhen(value.at)}`}>
         <DateTimeField
           label="Checked at"

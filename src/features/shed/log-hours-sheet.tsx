@@ -1,6 +1,7 @@
 import { useState } from "react";
 import { Link } from "react-router-dom";
 import { saveEntry, useHoldUpdates, type BikeRecord, type NewEntry } from "../../offline/index.ts";
+import { AskAboutGain } from "../../ui/ask-about-gain.tsx";
 import { Button } from "../../ui/button.tsx";
 import { DateTimeField } from "../../ui/date-time-field.tsx";
 import { Fold } from "../../ui/fold.tsx";
@@ -54,15 +55,18 @@ export default function LogHoursSheet({ bike, onClose }: Props) {
   return (
     <Sheet title={`Log hours: ${bike.details.name}`} onClose={onClose}>
       <Form onSubmit={submit} problem={problem}>
-        <HoursField
-          label={meter === "estimated" ? "Engine hours, estimated" : "Engine hours"}
-          hint={last && readAt ? `Last: ${last} h on ${formatWhen(readAt)}` : undefined}
-          error={errors.hours}
-          value={text}
-          onChange={setText}
-          meterFormat={meterFormat}
-          large
-        />
+        <div>
+          <HoursField
+            label={meter === "estimated" ? "Engine hours, estimated" : "Engine hours"}
+            hint={last && readAt ? `Last: ${last} h on ${formatWhen(readAt)}` : undefined}
+            error={errors.hours}
+            value={text}
+            onChange={setText}
+            meterFormat={meterFormat}
+            large
+          />
+          {!doubt && <AskAboutGain hours={bike.summary.hours} text={text} at={at ?? opened} />}
+        </div>
         {doubt && (
           <Notice tone="caution" title={doubtWords[doubt]}>
             <p>

@@ -7,6 +7,7 @@ import {
   type BikeRecord,
   type NewEntry,
 } from "../../../offline/index.ts";
+import { AskAboutGain } from "../../../ui/ask-about-gain.tsx";
 import { Button } from "../../../ui/button.tsx";
 import { DateTimeField } from "../../../ui/date-time-field.tsx";
 import { Form } from "../../../ui/form.tsx";
@@ -52,15 +53,18 @@ export function EntryForm(props: Props) {
     await navigate(back.to, { replace: true, state: { saved: true } });
   });
   const hoursField = (
-    <HoursField
-      label={hoursLabel}
-      hint={hoursHint ?? lastReadingWords(summary, details)}
-      error={errors.hours}
-      value={hours}
-      onChange={setHours}
-      meterFormat={details.meterFormat}
-      large={props.hoursFirst}
-    />
+    <div>
+      <HoursField
+        label={hoursLabel}
+        hint={hoursHint ?? lastReadingWords(summary, details)}
+        error={errors.hours}
+        value={hours}
+        onChange={setHours}
+        meterFormat={details.meterFormat}
+        large={props.hoursFirst}
+      />
+      <AskAboutGain hours={summary.hours} text={hours} at={at} />
+    </div>
   );
 
   return (
