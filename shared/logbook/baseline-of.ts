@@ -17,9 +17,14 @@ export function meanOilTempC(checks: Session): number | null {
   return temps.length > 0 ? temps.reduce((sum, temp) => sum + temp, 0) / temps.length : null;
 }
 
+/** Less than this a run, mL, is nothing: no syringe's marks come near it. */
+const NOTHING_ML = 0.001;
+
+/** Whether anything was delivered at all. */
+export const delivers = ({ perRunMl }: Pick<Volume, "perRunMl">) => perRunMl >= NOTHING_ML;
+
 /** The first session that delivered anything: nothing can be compared with nothing. */
-export const baselineIndex = (pooled: readonly Volume[]) =>
-  pooled.findIndex((one) => one.perRunMl > 0);
+export const baselineIndex = (pooled: readonly Volume[]) => pooled.findIndex(delivers);
 
 export function poolSessions(sessions: readonly Session[]) {
   return sessions.map((session) => poolSession(session.map(volumeOf)));

@@ -1,7 +1,7 @@
 import type { Volume } from "../delivery/compare-to-baseline.ts";
 import type { Limits } from "../delivery/judge.ts";
 import type { Baseline } from "../schemas/summary.ts";
-import { baselineIndex, baselineOf, lastOf, poolSessions } from "./baseline-of.ts";
+import { baselineIndex, baselineOf, delivers, lastOf, poolSessions } from "./baseline-of.ts";
 import type { Series, Session } from "./baseline-series.ts";
 import { evidenceStart } from "./evidence-start.ts";
 import {
@@ -60,7 +60,7 @@ function judgeOneSeries(series: Series, earlier: Baseline | null, limits: Limits
   const judgeTogether = (start: number, index: number): Judged => {
     const checks = joined(series.sessions.slice(start, index + 1));
     const volume = poolSessions([checks])[0]!;
-    const asFirst = () => (volume.perRunMl > 0 ? judgeFirst(checks, volume) : nothingDelivered());
+    const asFirst = () => (delivers(volume) ? judgeFirst(checks, volume) : nothingDelivered());
     const reachesFirst = start <= first;
     let judged =
       baseline && index > first ? judgeAgainst(baseline, checks, volume, limits) : asFirst();

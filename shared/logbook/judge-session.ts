@@ -6,7 +6,7 @@ import { runsToSettle } from "../delivery/runs-to-settle.ts";
 import { usualDeliveryMl } from "../delivery/usual-delivery-ml.ts";
 import type { Action } from "../schemas/entry.ts";
 import type { Baseline, CheckSummary } from "../schemas/summary.ts";
-import { lastOf, meanOilTempC } from "./baseline-of.ts";
+import { delivers, lastOf, meanOilTempC } from "./baseline-of.ts";
 import type { Session } from "./baseline-series.ts";
 
 /** A first check further than this under the sequence's usual delivery may be of a tired pump. */
@@ -88,7 +88,7 @@ export function judgeAgainst(
   });
   const oilTempC = meanOilTempC(session);
   const flags: FlagCode[] = [];
-  if (pooled.perRunMl === 0) flags.push("no-delivery");
+  if (!delivers(pooled)) flags.push("no-delivery");
   if (readsHigh(ratio, uRatio)) flags.push("reads-high");
   if (settle.baselineForbids) flags.push("baseline-cannot-settle");
   if (!sameSyringe(pooled, baseline)) flags.push("syringe-differs");

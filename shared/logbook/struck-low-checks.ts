@@ -4,7 +4,7 @@ import type { LogEntry, LogEntryOf, Sequence } from "../schemas/entry.ts";
 import { baselineSeries, measuredCheck } from "./baseline-series.ts";
 import { bikeDetails } from "./bike-details.ts";
 import { byEffectiveOrder, effectiveTime } from "./effective-order.ts";
-import { volumeOf } from "./baseline-of.ts";
+import { delivers, volumeOf } from "./baseline-of.ts";
 import { judgeSeries, type JudgedSeries } from "./judge-series.ts";
 import { lifetimeHours } from "./lifetime-hours.ts";
 import { standingEntries } from "./standing-entries.ts";
@@ -70,7 +70,7 @@ function isLow(
   reference: JudgedSeries["reference"],
   limits: Limits,
 ): boolean {
-  if (volume.perRunMl === 0) return true;
+  if (!delivers(volume)) return true;
   if (!reference) return false;
   const { ratio, uRatio } = compareToBaseline(volume, reference);
   return judge(ratio, uRatio, limits).verdict === "low";

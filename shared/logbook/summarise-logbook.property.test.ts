@@ -1,6 +1,6 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { arbitraryLogbook, OWNER } from "../../tests/helpers/arbitrary-logbook.ts";
+import { arbitraryLogbook, OWNER, schemaLogbook } from "../../tests/helpers/arbitrary-logbook.ts";
 import { logbook } from "../../tests/helpers/logbook-in-words.ts";
 import { actions, verdicts, type LogEntry, type WorkItem } from "../schemas/entry.ts";
 import { summarySchema } from "../schemas/summary.ts";
@@ -20,7 +20,7 @@ function numbersIn(value: unknown): number[] {
 describe("any logbook", () => {
   it("is summarised without a NaN, an infinity or a throw, into the agreed shape", () => {
     fc.assert(
-      fc.property(arbitraryLogbook, (entries) => {
+      fc.property(fc.oneof(arbitraryLogbook, schemaLogbook), (entries) => {
         const summary = summarise(entries);
         expect(numbersIn(summary).every(Number.isFinite)).toBe(true);
         expect(summarySchema.parse(summary)).toEqual(summary);

@@ -54,3 +54,29 @@ describe("a check against its baseline (one run each, 5 mL barrel with 0.2 mL ma
     expect(summary.due).toMatchObject({ atHours: 42, inHours: 10 });
   });
 });
+
+describe("a first check that delivers next to nothing", () => {
+  const after = (firstMl: number) =>
+    summarise(
+      logbook()
+        .bike({ name: "Moss" })
+        .check(12, [], { syringe: null, runs: [{ deliveredMl: firstMl }] })
+        .check(32, [3]).entries,
+    );
+
+  it.each([0, 1e-310, 0.000_9])("takes %d mL for nothing: the next check is the baseline", (ml) => {
+    const { checks, series } = after(ml);
+    expect(checks[0]).toMatchObject({
+      verdict: "low",
+      action: "stop",
+      flags: ["syringe-unknown", "no-delivery"],
+    });
+    expect(checks[1]).toMatchObject({ verdict: "settling", ratio: null });
+    expect(series[0]!.baseline).toMatchObject({ atHours: 32 });
+  });
+
+  it("takes 0.01 mL for a delivery", () => {
+    expect(after(0.01).checks[1]).toMatchObject({ verdict: "holding" });
+    expect(after(0.01).series[0]!.baseline).toMatchObject({ atHours: 12 });
+  });
+});

@@ -8,6 +8,7 @@ import {
   workItems,
   type LogEntry,
 } from "../../shared/schemas/entry.ts";
+import { arbitraryOf } from "./fuzz/arbitrary-of-schema.ts";
 
 export const OWNER = "owner";
 const BIKE = "0190a000-0000-7000-8000-000000000001";
@@ -132,7 +133,7 @@ const entryOf = (kind: keyof typeof bodies) =>
 
 const kinds = Object.keys(bodies) as (keyof typeof bodies)[];
 
-/** Any logbook of one bike that the schemas allow, ids unique; checks are the most frequent. */
+/** A likely logbook of one bike, ids unique and often told of; checks are the most frequent. */
 export const arbitraryLogbook = fc.uniqueArray(
   fc.oneof(
     { weight: 6, arbitrary: entryOf("check") },
@@ -140,3 +141,19 @@ export const arbitraryLogbook = fc.uniqueArray(
   ),
   { selector: (entry) => entry.id, maxLength: 30 },
 );
+
+const takenBySchema = (kind: keyof typeof bodies) =>
+  arbitraryOf(entrySchema.options.find(({ shape }) => shape.kind.value === kind)!).filter(
+    (entry): entry is LogEntry => entrySchema.safeParse(entry).success,
+  );
+
+/** Any logbook of one bike that the schema takes, however unlikely. */
+export const schemaLogbook = fc
+  .array(
+    fc.oneof(
+      { weight: 8, arbitrary: takenBySchema("check") },
+      ...kinds.map((kind) => ({ weight: 1, arbitrary: takenBySchema(kind) })),
+    ),
+    { maxLength: 10 },
+  )
+  .map((entries) => entries.map((entry) => ({ ...entry, bikeId: BIKE })));
