@@ -2,13 +2,14 @@ import { lineUpFacts } from "../../shared/logbook/line-up-facts.ts";
 import { standingAdvice, type AdviceNote } from "../../shared/logbook/standing-advice.ts";
 import { standingEntries } from "../../shared/logbook/standing-entries.ts";
 import { summariseLogbook } from "../../shared/logbook/summarise-logbook.ts";
-import { lineUpOrder } from "../../shared/schemas/club.ts";
+import { lineUpOrder, type LineUpFacts } from "../../shared/schemas/club.ts";
 import type { LogEntry } from "../../shared/schemas/entry.ts";
 import type { Summary } from "../../shared/schemas/summary.ts";
 import type { Store } from "../db/store.ts";
 
 export interface SummarisedBike {
   summary: Summary;
+  lineUp: LineUpFacts;
   /** The advice that stands. */
   advice: AdviceNote | null;
 }
@@ -43,7 +44,7 @@ export function summariseBike(store: Store, bikeId: string): SummarisedBike | nu
     store.bikeShares.place(bikeId, place);
     store.clubs.touchAllOf(bikeId);
   }
-  return { summary, advice: standingAdvice(standingEntries(ownerId, entries).standing) };
+  return { summary, lineUp, advice: standingAdvice(standingEntries(ownerId, entries).standing) };
 }
 
 /** A bike a transaction, so that a server at work is not held up. */

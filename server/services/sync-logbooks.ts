@@ -1,5 +1,6 @@
 import type { SyncRequest, SyncResponse } from "../../shared/schemas/sync.ts";
 import { otherAccount } from "../problems.ts";
+import { withdrawDue } from "./due-mails.ts";
 import type { MailParts } from "./mail-parts.ts";
 import { pullEntries } from "./pull-entries.ts";
 import { pushEntries } from "./push-entries.ts";
@@ -12,10 +13,12 @@ export function syncLogbooks(
   request: SyncRequest,
 ): SyncResponse {
   if (request.account !== undefined && request.account !== accountId) throw otherAccount();
-  const results = pushEntries(parts.store, accountId, request.entries, ({ summary, advice }) => {
+  const { store } = parts;
+  const results = pushEntries(store, accountId, request.entries, ({ summary, lineUp, advice }) => {
     mailStop(parts, summary);
     mailStopAdvice(parts, summary, advice);
+    withdrawDue(store, lineUp);
   });
-  const { epoch, ...pulled } = pullEntries(parts.store, accountId, request);
+  const { epoch, ...pulled } = pullEntries(store, accountId, request);
   return { epoch, results, ...pulled };
 }

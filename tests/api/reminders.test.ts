@@ -3,7 +3,14 @@ import { afterEach, describe, expect, it, vi } from "vitest";
 import supertest from "supertest";
 import { mailedPages } from "../../shared/schemas/mailed-pages.ts";
 import { linkIn, startMailServer } from "../helpers/mail-server.ts";
-import { bikeEntry, checkEntry, hoursEntry, newId, workEntry } from "../helpers/make-entry.ts";
+import {
+  bikeEntry,
+  checkEntry,
+  hoursEntry,
+  newId,
+  strikeEntry,
+  workEntry,
+} from "../helpers/make-entry.ts";
 import { createPhone, signUpRider, type Rider } from "../helpers/rider.ts";
 import { startTestServer, type TestServer } from "../helpers/start-test-server.ts";
 
@@ -142,6 +149,46 @@ describe("a reminder", () => {
     await addBike(await signUpRider(server, "Bob"), 21);
     await remind();
     expect(mail.about("Moss")).toEqual([]);
+  });
+
+  it.each([
+    ["checked", (bikeId: string) => checkEntry(bikeId, 29, 3, daysAgo(0))],
+    ["retired", (bikeId: string) => bikeEntry(bikeId, { retired: true })],
+    ["given a longer interval", (bikeId: string) => bikeEntry(bikeId, { intervalHours: 40 })],
+  ])("is not sent once its bike was %s while it waited", async (_, entry) => {
+    const { rider, mail, remind } = await confirmedRider();
+    const bikeId = await addBike(rider, 16);
+    mail.state.busy = true;
+    await remind();
+    await rider.sync([entry(bikeId)]);
+    mail.state.busy = false;
+    pass(1);
+    expect(await remind()).toEqual([]);
+  });
+
+  it("is not sent of hours that were struck while it waited", async () => {
+    const { rider, mail, remind } = await confirmedRider();
+    const bikeId = await addBike(rider, 2);
+    const typo = hoursEntry(bikeId, 29, daysAgo(0));
+    await rider.sync([typo]);
+    mail.state.busy = true;
+    await remind();
+    await rider.sync([strikeEntry(bikeId, typo.id)]);
+    mail.state.busy = false;
+    pass(1);
+    expect(await remind()).toEqual([]);
+  });
+
+  it("says overdue where the check became so while it waited", async () => {
+    const { rider, mail, remind } = await confirmedRider();
+    const bikeId = await addBike(rider, 16);
+    mail.state.busy = true;
+    await remind();
+    await rider.sync([hoursEntry(bikeId, 33, daysAgo(0))]);
+    mail.state.busy = false;
+    pass(1);
+    const subjects = (await remind()).map(({ headers }) => headers.subject);
+    expect(subjects).toEqual(["Moss: delivery check overdue"]);
   });
 
   it("is not sent to who turned reminders off while it waited", async () => {
