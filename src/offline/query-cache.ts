@@ -3,14 +3,18 @@
  * vanish at any moment with no loss; no entry ever depends on it.
  */
 import { createSyncStoragePersister } from "@tanstack/query-sync-storage-persister";
-import { QueryClient } from "@tanstack/react-query";
+import { QueryCache, QueryClient, type Query } from "@tanstack/react-query";
 import type {
   PersistedClient,
   PersistQueryClientOptions,
 } from "@tanstack/react-query-persist-client";
 import { rememberedAccount } from "./account.ts";
+import { ApiError } from "./errors.ts";
 
-/** A Line-up looked at before leaving must still be there after a week without a network. */
+/**
+ * A Line-up looked at before leaving must still be there after a week without a network. Each answer
+ * has its own age: the cache as a whole is written anew all the time.
+ */
 const KEPT_MS = 14 * 24 * 60 * 60 * 1000;
 /** Raise it when a cached answer's shape changes. */
 const CACHE_VERSION = "2";
@@ -44,6 +48,9 @@ function storageOf(accountId: string | null) {
   }
 }
 
+const isYoung = ({ dataUpdatedAt }: { dataUpdatedAt: number }) =>
+  Date.now() - dataUpdatedAt < KEPT_MS;
+
 /** What was answered stays an answer, also where asking again has failed since. */
 function serialize({ clientState, ...client }: PersistedClient): string {
   const queries = clientState.queries.map(({ state, ...query }) => ({
@@ -53,25 +60,41 @@ function serialize({ clientState, ...client }: PersistedClient): string {
   return JSON.stringify({ ...client, clientState: { ...clientState, queries } });
 }
 
+function deserialize(text: string): PersistedClient {
+  const { clientState, ...client } = JSON.parse(text) as PersistedClient;
+  const queries = clientState.queries.filter(({ state }) => isYoung(state));
+  return { ...client, clientState: { ...clientState, queries } };
+}
+
+/** What this account may not see any more, it may not see as it was either. */
+function forgetIfTakenAway(error: Error, query: Query<unknown, unknown>): void {
+  const isTakenAway = error instanceof ApiError && (error.status === 404 || error.status === 403);
+  if (isTakenAway && query.meta?.persist) query.setState({ data: undefined, dataUpdatedAt: 0 });
+}
+
 /**
  * A cache of its own for each account, in memory too, so that the next person on this phone sees
  * nothing of the last one's.
  */
 export function createReadCache(accountId: string | null): ReadCache {
   return {
-    client: new QueryClient({ defaultOptions: { queries: { gcTime: KEPT_MS, retry: 1 } } }),
+    client: new QueryClient({
+      queryCache: new QueryCache({ onError: forgetIfTakenAway }),
+      defaultOptions: { queries: { gcTime: KEPT_MS, retry: 1 } },
+    }),
     persistOptions: {
       persister: createSyncStoragePersister({
         storage: storageOf(accountId),
         key: `sumpless-read-${accountId ?? "nobody"}`,
         serialize,
+        deserialize,
       }),
       maxAge: KEPT_MS,
       buster: CACHE_VERSION,
       dehydrateOptions: {
         shouldDehydrateMutation: () => false,
         shouldDehydrateQuery: (query) =>
-          query.meta?.persist === true && query.state.data !== undefined,
+          query.meta?.persist === true && query.state.data !== undefined && isYoung(query.state),
       },
     },
   };
