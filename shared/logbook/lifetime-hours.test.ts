@@ -73,6 +73,19 @@ describe("a meter change", () => {
     });
   });
 
+  it("changes nothing where there was no reading before", () => {
+    expect(read(logbook().meter(null, 500).hours(10))).toMatchObject({ now: 10, displayOffset: 0 });
+    expect(read(logbook().meter(null, 500).hours(510))).toMatchObject({ now: 510 });
+  });
+
+  it("never gives hours below zero, whatever the new meter shows", () => {
+    // 10 on the old meter, 500 typed for 5.0 on the new one: the offset is −490.
+    const book = logbook().hours(10).meter(10, 500).check(12, [3]);
+    expect(read(book)).toMatchObject({ now: 10, doubtful: [{ atHours: 0 }] });
+    expect(read(book).atHours.get(book.lastId)).toBe(0);
+    expect(read(book.hours(14)).now).toBe(0);
+  });
+
   it("adds up over two changes", () => {
     const book = logbook().hours(100).meter(100, 0).hours(50).meter(50, 10).hours(15);
     expect(read(book)).toMatchObject({ now: 155, displayOffset: 140 });

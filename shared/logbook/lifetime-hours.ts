@@ -81,7 +81,9 @@ function isEstimated(entry: LogEntry): boolean {
  * A reading below an earlier one, or gaining more hours than passed, is kept and does not count
  * until an `hours` entry confirms it or a later reading agrees with it.
  * Units: hours, ms, hours a week. Input: the standing entries in effective order.
- * Edges: no reading → `now` null; readings under a week apart → `perWeek` null.
+ * Edges: no reading → `now` null; a meter changed before any reading leaves the offset as it is; a
+ * reading that would lie below 0 (a new meter's first reading mistyped) is 0; readings under a week
+ * apart → `perWeek` null.
  *
  * @example lifetimeHours([hours 12.0 on Monday, hours 320 on Tuesday]) // now 12, one doubtful reading
  */
@@ -99,14 +101,14 @@ export function lifetimeHours(standing: readonly LogEntry[]): LifetimeHours {
         : {
             entryId: entry.id,
             timeMs: effectiveTime(entry),
-            hours: entry.hours + offset,
+            hours: Math.max(0, entry.hours + offset),
             estimated: isEstimated(entry),
           };
     const counts = reading !== null && readings.take(reading, confirmed.has(entry.id));
     if (reading) atHours.set(entry.id, reading.hours);
     if (entry.kind === "meter") {
       const oldMeter = counts ? reading : readings.counted.at(-1);
-      offset = (oldMeter?.hours ?? 0) - entry.body.newReading;
+      if (oldMeter) offset = oldMeter.hours - entry.body.newReading;
     }
   }
   const last = readings.counted.at(-1);

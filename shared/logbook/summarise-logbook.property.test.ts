@@ -29,6 +29,22 @@ describe("any logbook", () => {
     );
   });
 
+  it("has no lifetime hours below zero", () => {
+    fc.assert(
+      fc.property(fc.oneof(arbitraryLogbook, schemaLogbook), (entries) => {
+        const { hours, checks, series, due } = summarise(entries);
+        const lifetimes = [
+          hours.now,
+          due.atHours,
+          ...[...checks, ...series, ...hours.doubtful].map(({ atHours }) => atHours),
+          ...series.map(({ baseline }) => baseline?.atHours),
+        ];
+        for (const lifetime of lifetimes) expect(lifetime ?? 0).toBeGreaterThanOrEqual(0);
+      }),
+      RUNS,
+    );
+  });
+
   it("gives the same answer in any order and with any repeats", () => {
     const reordered = arbitraryLogbook.chain((entries) =>
       fc.tuple(fc.constant(entries), shuffled(entries), fc.subarray(entries)),
