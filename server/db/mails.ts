@@ -1,7 +1,19 @@
-import { and, asc, eq, isNotNull, isNull, lt, lte, or, sql } from "drizzle-orm";
+import {
+  and,
+  asc,
+  eq,
+  inArray,
+  isNotNull,
+  isNull,
+  lt,
+  lte,
+  notInArray,
+  or,
+  sql,
+} from "drizzle-orm";
 import type { Letter } from "../mail/letter.ts";
 import type { Database } from "./open-database.ts";
-import { bikes, mails, type mailTopics } from "./schema.ts";
+import { bikes, clubInvites, mails, tokenPurposes, type mailTopics } from "./schema.ts";
 import { accountIds } from "./users.ts";
 
 export type MailTopic = (typeof mailTopics)[number];
@@ -99,7 +111,8 @@ export function createMails(db: Database) {
     all: (): MailRow[] => db.select().from(mails).all(),
     /**
      * Those and no others, of accounts that there are. A bike that is not there yet is left unnamed:
-     * the occasion is remembered all the same, for when its phone brings it.
+     * what was sent about it is remembered all the same, for when its phone brings it; what was not
+     * is written again then.
      */
     replaceAll(rows: MailRow[]): void {
       const accounts = accountIds(db);
@@ -114,11 +127,29 @@ export function createMails(db: Database) {
       for (const row of rows) {
         if (row.userId !== null && !accounts.has(row.userId)) continue;
         const bikeId = row.bikeId !== null && there.has(row.bikeId) ? row.bikeId : null;
+        if (bikeId !== row.bikeId && row.nextAttemptAt !== null) continue;
         db.insert(mails)
           .values({ ...row, bikeId })
           .run();
       }
     },
+    /** What still waits though its link leads nowhere any more, all accounts' links being void. */
+    withdrawDeadLinks: () =>
+      db
+        .delete(mails)
+        .where(
+          and(
+            isNotNull(mails.nextAttemptAt),
+            or(
+              inArray(mails.topic, [...tokenPurposes]),
+              and(
+                eq(mails.topic, "invitation"),
+                notInArray(mails.occasion, db.select({ id: clubInvites.id }).from(clubInvites)),
+              ),
+            ),
+          ),
+        )
+        .run(),
     removeBefore: (queuedAt: string) =>
       db
         .delete(mails)

@@ -88,6 +88,7 @@ async function ready(dataDir: string, readied: string, setAside: string | null) 
       store.reminders.replaceAll(kept.reminders);
       store.mails.replaceAll(kept.mails);
     }
+    store.mails.withdrawDeadLinks();
   });
   store.epoch.renew();
   const erasures = replayErasures(store);

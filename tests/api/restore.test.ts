@@ -347,6 +347,42 @@ describe("mails after a restore", () => {
     expect(await wanted(bob)).toEqual({ reminders: { dueMails: true, stopMails: false } });
   });
 
+  it("are none that waited and lead nowhere any more, and one about a bike once it is there", async () => {
+    const mail = await startMailServer();
+    const { smtpUrl } = mail;
+    const server = await startTestServer({ smtpUrl });
+    const { organiser, owner, mechanic, club, bikeId } = await clubOfFour(server);
+    for (const { user } of [organiser, owner]) server.store.users.markVerified(user.id);
+    const backup = await backUp(server);
+    await server.mailer.sendDue();
+    const before = mail.letters.length;
+    mail.state.busy = true;
+    const added = newId();
+    const log = [bikeEntry(added, { name: "Fern" }), noteEntry(added, "Hose is cracked", "stop")];
+    await owner.sync([log[0]!]);
+    await share(owner, added, club.id);
+    await mechanic.sync([log[1]!, noteEntry(bikeId, "Screen is blocked", "stop")]);
+    await invite(organiser, club.id, { email: "friend@club.example" });
+    const { email } = owner.user;
+    await createPhone(server).post("/api/auth/request-password-reset").send({ email }).expect(204);
+    await server.mailer.sendDue();
+    const waiting = "SELECT count(*) FROM mails WHERE letter IS NOT NULL";
+    expect(server.database.$client.prepare(waiting).pluck().get()).toBe(4);
+
+    const restored = await restoreAndStart(server, backup, { smtpUrl });
+    mail.state.busy = false;
+    restored.database.$client.exec("UPDATE mails SET next_attempt_at = 0 WHERE letter IS NOT NULL");
+    await restored.mailer.sendDue();
+    const sent = () => mail.letters.slice(before).map(({ headers }) => headers.subject);
+    expect(sent()).toEqual(["Moss: stop advised"]);
+    const ann = await signInRider(restored, email);
+    await ann.sync([log[0]!]);
+    await share(ann, added, club.id);
+    await (await signInRider(restored, mechanic.user.email)).sync([log[1]!]);
+    await restored.mailer.sendDue();
+    expect(sent()).toEqual(["Moss: stop advised", "Fern: stop advised"]);
+  });
+
   const daysAgo = (days: number) => subDays(new Date(), days).toISOString();
 
   it("are none that were sent since the backup, be it of a bike that the backup lacks", async () => {
