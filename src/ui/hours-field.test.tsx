@@ -39,6 +39,27 @@ describe("HoursField", () => {
     expect(screen.getByLabelText("Minutes")).toHaveValue("05");
   });
 
+  it("steps hours and minutes where the meter shows them, an hour being 60 minutes", async () => {
+    render(<Hours from="12:58" meterFormat="hh:mm" />);
+    const press = (name: string) => userEvent.click(screen.getByRole("button", { name }));
+    await press("Minutes: more");
+    await press("Minutes: more");
+    expect(screen.getByLabelText("Hours")).toHaveValue("13");
+    expect(screen.getByLabelText("Minutes")).toHaveValue("00");
+    await press("Minutes: less");
+    await press("Hours: more");
+    expect(screen.getByLabelText("Hours")).toHaveValue("13");
+    expect(screen.getByLabelText("Minutes")).toHaveValue("59");
+    for (let presses = 0; presses < 15; presses += 1) await press("Hours: less");
+    expect(screen.getByRole("status")).toHaveTextContent(/^0$/);
+  });
+
+  it("steps hours and minutes from nothing", async () => {
+    render(<Hours from="" meterFormat="hh:mm" />);
+    await userEvent.click(screen.getByRole("button", { name: "Hours: more" }));
+    expect(screen.getByRole("status")).toHaveTextContent(/^1$/);
+  });
+
   it("steps by a tenth where the meter shows decimals", async () => {
     render(<Hours from="12.9" meterFormat="decimal" />);
     await userEvent.click(screen.getByRole("button", { name: "Engine hours: more" }));

@@ -1,7 +1,10 @@
 import { useId } from "react";
 import type { MeterFormat } from "../../shared/schemas/entry.ts";
-import { numberClass, FieldNotes, type FieldWords } from "./field.tsx";
+import { FieldNotes, type FieldWords } from "./field.tsx";
+import { formatHours } from "./format-hours.ts";
 import { NumberField } from "./number-field.tsx";
+import { parseDecimal } from "./parse-decimal.ts";
+import { StepperInput } from "./stepper-input.tsx";
 
 interface Props extends FieldWords {
   /** As typed: `12.5`, or `12:30` on an hh:mm meter; `parseHours` reads both. */
@@ -19,28 +22,29 @@ export function HoursField({ meterFormat, ...props }: Props) {
 
 function HoursAndMinutes(props: Omit<Props, "meterFormat">) {
   const id = useId();
-  const [hours = "", minutes = ""] = props.value.split(":");
+  const { label, hint, error, value, onChange, large } = props;
+  const [hours = "", minutes = ""] = value.split(":");
+  // A minute more than 12:59 is 13:00.
+  const step = (byMinutes: number) => {
+    const now = 60 * (parseDecimal(hours) ?? 0) + (parseDecimal(minutes) ?? 0);
+    onChange(formatHours(Math.max(0, now + byMinutes) / 60, "hh:mm"));
+  };
   return (
-    <fieldset aria-describedby={`${id}-hint ${id}-error`} className="flex flex-col gap-1">
-      <legend className="mb-1 font-bold">{props.label}</legend>
-      <div className="flex items-center gap-2">
+    <fieldset aria-describedby={`${id}-hint ${id}-error`} className="flex min-w-0 flex-col gap-1">
+      <legend className="mb-1 font-bold">{label}</legend>
+      <div className="flex flex-wrap gap-x-4 gap-y-2">
         <Part
-          {...props}
-          name="Hours"
-          value={hours}
-          set={(text) => props.onChange(`${text}:${minutes}`)}
+          {...{ name: "Hours", error, large, value: hours }}
+          onChange={(text) => onChange(`${text}:${minutes}`)}
+          onStep={(direction) => step(60 * direction)}
         />
-        <span aria-hidden className="text-3xl font-bold">
-          :
-        </span>
         <Part
-          {...props}
-          name="Minutes"
-          value={minutes}
-          set={(text) => props.onChange(`${hours}:${text}`)}
+          {...{ name: "Minutes", error, large, value: minutes }}
+          onChange={(text) => onChange(`${hours}:${text}`)}
+          onStep={step}
         />
       </div>
-      <FieldNotes id={id} hint={props.hint} error={props.error} />
+      <FieldNotes id={id} hint={hint} error={error} />
     </fieldset>
   );
 }
@@ -48,25 +52,26 @@ function HoursAndMinutes(props: Omit<Props, "meterFormat">) {
 interface PartProps {
   name: string;
   value: string;
-  set: (text: string) => void;
+  onChange: (text: string) => void;
+  onStep: (direction: 1 | -1) => void;
   error?: string;
   large?: boolean;
 }
 
-function Part({ name, value, set, error, large }: PartProps) {
+/** Beside each other where there is room for both steppers. */
+function Part({ name, error, ...input }: PartProps) {
+  const id = useId();
   return (
-    <label className="flex min-w-0 flex-1 flex-col gap-1">
-      <input
-        type="text"
+    <div className="flex min-w-0 flex-[1_1_13rem] flex-col gap-1">
+      <label htmlFor={id} className="text-soft">
+        {name}
+      </label>
+      <StepperInput
+        {...input}
+        label={name}
+        wiring={{ id, "aria-invalid": error ? true : undefined }}
         inputMode="numeric"
-        autoComplete="off"
-        aria-invalid={error ? true : undefined}
-        value={value}
-        onChange={(event) => set(event.target.value)}
-        onFocus={(event) => event.target.select()}
-        className={numberClass(large, value)}
       />
-      <span className="text-center text-soft">{name}</span>
-    </label>
+    </div>
   );
 }

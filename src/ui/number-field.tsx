@@ -1,7 +1,7 @@
-import type { ReactNode } from "react";
-import { MinusIcon, PlusIcon } from "./icons.tsx";
-import { numberClass, Field, type FieldWiring, type FieldWords } from "./field.tsx";
+import { Field, type FieldWords } from "./field.tsx";
+import { parseDecimal } from "./parse-decimal.ts";
 import { stepDecimal, type StepLimits } from "./step-decimal.ts";
+import { StepperInput } from "./stepper-input.tsx";
 
 export interface NumberInput extends StepLimits {
   /** What stands in the field, as typed; `parseDecimal` reads it. */
@@ -9,6 +9,8 @@ export interface NumberInput extends StepLimits {
   onChange: (text: string) => void;
   /** What one press of − or + changes. */
   step: number;
+  /** What the first press shows where nothing stands yet; otherwise a step from 0. */
+  startAt?: number;
   unit?: string;
   /** Figures at arm's length, for the one number a screen is about. */
   large?: boolean;
@@ -16,57 +18,24 @@ export interface NumberInput extends StepLimits {
 
 type Props = FieldWords & NumberInput;
 
-/** A number with a stepper. Text with a decimal keyboard, so that `3,8` is kept as it was typed. */
-export function NumberField({ label, hint, error, ...input }: Props) {
+/** A number with a stepper, and a decimal keyboard. */
+export function NumberField({ label, hint, error, step, min, max, startAt, ...input }: Props) {
+  const { value, onChange } = input;
+  const press = (direction: 1 | -1) =>
+    startAt !== undefined && parseDecimal(value) === null
+      ? onChange(String(startAt))
+      : onChange(stepDecimal(value, direction * step, { min, max }));
   return (
     <Field label={label} hint={hint} error={error}>
-      {(wiring) => <StepperInput label={label} wiring={wiring} {...input} />}
-    </Field>
-  );
-}
-
-function StepperInput(props: NumberInput & { label: string; wiring: FieldWiring }) {
-  const { label, wiring, value, onChange, step, unit, large, min, max } = props;
-  const press = (by: number) => onChange(stepDecimal(value, by, { min, max }));
-  return (
-    <div className="flex items-stretch gap-2">
-      <StepButton name={`${label}: less`} onClick={() => press(-step)}>
-        <MinusIcon />
-      </StepButton>
-      <div className="relative min-w-0 flex-1">
-        <input
-          {...wiring}
-          type="text"
+      {(wiring) => (
+        <StepperInput
+          {...input}
+          label={label}
+          wiring={wiring}
           inputMode={min !== undefined && min >= 0 ? "decimal" : "text"}
-          autoComplete="off"
-          enterKeyHint="done"
-          value={value}
-          onChange={(event) => onChange(event.target.value)}
-          onFocus={(event) => event.target.select()}
-          className={`${numberClass(large, value)} h-full`}
+          onStep={press}
         />
-        {unit && (
-          <span className="pointer-events-none absolute inset-y-0 right-3 flex items-center text-soft">
-            {unit}
-          </span>
-        )}
-      </div>
-      <StepButton name={`${label}: more`} onClick={() => press(step)}>
-        <PlusIcon />
-      </StepButton>
-    </div>
-  );
-}
-
-function StepButton(props: { name: string; onClick: () => void; children: ReactNode }) {
-  return (
-    <button
-      type="button"
-      aria-label={props.name}
-      onClick={props.onClick}
-      className="flex min-h-target min-w-target shrink-0 items-center justify-center rounded-card border border-edge bg-card active:bg-rule"
-    >
-      {props.children}
-    </button>
+      )}
+    </Field>
   );
 }

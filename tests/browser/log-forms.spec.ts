@@ -154,9 +154,9 @@ test("A rider with an hh:mm meter types hours and minutes", async ({ page, rider
   await write(page, "Hours").click();
   const group = page.getByRole("group", { name: "Engine hours" });
   await expect(group.getByLabel("Hours", { exact: true })).toHaveValue("9");
-  await expect(group.getByLabel("Minutes")).toHaveValue("45");
+  await expect(group.getByRole("textbox", { name: "Minutes" })).toHaveValue("45");
   await group.getByLabel("Hours", { exact: true }).fill("11");
-  await group.getByLabel("Minutes").fill("15");
+  await group.getByRole("textbox", { name: "Minutes" }).fill("15");
   await save(page);
   await expect(logLines(page).first()).toContainText(/11:15\sh/);
 });
