@@ -223,7 +223,7 @@ const bodies = {
       fuelL: quantity("Fuel", "litres", 10_000).optional(),
       fuelFull: z.boolean().optional(),
     })
-    .refine((body) => body.oilMl !== undefined || body.fuelL !== undefined, {
+    .refine((body) => Object.values(body).some((value) => value !== undefined), {
       path: ["oilMl"],
       error: "Say how much oil or fuel went in.",
     }),

@@ -65,5 +65,7 @@ describe("entryFacts", () => {
   it("tells what was topped up", () => {
     const topup = { kind: "topup", body: { oilMl: 450, oilFull: true, fuelL: 8.5 } } as LogEntry;
     expect(entryFacts(topup, "decimal")).toEqual(["Oil 450\u00a0mL, filled up", "Fuel 8.5\u00a0L"]);
+    const full = { kind: "topup", body: { oilFull: true, fuelFull: true } } as LogEntry;
+    expect(entryFacts(full, "decimal")).toEqual(["Oil filled up", "Fuel filled up"]);
   });
 });

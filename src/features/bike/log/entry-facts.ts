@@ -45,8 +45,8 @@ export function entryFacts(entry: LogEntry, meterFormat: MeterFormat): string[] 
     case "topup": {
       const { oilMl, oilFull, fuelL, fuelFull } = entry.body;
       return present(
-        oilMl !== undefined && `Oil ${oilMl}\u00a0mL${oilFull ? ", filled up" : ""}`,
-        fuelL !== undefined && `Fuel ${fuelL}\u00a0L${fuelFull ? ", filled up" : ""}`,
+        topupWords("Oil", oilMl, "mL", oilFull),
+        topupWords("Fuel", fuelL, "L", fuelFull),
       );
     }
     case "note":
@@ -54,6 +54,11 @@ export function entryFacts(entry: LogEntry, meterFormat: MeterFormat): string[] 
     case "strike":
       return [];
   }
+}
+
+function topupWords(what: string, volume: number | undefined, unit: string, full = false) {
+  if (volume === undefined) return full && `${what} filled up`;
+  return `${what} ${volume}\u00a0${unit}${full ? ", filled up" : ""}`;
 }
 
 function runWords(run: Run): string {
