@@ -71,6 +71,16 @@ function askSetAside<T>(setAside: string | null, ask: (database: Database) => T)
   }
 }
 
+/** With what its WAL holds, where it was copied from a running server by other means than ours. */
+async function copyBackup(backup: string, copy: string): Promise<void> {
+  const { $client } = openReadOnly(backup);
+  try {
+    await $client.backup(copy);
+  } finally {
+    $client.close();
+  }
+}
+
 /** A copy of the backup, healed of what it does not know; how it went. */
 async function ready(dataDir: string, readied: string, setAside: string | null) {
   const database = openDatabase(readied);
@@ -127,7 +137,7 @@ export async function restoreDatabase(dataDir: string, backup: string) {
   try {
     const setAside = wasThere ? await copyAside(dataDir, held) : null;
     remove([readied, ...journalsOf(readied)]);
-    copyFileSync(backup, readied);
+    await copyBackup(backup, readied);
     const outcome = await ready(dataDir, readied, setAside);
     remove(journalsOf(file));
     renameSync(readied, file);

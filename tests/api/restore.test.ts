@@ -1,6 +1,6 @@
 import SQLite from "better-sqlite3";
 import { subDays } from "date-fns";
-import { existsSync, readFileSync, rmSync, writeFileSync } from "node:fs";
+import { copyFileSync, existsSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import path from "node:path";
 import { describe, expect, it } from "vitest";
 import { assertIntegrity, backUpDatabase, backupsDir } from "../../server/db/back-up-database.ts";
@@ -452,6 +452,15 @@ describe("restoring", () => {
     await restoreDatabase(server.dataDir, backup);
     expect(() => waiting.pragma("journal_mode=WAL")).toThrow("readonly");
     waiting.close();
+  });
+
+  it("takes a backup with the WAL that was copied along", async () => {
+    const server = await startTestServer();
+    const rider = await signUpRider(server);
+    const file = databaseFile(server.dataDir);
+    const copy = path.join(temporaryDir(), "copied.sqlite");
+    for (const part of ["", "-wal"]) copyFileSync(file + part, copy + part);
+    await signInRider(await restoreAndStart(server, copy), rider.user.email);
   });
 
   it("is refused from the database itself", async () => {
