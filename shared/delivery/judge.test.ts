@@ -125,7 +125,7 @@ describe("runsToSettle", () => {
     expect(runsToSettle(further({ session: volume(2.1, 0.1) })).runs).toBe(0);
   });
 
-  it("is the fewest further runs that bring pLow to 0.05", () => {
+  it("is the fewest further runs that bring pLow to 0.05 (the documented example)", () => {
     // At r = 0.9 that takes u ≤ 0.05/1.645 = 0.0304, of which the baseline has 0.9·0.0133 = 0.0120:
     // u(V) ≤ 3·0.0279 = 0.0838. One more run (0.0991) pools to 0.0699.
     expect(runsToSettle(further({}))).toEqual({ runs: 1, baselineForbids: false });

@@ -26,10 +26,12 @@ export interface FurtherRuns {
  *
  * Formula: n further runs, as many a fill as the barrel holds, are a further check with
  * u = √(marks² + s²/n + temperature²), pooled with the session by 1/u² as the logbook pools them.
- * Answers `{ runs }`: 0 where it is settled already, null beyond 10; `baselineForbids` where even
+ * Units: mL; limits and repeatability as fractions. Source: GUM (JCGM 100), 5.1.2; JCGM 106:2012.
+ * Edges: `runs` is 0 where it is settled already, null beyond 10; `baselineForbids` where even
  * perfect runs would not settle it, because the baseline (or the two scales) is too uncertain.
  *
- * @example runsToSettle({ …session 2.7 ± 0.1 against 3.0 ± 0.03, read to 0.1 mL }) // { runs: 1, … }
+ * @example runsToSettle({ session: 2.7 mL, u 0.0986; baseline: 3 mL, u 0.04; capacityMl: 5,
+ *   graduationMl: 0.2, repeatability: 0.02, temperatureMl: 0.0112, … }) // { runs: 1, baselineForbids: false }
  */
 export function runsToSettle(further: FurtherRuns): {
   runs: number | null;

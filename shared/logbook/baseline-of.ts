@@ -31,8 +31,14 @@ export function poolSessions(sessions: readonly Session[]) {
 }
 
 /**
- * The baseline of a series: its first session that delivered anything, as a volume with its
- * uncertainty (mL a run at 15 °C). Edge: null until there is one.
+ * The baseline of a series: its first session that delivered anything.
+ *
+ * Formula: the session pooled (`poolSession`), with its oil's mean temperature where written down, at
+ * its last check's hours. Units: mL a run at 15 °C, °C, lifetime hours. Source: GUM (JCGM 100).
+ * Edges: sessions of under 0.001 mL a run are none; null until there is one.
+ *
+ * @example baselineOf({ sessions: [[0 mL at 10 h], [3 mL at 12 h], [2.9 mL at 32 h]] })
+ * // { perRunMl: 2.989, uMl: 0.1017, …, oilTempC: null, atHours: 12 }
  */
 export function baselineOf({ sessions }: Pick<Series, "sessions">): Baseline | null {
   const pooled = poolSessions(sessions);

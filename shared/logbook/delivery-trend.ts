@@ -34,6 +34,9 @@ function birgeScaled(fit: LineFit): { fit: LineFit; scatters: boolean } {
  * where the line meets the limit, (1 − actDrop) of the reference baseline. Units: mL a run, lifetime hours.
  * Source: ISO/TS 28037:2010 clause 6; Birge 1932; Fieller's limits.
  * Edges: null for fewer than 3 sessions or under 10 h; doubted hours are left out.
+ *
+ * @example deliveryTrend({ sessions: [3 mL at 10 h, 2.94 at 30, 2.88 at 50, 2.82 at 70], … }, 0.15)
+ * // four runs each: trend: { perHour: -0.00299, …, reachesLimitAtHours: 160, range: { low: 112, high: 367 } }
  */
 export function deliveryTrend(
   { sessions, reference }: Pick<JudgedSeries, "sessions" | "reference">,
