@@ -44,7 +44,7 @@ export class ProductServer {
       stdio: ["ignore", "ignore", "inherit"],
     });
     const isUp = () =>
-      fetch(`${this.origin}/api/health`).then(
+      fetch(`${this.origin}/api/health`, { headers: { connection: "close" } }).then(
         (answer) => answer.ok,
         () => false,
       );
@@ -109,6 +109,8 @@ export class Rider {
       method,
       headers: {
         ...this.caller,
+        // The server ends a connection that was quiet for 5 s, perhaps just as it is used again.
+        connection: "close",
         origin: this.origin,
         cookie: this.cookie,
         ...(body === undefined ? {} : { "content-type": "application/json" }),

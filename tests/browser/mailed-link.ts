@@ -9,7 +9,8 @@ const links = (html: string) => [
  * where no mail goes out.
  */
 export async function mailedLink({ origin }: Served, subject: string, to = ""): Promise<string> {
-  const read = async (pathname: string) => (await fetch(origin + pathname)).text();
+  const read = async (pathname: string) =>
+    (await fetch(origin + pathname, { headers: { connection: "close" } })).text();
   const newest = async () =>
     links(await read("/dev/mail")).find(
       ([, , words, address]) => words!.includes(subject) && address!.includes(to),
