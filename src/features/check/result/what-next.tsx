@@ -56,6 +56,12 @@ export function WhatNext({ record, check, hoseMaybeOff }: Props) {
       <h2 id="what-next" className="text-xl">
         What to do next, in this order
       </h2>
+      {hoseMaybeOff && (
+        <p className="font-bold">
+          Close the check out first. What you tick here is kept; it can be written in the log once
+          that is done.
+        </p>
+      )}
       <TickGroup
         label="Tick what you have done"
         hint="Then check again: the old baseline tells whether the cure worked."
@@ -76,12 +82,6 @@ export function WhatNext({ record, check, hoseMaybeOff }: Props) {
       )}
       <ProblemList errors={errors} problem={problem} />
       {written && <p role="status">Written in the log: saved on this phone.</p>}
-      {hoseMaybeOff && (
-        <p className="font-bold">
-          Close the check out first. What you tick here is kept; it can be written in the log once
-          that is done.
-        </p>
-      )}
       {ids.length > 0 && !hoseMaybeOff && (
         <Button look="primary" disabled={busy} onClick={() => void submit()}>
           Write it in the log
