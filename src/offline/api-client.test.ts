@@ -3,7 +3,8 @@ import { createServer, type RequestListener, type Server } from "node:http";
 import type { AddressInfo } from "node:net";
 import { afterEach, describe, expect, it } from "vitest";
 import { z } from "zod";
-import { apiNewer, apiRequest } from "./api-client.ts";
+import { apiRequest } from "./api-client.ts";
+import { apiNewer } from "./api-newer.ts";
 import { ApiError, NoNetworkError } from "./errors.ts";
 
 const schema = z.object({ bikes: z.array(z.string()) });

@@ -59,7 +59,7 @@ async function failure(response: Response): Promise<ApiError | NoNetworkError> {
     : new NoNetworkError({ status: response.status, retryAfterMs: retryAfter });
 }
 
-async function answerOf<T>(path: string, request: ApiRequest<T>): Promise<Response> {
+export async function answerOf<T>(path: string, request: ApiRequest<T>): Promise<Response> {
   const send = request.fetch ?? fetch;
   const response = await send(path, requestInit(request)).catch((cause: unknown) => {
     throw new NoNetworkError(undefined, { cause });
@@ -69,7 +69,7 @@ async function answerOf<T>(path: string, request: ApiRequest<T>): Promise<Respon
   return response;
 }
 
-async function contentOf<T>(response: Response, schema: AnswerSchema<T>): Promise<T> {
+export async function contentOf<T>(response: Response, schema: AnswerSchema<T>): Promise<T> {
   const parsed = schema.safeParse(await json(response));
   if (parsed.success) return parsed.data;
   throw new NoNetworkError({ status: response.status, retryAfterMs: null });
@@ -89,15 +89,4 @@ export async function apiFile(path: string, type: string): Promise<Blob> {
 export async function apiRequest<T = void>(path: string, request: ApiRequest<T> = {}): Promise<T> {
   const response = await answerOf(path, request);
   return request.schema ? contentOf(response, request.schema) : (undefined as T);
-}
-
-/** Asks only for what is newer than the answer of this `etag`: null where that one still holds. */
-export async function apiNewer<T>(
-  path: string,
-  schema: AnswerSchema<T>,
-  etag: string | null,
-): Promise<{ etag: string | null; content: T } | null> {
-  const response = await answerOf(path, { etag });
-  if (response.status === 304) return null;
-  return { etag: response.headers.get("etag"), content: await contentOf(response, schema) };
 }

@@ -1,7 +1,7 @@
 import { QueryClient } from "@tanstack/react-query";
 import { afterEach, describe, expect, it, vi } from "vitest";
 import type { LineUpRow } from "../../shared/schemas/club.ts";
-import { lineUpQuery } from "./club-queries.ts";
+import { lineUpQuery, type LineUp } from "./club-queries.ts";
 
 const row = (bikeId: string, name: string): LineUpRow => ({
   bikeId,
@@ -43,5 +43,35 @@ describe("a club's Line-up", () => {
     expect(first).toHaveBeenCalledTimes(3);
     vi.stubGlobal("fetch", board('"2"', [row("b", "Fern")]));
     expect(await ask(client)).toEqual(["Fern"]);
+  });
+});
+
+describe("what was said of a club", () => {
+  afterEach(() => vi.unstubAllGlobals());
+
+  /** Asks as a screen does that shows what was said before. */
+  async function saidAfter(answer: () => Promise<Response>) {
+    const client = new QueryClient();
+    vi.stubGlobal("fetch", board('"1"', [row("a", "Moss")]));
+    await client.fetchQuery(lineUpQuery("moor"));
+    vi.stubGlobal("fetch", answer);
+    await client.fetchQuery(lineUpQuery("moor")).catch(() => undefined);
+    return client.getQueryData<LineUp>(lineUpQuery("moor").queryKey)?.bikes[0]?.name;
+  }
+
+  const problem = (status: number) => () => {
+    const body = { type: "about:blank", title: "", status, detail: "It is not here." };
+    const headers = { "content-type": "application/problem+json" };
+    return Promise.resolve(new Response(JSON.stringify(body), { status, headers }));
+  };
+
+  it.each([403, 404])("is forgotten once the server answers by %i", async (status) => {
+    expect(await saidAfter(problem(status))).toBeUndefined();
+  });
+
+  it("stays where there is no network, an ended session or a problem of the server's", async () => {
+    expect(await saidAfter(() => Promise.reject(new TypeError("Failed to fetch")))).toBe("Moss");
+    expect(await saidAfter(() => Promise.resolve(new Response("", { status: 404 })))).toBe("Moss");
+    for (const status of [401, 500]) expect(await saidAfter(problem(status))).toBe("Moss");
   });
 });

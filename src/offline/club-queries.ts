@@ -9,16 +9,42 @@ import {
   MAX_LINE_UP_PAGE,
   type LineUpRow,
 } from "../../shared/schemas/club.ts";
-import { apiNewer, apiRequest } from "./api-client.ts";
+import { apiRequest } from "./api-client.ts";
+import { apiNewer } from "./api-newer.ts";
+import { ApiError } from "./errors.ts";
 
-const kept = { networkMode: "always", meta: { persist: true } } as const;
+const isTakenAway = (error: unknown) =>
+  error instanceof ApiError && (error.status === 404 || error.status === 403);
+
+/**
+ * What the server says, and, with no network, what it last said. What this account may not see any
+ * more, it may not see as it was either.
+ */
+export const keptAnswer = <T>(
+  queryKey: readonly string[],
+  read: (last: T | undefined) => Promise<T>,
+) =>
+  queryOptions({
+    queryKey,
+    async queryFn({ client }): Promise<T> {
+      try {
+        return await read(client.getQueryData<T>(queryKey));
+      } catch (error) {
+        const query = client.getQueryCache().find({ queryKey });
+        if (isTakenAway(error))
+          query?.setState({ data: undefined, dataUpdatedAt: 0, status: "pending" });
+        throw error;
+      }
+    },
+    networkMode: "always",
+    meta: { persist: true },
+  });
 
 /** The clubs this account is in, with what it is there. */
-export const clubsQuery = queryOptions({
-  queryKey: ["clubs"],
-  queryFn: async () => (await apiRequest("/api/clubs", { schema: clubsResponseSchema })).clubs,
-  ...kept,
-});
+export const clubsQuery = keptAnswer(
+  ["clubs"],
+  async () => (await apiRequest("/api/clubs", { schema: clubsResponseSchema })).clubs,
+);
 
 /** A club's board, under the tag by which the server tells whether it has changed. */
 export interface LineUp {
@@ -54,8 +80,4 @@ async function readLineUp(clubId: string, last: LineUp | undefined): Promise<Lin
 
 /** The bikes shared with a club, for its mechanics. */
 export const lineUpQuery = (clubId: string) =>
-  queryOptions({
-    queryKey: ["clubs", clubId, "line-up"],
-    queryFn: ({ client, queryKey }) => readLineUp(clubId, client.getQueryData<LineUp>(queryKey)),
-    ...kept,
-  });
+  keptAnswer<LineUp>(["clubs", clubId, "line-up"], (last) => readLineUp(clubId, last));

@@ -7,6 +7,7 @@ import { phoneOf } from "../logbook/phone.ts";
 import { rebuildBikes } from "../logbook/rebuild-bikes.ts";
 import { reportPhase } from "../sync-status.ts";
 import type { Account } from "../types.ts";
+import { forgetOld } from "./forget-old.ts";
 import { createSyncEngine, type SyncEngine } from "./sync-engine.ts";
 import { runSyncSession, type SyncSession } from "./sync-session.ts";
 
@@ -52,7 +53,10 @@ export function startPageSync(account: Account): PageSync {
     onApplied: tellChanged,
   };
   const engine = createSyncEngine({
-    runSession: () => alone(`sumpless-sync-${account.id}`, () => runSyncSession(session)),
+    async runSession() {
+      void forgetOld(account.id);
+      await alone(`sumpless-sync-${account.id}`, () => runSyncSession(session));
+    },
     report: (phase) => reportPhase(account.id, phase),
     schedule,
     random: Math.random,
