@@ -6,6 +6,8 @@ export const HOUR_MS = 3_600_000;
 const WEEK_MS = 7 * 24 * HOUR_MS;
 /** Hours a week are taken from the readings of this long before the last one. */
 const USE_WINDOW_MS = 8 * WEEK_MS;
+/** So many of the latest readings that wait may agree with a new one: more would take long to ask. */
+const MOST_HEARD = 100;
 /** Meters show tenths: two readings may seem this much further apart than the clock, in hours. */
 export const DISPLAY_SLACK_HOURS = 0.2;
 /** Differences of added decimals below this are rounding. */
@@ -52,12 +54,14 @@ class Readings {
   /** Takes a reading in; answers whether it counts. */
   take(reading: Reading, confirmed: boolean): boolean {
     const why = confirmed ? null : doubtAfter(this.last(reading.estimated), reading);
-    const agreeing = this.waiting.filter((earlier) => !doubtAfter(earlier, reading));
+    const recent = this.waiting.slice(-MOST_HEARD);
+    const agreeing = recent.filter((earlier) => !doubtAfter(earlier, reading));
     if (why && agreeing.length === 0) {
       this.waiting.push({ ...reading, why });
       return false;
     }
-    this.waiting = this.waiting.filter((earlier) => !agreeing.includes(earlier));
+    if (agreeing.length > 0)
+      this.waiting = this.waiting.filter((earlier) => !agreeing.includes(earlier));
     this.counted.push(...agreeing, reading);
     return true;
   }
