@@ -6,6 +6,7 @@ import { useMemo } from "react";
 import { z } from "zod";
 import { syringeSchema } from "../../shared/schemas/entry.ts";
 import { changeDraft, dropDraft, useDraft } from "./drafts.ts";
+import type { Phone } from "./logbook/phone.ts";
 
 const FORM = "test-day";
 
@@ -49,3 +50,21 @@ export const noteCheck = (clubId: string, bikeId: string, entryId: string | null
   }));
 
 export const endTestDay = (clubId: string) => dropDraft(clubId, FORM);
+
+/** The clubs that have a test day on this phone. */
+export async function clubsOnTestDay(phone: Phone): Promise<string[]> {
+  const drafts = await (await phone.open()).getAll("drafts");
+  return drafts.filter(({ form }) => form === FORM).map(({ bikeId }) => bikeId);
+}
+
+/** Takes out, of those who wait and of those who are done, the bikes that are shared no more. */
+export async function keepShared(
+  phone: Phone,
+  clubId: string,
+  shared: ReadonlySet<string>,
+): Promise<void> {
+  const isShared = ({ bikeId }: QueuedBike) => shared.has(bikeId);
+  const draft = await (await phone.open()).get("drafts", [clubId, FORM]);
+  if (parse(draft?.content).bikes.every(isShared)) return;
+  await changeTestDay(clubId, (now) => ({ ...now, bikes: now.bikes.filter(isShared) }));
+}

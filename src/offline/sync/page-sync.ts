@@ -8,6 +8,7 @@ import { rebuildBikes } from "../logbook/rebuild-bikes.ts";
 import { reportPhase } from "../sync-status.ts";
 import type { Account } from "../types.ts";
 import { forgetOld } from "./forget-old.ts";
+import { recheckClubs } from "./recheck-clubs.ts";
 import { createSyncEngine, type SyncEngine } from "./sync-engine.ts";
 import { runSyncSession, type SyncSession } from "./sync-session.ts";
 
@@ -56,6 +57,7 @@ export function startPageSync(account: Account): PageSync {
     async runSession() {
       void forgetOld(account.id);
       await alone(`sumpless-sync-${account.id}`, () => runSyncSession(session));
+      await recheckClubs(phone, () => session.isCurrent());
     },
     report: (phase) => reportPhase(account.id, phase),
     schedule,
