@@ -1,5 +1,6 @@
 import tailwindcss from "@tailwindcss/vite";
 import react from "@vitejs/plugin-react";
+import path from "node:path";
 import { defineConfig } from "vite";
 import { VitePWA } from "vite-plugin-pwa";
 
@@ -24,6 +25,15 @@ export default defineConfig({
         },
       },
     },
+  },
+  resolve: {
+    // Its package names only the build with a developer's warnings.
+    alias: [
+      {
+        find: /^react-router$/,
+        replacement: path.resolve("node_modules/react-router/dist/production/index.mjs"),
+      },
+    ],
   },
   server: { proxy: { "/api": "http://localhost:3000" } },
   plugins: [
