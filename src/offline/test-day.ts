@@ -7,6 +7,7 @@ import { z } from "zod";
 import { syringeSchema } from "../../shared/schemas/entry.ts";
 import { changeDraft, dropDraft, useDraft } from "./drafts.ts";
 import type { Phone } from "./logbook/phone.ts";
+import type { Draft } from "./types.ts";
 
 const FORM = "test-day";
 
@@ -51,10 +52,12 @@ export const noteCheck = (clubId: string, bikeId: string, entryId: string | null
 
 export const endTestDay = (clubId: string) => dropDraft(clubId, FORM);
 
+export const isTestDay = ({ form }: Draft): boolean => form === FORM;
+
 /** The clubs that have a test day on this phone. */
 export async function clubsOnTestDay(phone: Phone): Promise<string[]> {
   const drafts = await (await phone.open()).getAll("drafts");
-  return drafts.filter(({ form }) => form === FORM).map(({ bikeId }) => bikeId);
+  return drafts.filter(isTestDay).map(({ bikeId }) => bikeId);
 }
 
 /** Takes out, of those who wait and of those who are done, the bikes that are shared no more. */

@@ -1,8 +1,20 @@
 import type { Page } from "@playwright/test";
+import { readFile } from "node:fs/promises";
+import { bikeTag } from "../../shared/logbook/bike-tag.ts";
 import type { Club } from "../../shared/schemas/club.ts";
 import { bikeEntry, checkEntry, newId } from "../helpers/make-entry.ts";
 import { clubOf, exchange, member, remembered, share } from "./club-scene.ts";
-import { expect, openAs, test, testAlone, waitUntilInstalled, type Rider } from "./fixtures.ts";
+import {
+  expect,
+  expectAccessible,
+  openAs,
+  rowsOnPhone,
+  test,
+  testAlone,
+  waitUntilDrafted,
+  waitUntilInstalled,
+  type Rider,
+} from "./fixtures.ts";
 
 /** A rider's bike with one check, shared with the club. */
 async function shareNewBike(rider: Rider, name: string, club: Club): Promise<string> {
@@ -74,6 +86,47 @@ testAlone(
     await expect(page.getByRole("heading", { name: "This club is not here" })).toBeVisible();
   },
 );
+
+test("A check half typed when its bike is withdrawn can still be saved as a file", async ({
+  page,
+  server,
+}) => {
+  const [maud, wren] = [await member(server, "Maud"), await member(server, "Wren")];
+  const club = await clubOf(maud, wren);
+  const bikeId = await shareNewBike(wren, "Moss", club);
+  await openAs(maud, page, `/clubs/${club.id}/test-day`);
+  await page.getByRole("button", { name: "Add a syringe" }).click();
+  await page.getByRole("dialog").getByRole("radio", { name: /^5 mL/ }).check();
+  await page.getByRole("button", { name: "Save the syringe" }).click();
+  await page.getByRole("button", { name: /Moss/ }).click();
+  await expect(page.getByText("All their logs are on this phone")).toBeVisible();
+  await page.getByRole("link", { name: "Start: Moss" }).click();
+  await page.getByRole("textbox", { name: "Run 1: level after" }).fill("2.9");
+  await waitUntilDrafted(page, '"endText":"2.9"');
+
+  await does(wren, "DELETE", `/api/bikes/${bikeId}/shares/${club.id}`);
+  await exchange(page);
+  await expect(page.getByRole("heading", { name: "This bike is not in the queue" })).toBeVisible();
+  await page.getByRole("link", { name: "To the test day" }).click();
+  await expect(page.getByRole("heading", { name: "Queue: 0" })).toBeVisible();
+  await expect(page.getByText(/Moss|Wren/)).toBeHidden();
+  await expectAccessible(page);
+  const left = page.getByRole("region", { name: "Typed, and not saved" });
+  await expect(left).toContainText(`Bike ${bikeTag(bikeId)}`);
+  const download = page.waitForEvent("download");
+  await left.getByRole("button", { name: "Save it as a file" }).click();
+  const file = await readFile(await (await download).path(), "utf8");
+  expect(file).toContain(bikeId);
+  expect(file).toContain('"endText": "2.9"');
+
+  await page.goto("/clubs");
+  await expect(left).toBeVisible();
+  await left.getByRole("button", { name: "Discard" }).click();
+  await expectAccessible(page);
+  await page.getByRole("button", { name: "Discard it for good" }).click();
+  await expect(left).toBeHidden();
+  expect(JSON.stringify(await rowsOnPhone(page, "drafts"))).not.toContain("2.9");
+});
 
 test("A Line-up that is as it was is not sent again", async ({ page, server }) => {
   const [maud, wren] = [await member(server, "Maud"), await member(server, "Wren")];

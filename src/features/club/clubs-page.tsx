@@ -7,6 +7,7 @@ import { Page } from "../../ui/page.tsx";
 import { clubPath, membersPath, patterns, testDayPath } from "../../ui/paths.ts";
 import { AnswerNotice } from "./answer-notice.tsx";
 import { useClubs } from "./club-queries.ts";
+import { HalfDone } from "./half-done.tsx";
 import { MakeClubSheet } from "./make-club-sheet.tsx";
 import { roleWords } from "./role-words.ts";
 
@@ -37,6 +38,7 @@ export default function ClubsPage() {
           </li>
         ))}
       </ul>
+      <HalfDone />
       {making && <MakeClubSheet onClose={() => setMaking(false)} />}
     </Page>
   );

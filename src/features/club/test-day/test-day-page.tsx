@@ -4,6 +4,7 @@ import { changeTestDay, useTestDay, type TestDay } from "../../../offline/test-d
 import { ButtonLink } from "../../../ui/button-link.tsx";
 import { Page } from "../../../ui/page.tsx";
 import { clubPath, testDayBikePath } from "../../../ui/paths.ts";
+import { HalfDone } from "../half-done.tsx";
 import { AddToQueue } from "./add-to-queue.tsx";
 import { DoneList } from "./done-list.tsx";
 import { EndTestDay } from "./end-test-day.tsx";
@@ -39,6 +40,7 @@ function TestDayAsItStands({ club, testDay }: { club: Club; testDay: TestDay }) 
       <p className="-mt-3 text-lg wrap-anywhere">{club.name}</p>
       <div className="grid items-start gap-8 min-[900px]:grid-cols-2">
         <div className="flex min-w-0 flex-col gap-8">
+          <HalfDone />
           <StationSyringe value={testDay.syringe} onChange={setSyringe} />
           <QueueList clubId={club.id} bikes={waiting} />
           <DoneList clubId={club.id} bikes={done} />
