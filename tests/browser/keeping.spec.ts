@@ -31,20 +31,23 @@ const waiting = (page: Page, entries: number) =>
 /** The read cache's key; anything may happen to what stands there. */
 const cacheKey = (accountId: string) => `sumpless-read-${accountId}`;
 
+interface Cached {
+  key: string;
+  cache: string;
+}
+
+/** What may happen to it; `cache` is what stood there while all was well. */
 const harms = {
-  "weeks old": (key: string) => {
-    const cache = JSON.parse(localStorage.getItem(key)!) as object;
-    localStorage.setItem(
-      key,
-      JSON.stringify({ ...cache, timestamp: Date.now() - 21 * 86_400_000 }),
-    );
+  "weeks old": ({ key, cache }: Cached) => {
+    const aged = { ...JSON.parse(cache), timestamp: Date.now() - 21 * 86_400_000 } as object;
+    localStorage.setItem(key, JSON.stringify(aged));
   },
-  "cut off": (key: string) => localStorage.setItem(key, '{"buster":"1","clientState":{"quer'),
-  "of another shape": (key: string) =>
-    localStorage.setItem(
-      key,
-      JSON.stringify({ buster: "1", timestamp: Date.now(), clientState: { queries: "none" } }),
-    ),
+  "cut off": ({ key, cache }: Cached) =>
+    localStorage.setItem(key, cache.slice(0, cache.indexOf("queries"))),
+  "of another shape": ({ key, cache }: Cached) => {
+    const other = { ...JSON.parse(cache), clientState: { queries: "none" } } as object;
+    localStorage.setItem(key, JSON.stringify(other));
+  },
   "out of room": () => {
     let [filling, count] = ["x".repeat(1 << 20), 0];
     while (filling !== "")
@@ -100,6 +103,7 @@ testAlone(
     await page.goto("/clubs");
     const key = cacheKey(rider.id);
     await page.waitForFunction((key) => localStorage.getItem(key)?.includes("queries"), key);
+    const cache = await page.evaluate((key) => localStorage.getItem(key)!, key);
     await page.goto("/");
     await page.getByRole("button", { name: "Log hours" }).click();
     await expect(page.getByText(/^Last: 5/)).toBeVisible();
@@ -118,7 +122,7 @@ testAlone(
     const nextNote = () => notes[notes.push(`Note ${notes.length + 1}`) - 1]!;
     for (const [how, harm] of Object.entries(harms))
       await test.step(`the read cache is ${how}`, async () => {
-        await context.pages()[0]!.evaluate(harm, key);
+        await context.pages()[0]!.evaluate(harm, { key, cache });
         const opened = await openAnew(context, bike);
         await waiting(opened, 93 + notes.length);
         await writeNote(opened, nextNote());
