@@ -21,6 +21,19 @@ it("takes one account's logbook and settings off the phone, and leaves the other
   expect(rememberedAccount()).toBeNull();
 });
 
+it("takes a logbook off that a sync opens anew meanwhile", async () => {
+  const ann = account("ann");
+  rememberAccount(ann);
+  await phoneOf(ann).open();
+  const erasing = eraseFromPhone();
+  while (rememberedAccount()) {
+    await phoneOf(ann).open();
+    await new Promise((resolve) => setTimeout(resolve));
+  }
+  await erasing;
+  expect(await logbooks()).not.toContain("sumpless-logbook-ann");
+});
+
 it("does nothing where nobody is signed in", async () => {
   forgetAccount();
   await phoneOf(account("bob")).open();

@@ -14,6 +14,12 @@ function forgetSettingsOf(accountId: string): void {
   }
 }
 
+/** This page and other tabs close their connections when they hear of it; one that sleeps may not. */
+async function eraseLogbook(accountId: string): Promise<void> {
+  const erased = deleteDB(databaseNameOf(accountId)).catch(() => undefined);
+  await Promise.race([erased, new Promise((resolve) => setTimeout(resolve, PATIENCE_MS))]);
+}
+
 /**
  * Takes everything of the account off this phone, unsent entries included. The page must be left
  * afterwards: what it still holds in memory it would write down again.
@@ -21,11 +27,11 @@ function forgetSettingsOf(accountId: string): void {
 export async function eraseFromPhone(): Promise<void> {
   const account = rememberedAccount();
   if (!account) return;
-  // This page and other tabs close their connections when they hear of it; one that sleeps may not.
-  const erased = deleteDB(databaseNameOf(account.id)).catch(() => undefined);
-  await Promise.race([erased, new Promise((resolve) => setTimeout(resolve, PATIENCE_MS))]);
+  await eraseLogbook(account.id);
   forgetSettingsOf(account.id);
   forgetAccount();
   // Not left to itself, as it is elsewhere: the page may be gone before it is written.
   await writeAccountCopy(null).catch(() => undefined);
+  // A sync under way may have opened it anew; now that nobody is signed in, none does.
+  await eraseLogbook(account.id);
 }
