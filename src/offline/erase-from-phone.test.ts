@@ -24,13 +24,11 @@ it("takes one account's logbook and settings off the phone, and leaves the other
 it("takes a logbook off that a sync opens anew meanwhile", async () => {
   const ann = account("ann");
   rememberAccount(ann);
-  await phoneOf(ann).open();
-  const erasing = eraseFromPhone();
-  while (rememberedAccount()) {
-    await phoneOf(ann).open();
-    await new Promise((resolve) => setTimeout(resolve));
-  }
-  await erasing;
+  const database = await phoneOf(ann).open();
+  const opened = new Promise((resolve) => {
+    database.addEventListener("versionchange", () => resolve(phoneOf(ann).open()));
+  });
+  await Promise.all([eraseFromPhone(), opened]);
   expect(await logbooks()).not.toContain("sumpless-logbook-ann");
 });
 
