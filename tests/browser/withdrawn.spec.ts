@@ -125,7 +125,7 @@ test("A check half typed when its bike is withdrawn can still be saved as a file
   await expectAccessible(page);
   await page.getByRole("button", { name: "Discard it for good" }).click();
   await expect(left).toBeHidden();
-  expect(JSON.stringify(await rowsOnPhone(page, "drafts"))).not.toContain("2.9");
+  expect(JSON.stringify(await rowsOnPhone(page, "drafts"))).not.toContain("endText");
 });
 
 test("A Line-up that is as it was is not sent again", async ({ page, server }) => {
