@@ -1,4 +1,5 @@
 import type { Volume } from "../../../../shared/delivery/compare-to-baseline.ts";
+import { baselineIndex } from "../../../../shared/logbook/baseline-of.ts";
 import { baselineSeries } from "../../../../shared/logbook/baseline-series.ts";
 import { bikeDetails } from "../../../../shared/logbook/bike-details.ts";
 import { judgeSeries, type JudgedSeries } from "../../../../shared/logbook/judge-series.ts";
@@ -75,9 +76,7 @@ function describeSeries({ series, baseline, reference }: JudgedSeries): HistoryS
 
 /** Whether a session is the baseline that its series is held to. */
 function isBaselineOf({ sessions, baseline, reference }: JudgedSeries, index: number): boolean {
-  return (
-    reference === baseline && index === sessions.findIndex(({ pooled }) => pooled.perRunMl > 0)
-  );
+  return reference === baseline && index === baselineIndex(sessions.map(({ pooled }) => pooled));
 }
 
 function pointsOf(judgedSeries: JudgedSeries, seriesIndex: number): HistoryPoint[] {
